@@ -18,7 +18,6 @@ export const mayImport: Record<string, string[]> = {
   'shared/optimiser': ['shared/schedule'],
   'shared/grooming': ['shared/stats'],
   'shared/texts': ['shared/time'],
-  'shared/run': ['shared/schedule', 'shared/time'],
   'shared/api': ['shared/*'],
 
   server: ['server/*', 'shared/*'],
