@@ -1,0 +1,2 @@
+export function aptCommands(packages: string[]): string[][];
+export function aptCommandToPaste(packages: string[]): string;

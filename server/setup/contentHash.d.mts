@@ -1,0 +1,5 @@
+export function contentHash(
+  root: string,
+  places: string[],
+  counts?: (file: string) => boolean,
+): string;

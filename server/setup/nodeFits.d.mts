@@ -1,0 +1,1 @@
+export function nodeFits(version: string, range: string): boolean;
