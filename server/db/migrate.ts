@@ -1,0 +1,40 @@
+import { readdir } from 'node:fs/promises';
+import { fileURLToPath, pathToFileURL } from 'node:url';
+import { join } from 'node:path';
+import { SequelizeStorage, Umzug } from 'umzug';
+import { database } from './database.ts';
+import type { Migration } from './table.ts';
+
+const folder = fileURLToPath(new URL('./migrations', import.meta.url));
+
+/** Brings the schema up to date; safe to run again, and by two processes (an advisory lock). */
+export async function migrate(onStep: (name: string) => void = () => {}): Promise<number> {
+  const files = (await readdir(folder)).filter((file) => file.endsWith('.ts')).sort();
+  const umzug = new Umzug({
+    migrations: files.map((file) => ({
+      name: file.replace(/\.ts$/, ''),
+      up: async () => (await load(file)).up(database.getQueryInterface()),
+      down: async () => (await load(file)).down(database.getQueryInterface()),
+    })),
+    storage: new SequelizeStorage({ sequelize: database, tableName: 'migrations' }),
+    logger: undefined,
+  });
+  umzug.on('migrated', ({ name }) => onStep(name));
+  return database.transaction(async (lock) => {
+    const rows = (await database.query("SELECT GET_LOCK('furlong-migrate', 60) AS got", {
+      type: 'SELECT' as never,
+      transaction: lock,
+    })) as { got: number }[];
+    if (Number(rows[0]?.got) !== 1)
+      throw new Error('Another process is still migrating the database.');
+    try {
+      return (await umzug.up()).length;
+    } finally {
+      await database.query("DO RELEASE_LOCK('furlong-migrate')", { transaction: lock });
+    }
+  });
+}
+
+async function load(file: string): Promise<Migration> {
+  return (await import(pathToFileURL(join(folder, file)).href)) as Migration;
+}

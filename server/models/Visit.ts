@@ -1,0 +1,82 @@
+import {
+  type CreationOptional,
+  DataTypes,
+  type InferAttributes,
+  type InferCreationAttributes,
+  Model,
+} from 'sequelize';
+import { database } from '#server/db/database.ts';
+import { newId } from '#server/db/newId.ts';
+import { scopeModel } from '#server/db/scopeModel.ts';
+import type { Spread, TankUse } from '#shared/schedule/types.ts';
+
+export type VisitStatus = 'booked' | 'cancelled' | 'done' | 'failed';
+export interface AllowedWall {
+  startMinutes: number;
+  endMinutes: number;
+  binds: 'arrival' | 'stay';
+}
+export interface VisitPinRow {
+  vanId?: string;
+}
+/** A pet's forecast step as booked: booking stores the forecast, later models do not change it. */
+export interface ForecastStep {
+  petId: string;
+  key: string;
+  family: 'prep' | 'wash' | 'dry' | 'clip' | 'scissor' | 'wrap';
+  label: string;
+  medianSeconds: number;
+  meanSeconds: number;
+  varianceSeconds2: number;
+  attentionPermille: number;
+  reasons: { text: string; deltaSeconds: number }[];
+}
+export interface VisitForecast {
+  steps: ForecastStep[];
+  work: Spread;
+  p10Seconds: number;
+  p90Seconds: number;
+  setUpSeconds: number;
+  cleanDownSeconds: number;
+  tankUse: TankUse[];
+  needs: string[];
+  heaviestGrams: number;
+  /** Of the first pet, for leans: "curly · scissored teddy". */
+  coatStyle: string;
+}
+
+export class Visit extends Model<InferAttributes<Visit>, InferCreationAttributes<Visit>> {
+  declare id: CreationOptional<string>;
+  declare businessId: CreationOptional<string>;
+  declare householdId: string;
+  declare date: string;
+  declare status: VisitStatus;
+  declare allowed: AllowedWall[];
+  declare preferredGroomerId: CreationOptional<string | null>;
+  declare pin: CreationOptional<VisitPinRow | null>;
+  declare note: string;
+  declare forecast: VisitForecast;
+  declare modelVersion: string;
+  declare cancelReason: CreationOptional<string | null>;
+  declare createdAt: Date;
+}
+
+Visit.init(
+  {
+    id: { type: DataTypes.UUID, primaryKey: true, defaultValue: newId },
+    businessId: DataTypes.UUID,
+    householdId: DataTypes.STRING,
+    date: DataTypes.DATEONLY,
+    status: DataTypes.STRING,
+    allowed: DataTypes.JSON,
+    preferredGroomerId: DataTypes.STRING,
+    pin: DataTypes.JSON,
+    note: DataTypes.STRING,
+    forecast: DataTypes.JSON,
+    modelVersion: DataTypes.STRING,
+    cancelReason: DataTypes.STRING,
+    createdAt: DataTypes.DATE(3),
+  },
+  { sequelize: database, tableName: 'visits' },
+);
+scopeModel(Visit);
