@@ -1,11 +1,12 @@
-export function mariadbArguments(place: {
+export interface MariadbPlace {
   dataDir: string;
   port: number;
   initFile: string;
   logFile: string;
   asRoot: boolean;
   throwaway: boolean;
-}): string[];
+}
+export function mariadbArguments(place: MariadbPlace): string[];
 export function installDbArguments(place: {
   dataDir: string;
   asRoot: boolean;

@@ -1,4 +1,5 @@
 /** A set-up problem a person can act on: printed as its message alone, without a stack. */
 export class SetupError extends Error {
+  /** @override */
   name = 'SetupError';
 }

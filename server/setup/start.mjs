@@ -34,7 +34,9 @@ async function start() {
   sayWelcome(server.url, mode, signIns);
 
   const databaseEnded = database ? database.finished.then(() => 'database') : new Promise(() => {});
-  for (let crashes = []; ;) {
+  /** @type {number[]} */
+  let crashes = [];
+  for (;;) {
     const ended = await Promise.race([databaseEnded, server.finished.then(() => 'server')]);
     if (ended === 'database') {
       say(

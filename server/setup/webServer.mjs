@@ -1,5 +1,6 @@
 import { startChild } from './childProcess.mjs';
 import { freePort } from './freePort.mjs';
+import { readyUrl } from './readyUrl.mjs';
 import { rememberedPorts, rememberPorts } from './rememberedPorts.mjs';
 import { say, step } from './say.mjs';
 import { SetupError } from './setupError.mjs';
@@ -33,13 +34,4 @@ export async function startWebServer(nodeArgs, env, askedPort) {
     if (askedPort === undefined) rememberPorts({ web: Number(new URL(url).port) });
     return { url, finished: child.finished };
   });
-}
-
-/**
- * The address in a server's ready line; undefined for any other line.
- * @param {string} line
- * @returns {string | undefined}
- */
-export function readyUrl(line) {
-  return /^furlong ready (https?:\/\/\S+)\s*$/.exec(line)?.[1];
 }

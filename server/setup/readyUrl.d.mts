@@ -1,0 +1,1 @@
+export function readyUrl(line: string): string | undefined;
