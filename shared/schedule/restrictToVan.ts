@@ -1,4 +1,4 @@
-import type { DayProblem, Plan, Run } from './types.ts';
+import type { DayProblem, Plan, Run, Stop } from './types.ts';
 
 /**
  * One van's share of a day, for its phone: only its shift, its visits and the places it can reach,
@@ -62,7 +62,7 @@ function cut(matrix: readonly number[], kept: readonly number[], size: number): 
 function renumberRun(run: Run, renumber: ReadonlyMap<number, number>): Run {
   return {
     vanId: run.vanId,
-    stops: run.stops.flatMap((stop) => {
+    stops: run.stops.flatMap((stop): Stop[] => {
       if (stop.kind !== 'errand') return [stop];
       const point = renumber.get(stop.point);
       return point === undefined ? [] : [{ ...stop, point }];
