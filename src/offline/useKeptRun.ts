@@ -18,20 +18,20 @@ export function useKeptRun(runId: string): {
   refetch: () => void;
 } {
   const ownerKey = ownerKeyOf(useSession());
-  const options = runQueries.one(runId);
   const { data, error, refetch, dataUpdatedAt } = useQuery({
-    ...options,
+    ...runQueries.one(runId),
     refetchInterval: 30_000,
     refetchOnWindowFocus: true,
   });
   useEffect(() => {
     let wanted = true;
+    const { queryKey } = runQueries.one(runId);
     void openPhoneStore()
       .then((store) => store.readRun(ownerKey, runId))
       .then((kept) => {
         // Older than any answer: it only fills the screen until one comes.
-        if (wanted && kept && !queryClient.getQueryData(options.queryKey))
-          queryClient.setQueryData(options.queryKey, kept.run, { updatedAt: 1 });
+        if (wanted && kept && !queryClient.getQueryData(queryKey))
+          queryClient.setQueryData(queryKey, kept.run, { updatedAt: 1 });
       });
     return () => {
       wanted = false;
