@@ -1,0 +1,5 @@
+import { PageHeader } from '#src/components/PageHeader.tsx';
+
+export function DayScreen() {
+  return <PageHeader title="Day" />;
+}

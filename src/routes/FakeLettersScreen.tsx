@@ -1,0 +1,5 @@
+import { PageHeader } from '#src/components/PageHeader.tsx';
+
+export function FakeLettersScreen() {
+  return <PageHeader title="FakeLetters" />;
+}

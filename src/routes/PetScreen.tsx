@@ -1,0 +1,5 @@
+import { PageHeader } from '#src/components/PageHeader.tsx';
+
+export function PetScreen() {
+  return <PageHeader title="Pet" />;
+}

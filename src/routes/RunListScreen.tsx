@@ -1,0 +1,5 @@
+import { PageHeader } from '#src/components/PageHeader.tsx';
+
+export function RunListScreen() {
+  return <PageHeader title="RunList" />;
+}

@@ -1,0 +1,5 @@
+import { PageHeader } from '#src/components/PageHeader.tsx';
+
+export function RunScreen() {
+  return <PageHeader title="Run" />;
+}

@@ -1,0 +1,5 @@
+import { PageHeader } from '#src/components/PageHeader.tsx';
+
+export function SetupScreen() {
+  return <PageHeader title="Setup" />;
+}
