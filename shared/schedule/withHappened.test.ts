@@ -51,13 +51,13 @@ describe('withHappened', () => {
   );
   const day = withHappened(problem, plan, 'otter', happened, 36_000);
 
-  it('puts started stops first, as driven, and drops what was given up from afar', () => {
-    expect(day.plan.runs[0]?.stops.map(({ id }) => id)).toEqual(['b', 'a', 'c']);
+  it('puts started stops first, as driven, and leaves what was given up from afar in its place', () => {
+    expect(day.plan.runs[0]?.stops.map(({ id }) => id)).toEqual(['b', 'a', 'c', 'd']);
     expect(day.plan.runs[1]).toEqual(plan.runs[1]);
   });
 
   it('sets the clock and only facts the plan knows, keeping other vans’', () => {
     expect(day.problem.nowSeconds).toBe(36_000);
-    expect(day.problem.facts.map(({ stopId }) => stopId)).toEqual(['x', 'b']);
+    expect(day.problem.facts.map(({ stopId }) => stopId)).toEqual(['x', 'b', 'd']);
   });
 });

@@ -1,10 +1,11 @@
 import type { RunHappened } from './reduceEvents.ts';
+import { isGivenUp } from './stepFact.ts';
 import type { DayProblem, Plan } from './types.ts';
 
 /**
  * A day with what happened on one van in it, ready for `evaluateDay`: the van's facts and the clock
  * set, its started stops first in the order they were touched. A stop given up before the van set
- * out for it is left out of the run: no time was spent there and nobody drives there.
+ * out for it keeps its place among those ahead: nobody drives there and it takes no time.
  */
 export function withHappened(
   problem: DayProblem,
@@ -13,22 +14,14 @@ export function withHappened(
   happened: RunHappened,
   nowSeconds: number | null,
 ): { problem: DayProblem; plan: Plan } {
-  const givenUp = new Set(
-    [...happened.stops.values()]
-      .filter(
-        ({ fact }) =>
-          fact.failedReason !== null &&
-          fact.drivingSinceSeconds === null &&
-          fact.arrivedSeconds === null,
-      )
-      .map(({ stopId }) => stopId),
-  );
   const run = plan.runs.find((one) => one.vanId === vanId);
   const planned = new Set(run?.stops.map(({ id }) => id));
   const facts = happened.facts
-    .filter(({ stopId }) => planned.has(stopId) && !givenUp.has(stopId))
+    .filter(({ stopId }) => planned.has(stopId))
     .sort((a, b) => touchedAt(a) - touchedAt(b));
-  const place = new Map(facts.map(({ stopId }, index) => [stopId, index]));
+  const place = new Map(
+    facts.filter((fact) => !isGivenUp(fact)).map(({ stopId }, index) => [stopId, index]),
+  );
   return {
     problem: {
       ...problem,
@@ -41,9 +34,9 @@ export function withHappened(
         one.vanId === vanId
           ? {
               ...one,
-              stops: one.stops
-                .filter(({ id }) => !givenUp.has(id))
-                .sort((a, b) => (place.get(a.id) ?? LAST) - (place.get(b.id) ?? LAST)),
+              stops: one.stops.toSorted(
+                (a, b) => (place.get(a.id) ?? LAST) - (place.get(b.id) ?? LAST),
+              ),
             }
           : one,
       ),
