@@ -56,7 +56,8 @@ export function carWay(tags: OsmTags, profile: CarProfile): CarWay | null {
     backwardKmh: direction.backward ? speed('backward') : 0,
     endOnly: END_ONLY.has(access),
     flows: isRoundabout(tags) || /^(motorway|trunk)/.test(kind),
-    doorless: /^motorway/.test(kind) || kind === 'trunk_link' || (tags.tunnel ?? 'no') !== 'no',
+    doorless:
+      kind.startsWith('motorway') || kind === 'trunk_link' || (tags.tunnel ?? 'no') !== 'no',
     minor: kind === 'service',
   };
 }

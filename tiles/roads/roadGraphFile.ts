@@ -4,6 +4,8 @@ import { ROAD_ARRAYS, type RoadGraph } from './RoadGraph.ts';
 const MAGIC = 'FURLROAD';
 const align = (bytes: number) => (bytes + 7) & ~7;
 
+type SharedView = new (buffer: SharedArrayBuffer, at: number, length: number) => unknown;
+
 interface Header {
   nodeCount: number;
   stateCount: number;
@@ -63,7 +65,8 @@ function decodeRoadGraph(shared: SharedArrayBuffer, file: string): RoadGraph {
   let at = align(12 + headerBytes);
   const arrays: Record<string, unknown> = {};
   ROAD_ARRAYS.forEach(([field, ArrayType], i) => {
-    arrays[field] = new ArrayType(shared, at, lengths[i]);
+    const View: SharedView = ArrayType;
+    arrays[field] = new View(shared, at, lengths[i]!);
     at += align(lengths[i]! * ArrayType.BYTES_PER_ELEMENT);
   });
   return { ...counts, ...arrays } as unknown as RoadGraph;
