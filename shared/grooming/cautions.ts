@@ -219,6 +219,16 @@ export function findCaution(key: CautionKey): Caution {
   return caution;
 }
 
+/** The caution's name for a list or a chip: its first sentence, "Afraid of the dryer". */
+export function cautionName({ words }: Pick<Caution, 'words'>): string {
+  return words.slice(0, words.search(/[.:,]/));
+}
+
+/** Cautions a person may note on a pet, in the order of the table. */
+export function notedCautions(): Caution[] {
+  return cautions.filter(({ trigger }) => trigger.kind === 'noted');
+}
+
 /** Standing cautions to show while a step is under way. `catBite` only with cats. */
 export function standingCautions(step: StepKey, species: 'dog' | 'cat'): Caution[] {
   return cautions.filter(
