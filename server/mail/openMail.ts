@@ -1,4 +1,5 @@
 import { createTransport } from 'nodemailer';
+import { AppError } from '#server/errors.ts';
 import { openLetterBox, type LetterBox } from './fakeLetterBox.ts';
 import type { Letter } from './Letter.ts';
 
@@ -30,10 +31,20 @@ export function openMail(settings: MailSettings): Mailer {
   return open;
 }
 
-/** The mailer opened at start. Throws when nothing opened one. */
+/** The mailer opened at start. Throws 'notReady' when there is none: no mail server and no fake. */
 export function currentMailer(): Mailer {
-  if (!open) throw new Error('mail is not open: call openMail once at start');
+  if (!open)
+    throw new AppError(
+      'notReady',
+      'Letters cannot go out yet: the operator of this server must set SMTP_URL.',
+    );
   return open;
+}
+
+/** Closes the mailer; letters are refused from now on. */
+export function closeMail(): void {
+  open?.close();
+  open = null;
 }
 
 function openSmtp(smtpUrl: string, from: string): Mailer {
