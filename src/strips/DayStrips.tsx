@@ -40,10 +40,12 @@ export interface DayStripsProps {
   /** Without the left column, for a single van on a phone. */
   bare?: boolean;
   highlightedStopId: string | null;
-  movedVisitId: string | null;
+  movedVisitIds: ReadonlySet<string>;
   carriedVisitId: string | null;
   shifts: ReadonlyMap<string, number> | null;
   drop: { target: DropTarget; visitId: string } | null;
+  /** Where a visit stands in the day as it is, while a change is drawn. */
+  ghost: { vanId: string; fromSeconds: number; toSeconds: number } | null;
   onHighlight: (stopId: string | null) => void;
   onOpenVisit: (visitId: string) => void;
   onPointerDownVisit: (visitId: string, event: PointerEvent) => void;
@@ -124,11 +126,12 @@ export function DayStrips(props: DayStripsProps) {
                     row={rows[index]!}
                     axis={axis}
                     highlightedStopId={props.highlightedStopId}
-                    movedVisitId={props.movedVisitId}
+                    movedVisitIds={props.movedVisitIds}
                     carriedVisitId={props.carriedVisitId}
                     shifts={props.shifts}
                   />
                 ))}
+                {props.ghost && <GhostMark ghost={props.ghost} rows={rows} axis={axis} />}
                 {drop && <DropMark {...drop} />}
                 <NowLine day={day} axis={axis} seconds={props.nowSeconds} heightPx={height} />
               </g>
@@ -227,6 +230,35 @@ function DropMark({ x, row, axis }: { x: number; row: StripRow; axis: TimeAxis }
         strokeLinejoin="round"
       />
     </g>
+  );
+}
+
+/** The empty place a moved visit leaves behind. */
+function GhostMark({
+  ghost,
+  rows,
+  axis,
+}: {
+  ghost: NonNullable<DayStripsProps['ghost']>;
+  rows: readonly StripRow[];
+  axis: TimeAxis;
+}) {
+  const row = rows.find((one) => one.vanId === ghost.vanId);
+  if (!row) return null;
+  const x = xOf(axis, ghost.fromSeconds);
+  return (
+    <rect
+      x={x}
+      y={row.baseline - row.towerPx * 0.6}
+      width={Math.max(4, xOf(axis, ghost.toSeconds) - x)}
+      height={row.towerPx * 0.6}
+      rx={6}
+      fill="none"
+      stroke="var(--merle)"
+      strokeWidth={1.2}
+      strokeDasharray="2 4"
+      pointerEvents="none"
+    />
   );
 }
 

@@ -20,6 +20,8 @@ export function PromiseBracket({
   const came = stop.state !== 'ahead' && stop.state !== 'driving';
   const from = stop.promise ? xOf(axis, stop.promise.startSeconds) + 1.5 : 0;
   const to = stop.promise ? xOf(axis, stop.promise.endSeconds) - 1.5 : 0;
+  // An arrival wholly before its window is tied to it: that van will wait.
+  const gap = stop.arrival ? from - xOf(axis, stop.arrival.lateSeconds) : 0;
   return (
     <g pointerEvents="none">
       {stop.promise && (
@@ -28,6 +30,16 @@ export function PromiseBracket({
           fill="none"
           stroke={stop.atRisk ? 'var(--rosette)' : '#B9A98A'}
           strokeWidth={1.6}
+        />
+      )}
+      {stop.promise && stop.arrival && !came && gap > 1 && (
+        <line
+          x1={xOf(axis, stop.arrival.lateSeconds)}
+          x2={from}
+          y1={y + 3.5}
+          y2={y + 3.5}
+          stroke={color}
+          strokeDasharray="2 3"
         />
       )}
       {stop.arrival && came && (

@@ -9,12 +9,15 @@ export function StepTowers({
   xOf,
   heightOf,
   faded = false,
+  letters = false,
 }: {
   towers: readonly Tower[];
   baseline: number;
   xOf: (seconds: number) => number;
   heightOf: (attentionPermille: number) => number;
   faded?: boolean;
+  /** Each family's letter, where a zoomed tower has room for it. */
+  letters?: boolean;
 }) {
   const paint = useStepPaint();
   return (
@@ -36,7 +39,7 @@ export function StepTowers({
               stroke="var(--ink)"
               strokeWidth={1}
             />
-            {width >= 26 && height >= 18 && (
+            {letters && width >= 18 && height >= 18 && (
               <g pointerEvents="none">
                 {/* Letters stand on a plain ground, or the pattern eats them. */}
                 <rect

@@ -58,6 +58,7 @@ export const StopMark = memo(function StopMark(props: StopMarkProps) {
               xOf={(seconds) => xOf(axis, seconds)}
               heightOf={(permille) => towerHeight(row, permille)}
               faded={stop.state === 'done'}
+              letters={axis.pxPerSecond * 3600 > 180}
             />
             <StopLabel {...props} x={x} />
           </>
@@ -109,7 +110,7 @@ function StopGround(props: StopMarkProps & { x: number; width: number }) {
 
 function StopLabel(props: StopMarkProps & { x: number }) {
   const { day, stop, row, axis, x } = props;
-  const room = Math.max(24, xOf(axis, props.roomToSeconds) - x - 6);
+  const room = Math.max(24, xOf(axis, props.roomToSeconds) - x - 10);
   const mark =
     stop.state === 'done' ? '✓ ' : stop.state === 'failed' ? '✕ ' : stop.pinned ? '⚲ ' : '';
   const words = stopWords(day, stop, props.shiftSeconds);

@@ -11,12 +11,12 @@ export function StripPatterns({ id }: { id: string }) {
     <defs>
       <pattern id={`${id}-wash`} width="5" height="5" patternUnits="userSpaceOnUse">
         <rect width="5" height="5" fill="var(--mint)" />
-        <circle cx="1.4" cy="1.4" r="0.75" fill="var(--collar)" />
-        <circle cx="3.9" cy="3.9" r="0.75" fill="var(--collar)" />
+        <circle cx="1.4" cy="1.4" r="0.65" fill="#3f8478" />
+        <circle cx="3.9" cy="3.9" r="0.65" fill="#3f8478" />
       </pattern>
       <pattern id={`${id}-dry`} width="4" height="4" patternUnits="userSpaceOnUse">
         <rect width="4" height="4" fill="var(--honey)" />
-        <rect width="0.9" height="4" x="1.5" fill="#8a6414" />
+        <rect width="0.8" height="4" x="1.5" fill="#a87d22" />
       </pattern>
       <pattern
         id={`${id}-scissor`}

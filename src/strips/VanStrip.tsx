@@ -13,7 +13,7 @@ export interface VanStripProps {
   row: StripRow;
   axis: TimeAxis;
   highlightedStopId: string | null;
-  movedVisitId: string | null;
+  movedVisitIds: ReadonlySet<string>;
   carriedVisitId: string | null;
   /** By visit: arrival against the day as it is; null when no change is drawn. */
   shifts: ReadonlyMap<string, number> | null;
@@ -37,7 +37,7 @@ export const VanStrip = memo(function VanStrip(props: VanStripProps) {
             axis={axis}
             roomToSeconds={next?.fromSeconds ?? axis.toSeconds}
             highlighted={props.highlightedStopId === stop.stopId}
-            moved={stop.visitId !== null && props.movedVisitId === stop.visitId}
+            moved={stop.visitId !== null && props.movedVisitIds.has(stop.visitId)}
             carried={stop.visitId !== null && props.carriedVisitId === stop.visitId}
             shiftSeconds={(stop.visitId && props.shifts?.get(stop.visitId)) || 0}
           />
@@ -85,8 +85,9 @@ function ShiftGround({ strip, row, axis }: { strip: Strip; row: StripRow; axis: 
         <g>
           <rect x={end} y={y - 14} width={finish - end} height={14} fill={over} />
           <text
-            x={finish + 4}
-            y={y - 4}
+            x={finish}
+            y={y - 18}
+            textAnchor="end"
             fontSize={11}
             fontWeight={600}
             fill="var(--rosette)"

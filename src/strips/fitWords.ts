@@ -9,4 +9,4 @@ export function fitWords(words: string, widthPx: number, fontPx: number): string
 }
 
 /** Mean width of Work Sans' letters in ems, a little on the safe side. */
-const LETTER = 0.55;
+const LETTER = 0.57;

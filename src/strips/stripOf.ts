@@ -34,8 +34,15 @@ export function stripOf(
   );
   let visitIndex = 0;
   for (const stop of stops) if (stop.kind === 'visit') stop.visitIndex = visitIndex++;
-  const promised = stops.flatMap((stop) => (stop.promise ? [stop.promise] : []));
-  const levels = bracketLevels(promised);
+  const hanging = stops.filter((stop) => stop.promise !== null);
+  const promised = hanging.flatMap((stop) => (stop.promise ? [stop.promise] : []));
+  // An arrival bar that pokes out of its window must not lie in a neighbour's bracket.
+  const levels = bracketLevels(
+    hanging.map(({ promise, arrival }) => ({
+      startSeconds: Math.min(promise!.startSeconds, arrival!.earlySeconds),
+      endSeconds: Math.max(promise!.endSeconds, arrival!.lateSeconds),
+    })),
+  );
   promised.forEach((promise, index) => (promise.level = levels[index]!));
   const last = times.stops.at(-1);
   const first = times.stops[0];
