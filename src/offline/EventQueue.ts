@@ -13,7 +13,7 @@ export interface QueueSnapshot {
   /** In order, refused ones included. */
   queued: readonly QueuedEvent[];
   /** Taken by the server while this page was open: an older answer must not hide them. */
-  taken: readonly RunEvent[];
+  taken: readonly { runId: string; event: RunEvent }[];
   /** The last try failed; the next comes by itself. */
   waiting: boolean;
 }
@@ -150,7 +150,8 @@ export class EventQueue {
     try {
       const run = await this.#parts.send(batch[0]!.runId, events);
       this.#waitMs = FIRST_WAIT_MS;
-      this.#set({ waiting: false, taken: [...this.#snapshot.taken, ...events].slice(-400) });
+      const now = batch.map(({ runId, event }) => ({ runId, event }));
+      this.#set({ waiting: false, taken: [...this.#snapshot.taken, ...now].slice(-400) });
       this.#parts.onRun(run);
       await this.#parts.store.remove(events.map(({ id }) => id));
       return true;

@@ -1,5 +1,5 @@
-import { PageHeader } from '#src/components/PageHeader.tsx';
+import { RunList } from '#src/features/run/RunList.tsx';
 
 export function RunListScreen() {
-  return <PageHeader title="RunList" />;
+  return <RunList />;
 }

@@ -1,0 +1,75 @@
+import { formatWall, formatWallRange } from '#shared/time/formatWall.ts';
+import { writeSpan } from '#src/lib/words.ts';
+import { KerbCard } from './KerbCard.tsx';
+import { mayText } from './nextAction.ts';
+import { PetCard } from './PetCard.tsx';
+import { StandingWords } from './StandingWords.tsx';
+import { stopStanding } from './stopStanding.ts';
+import { VisitMinutes } from './VisitMinutes.tsx';
+import type { RunStop, RunView } from './runView.ts';
+
+/** A stop before its work: where, what to mind, who and how long. */
+export function StopPanel({ view, stop }: { view: RunView; stop: RunStop }) {
+  const { visit } = stop;
+  return (
+    <>
+      <p className="text-[15px] leading-snug text-slate">{headWords(view, stop)}</p>
+      <h1 className="mb-1.5 text-[26px] leading-[1.12] tracking-tight">{stop.title}</h1>
+      {stop.promise && (stop.state === 'ahead' || stop.state === 'driving') && (
+        <p className="mb-2">
+          <StandingWords standing={stopStanding(stop)} />
+          {stop.times.onTimePermille !== null && (
+            <span className="text-slate">
+              {' '}
+              · arriving{' '}
+              {formatWallRange(
+                view.problem,
+                stop.times.arriveEarlySeconds,
+                stop.times.arriveLateSeconds,
+              )}
+            </span>
+          )}
+        </p>
+      )}
+      <div className="mt-3 grid gap-3">
+        <KerbCard stop={stop} />
+        {visit?.pets.map((pet) => (
+          <PetCard
+            key={pet.id}
+            pet={pet}
+            minutesWords={writeSpan(
+              visit.steps
+                .filter(({ petId }) => petId === pet.id)
+                .reduce((sum, step) => sum + step.meanSeconds, 0),
+            )}
+          />
+        ))}
+        {visit && <VisitMinutes visit={visit} />}
+        {visit && stop.state === 'ahead' && !mayText(visit) && (
+          <p className="text-[15px] text-slate">
+            {visit.phone
+              ? 'No text goes out: they have not agreed to texts. Call before you set out.'
+              : 'No text goes out: no phone number is kept.'}
+          </p>
+        )}
+      </div>
+    </>
+  );
+}
+
+function headWords(view: RunView, stop: RunStop): string {
+  const day = view.problem;
+  const { times, state } = stop;
+  const promised = stop.promise
+    ? ` · promised ${formatWallRange(day, stop.promise.startSeconds, stop.promise.endSeconds)}`
+    : '';
+  const rough = times.rough ? ', rough' : '';
+  if (state === 'driving')
+    return `On the way, there about ${formatWall(day, times.arriveSeconds)}${promised}`;
+  if (state === 'arrived') return `Here since ${formatWall(day, times.arriveSeconds)}${promised}`;
+  if (state === 'working')
+    return `Here since ${formatWall(day, times.arriveSeconds)} · done about ${formatWall(day, times.endSeconds)}`;
+  const drive =
+    times.driveSeconds > 0 ? ` · ${writeSpan(times.driveSeconds)} drive${rough}` : ' · no driving';
+  return `Next, ${formatWall(day, times.arriveSeconds)}${drive}${promised}`;
+}
