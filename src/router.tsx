@@ -38,7 +38,7 @@ export const routes: RouteObject[] = [
             lazy: () => screen(import('./routes/NewPasswordScreen.tsx'), 'NewPasswordScreen'),
           },
           {
-            path: '/invitation/:token',
+            path: '/join/:token',
             lazy: () => screen(import('./routes/InvitationScreen.tsx'), 'InvitationScreen'),
           },
         ],

@@ -1,4 +1,5 @@
-import { keepPreviousData, queryOptions } from '@tanstack/react-query';
+import { keepPreviousData, queryOptions, useQuery } from '@tanstack/react-query';
+import { useEffect, useState } from 'react';
 import { findAddresses, findNearestAddress, getRoadLines } from '#shared/api/addresses.ts';
 import { callApi } from './callApi.ts';
 
@@ -24,3 +25,18 @@ export const addressQueries = {
 /** The address next to a pin a person dropped. */
 export const readNearestAddress = (lat: number, lon: number) =>
   callApi(findNearestAddress, { query: { lat, lon } });
+
+/** Addresses for what a person is typing, asked after a short pause. */
+export function useAddressSearch(text: string) {
+  const [asked, setAsked] = useState(text);
+  useEffect(() => {
+    const timer = setTimeout(() => setAsked(text), 180);
+    return () => clearTimeout(timer);
+  }, [text]);
+  const found = useQuery(addressQueries.find(asked.trim()));
+  return {
+    addresses: asked.trim().length > 1 ? (found.data ?? []) : [],
+    searching: found.isFetching || asked !== text,
+    failed: found.isError,
+  };
+}

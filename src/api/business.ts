@@ -1,8 +1,9 @@
-import { queryOptions } from '@tanstack/react-query';
+import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
 import { getBusiness, listAreas, updateBusiness } from '#shared/api/business.ts';
+import { getSession } from '#shared/api/session.ts';
 import { callApi } from './callApi.ts';
-import { dayKeys } from './days.ts';
-import { useApiMutation } from './useApiMutation.ts';
+import type { CallParts } from './sendRequest.ts';
+import { setSession } from './sessionStore.ts';
 
 export const businessKeys = { one: ['business'] as const, areas: ['areas'] as const };
 
@@ -20,5 +21,14 @@ export const businessQueries = {
     }),
 };
 
-export const useUpdateBusiness = () =>
-  useApiMutation(updateBusiness, [businessKeys.one, dayKeys.all]);
+/** The sign-in carries name, zone and units too, so it is read again. */
+export function useUpdateBusiness() {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (parts: CallParts<typeof updateBusiness>) => callApi(updateBusiness, parts),
+    onSuccess: async () => {
+      setSession(await callApi(getSession, {}));
+      await client.invalidateQueries();
+    },
+  });
+}

@@ -2,11 +2,16 @@ import { useEffect } from 'react';
 import { useBlocker } from 'react-router-dom';
 import { ConfirmDialog } from './ConfirmDialog.tsx';
 
-/** Asks before leaving a screen whose changes are not saved; also when the tab is closed. */
+/**
+ * Asks before leaving a screen whose changes are not saved; also when the tab is closed. A form that
+ * has just been saved goes on with `navigate(to, { state: { saved: true } })`.
+ */
 export function UnsavedGuard({ when }: { when: boolean }) {
   const blocker = useBlocker(
     ({ currentLocation, nextLocation }) =>
-      when && currentLocation.pathname !== nextLocation.pathname,
+      when &&
+      currentLocation.pathname !== nextLocation.pathname &&
+      !(nextLocation.state as { saved?: boolean } | null)?.saved,
   );
   useEffect(() => {
     if (!when) return;

@@ -42,6 +42,6 @@ function nestErrors<Input extends FieldValues>(issues: readonly Issue[]): FieldE
 function sentence(message: string): string {
   if (/^Invalid input: expected \w+, received (null|undefined|NaN)/.test(message))
     return 'must be filled in';
-  if (/^Invalid input: expected number/.test(message)) return 'must be a number';
+  if (message.startsWith('Invalid input: expected number')) return 'must be a number';
   return message.startsWith('Invalid input') ? 'must be chosen' : message;
 }

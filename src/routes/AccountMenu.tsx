@@ -1,7 +1,9 @@
-import { useEffect, useRef } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import { Link, useLocation, useNavigate } from 'react-router-dom';
 import type { Session } from '#shared/api/session.ts';
 import { useSignOut, useSwitchBusiness } from '#src/api/session.ts';
+import { countUnsent } from '#src/offline/countUnsent.ts';
+import { forgetRuns } from '#src/offline/forgetRuns.ts';
 import { toast } from '#src/components/toast.ts';
 import { errorWords } from '#src/lib/errorWords.ts';
 
@@ -11,6 +13,7 @@ export function AccountMenu({ session }: { session: Session }) {
   const location = useLocation();
   const navigate = useNavigate();
   const signOut = useSignOut();
+  const [askedOnce, setAskedOnce] = useState(false);
   const switchBusiness = useSwitchBusiness();
   useEffect(() => {
     if (box.current) box.current.open = false;
@@ -41,6 +44,11 @@ export function AccountMenu({ session }: { session: Session }) {
       },
     );
   const leave = async () => {
+    if ((await countUnsent().catch(() => 0)) > 0 && !askedOnce) {
+      setAskedOnce(true);
+      return;
+    }
+    await forgetRuns().catch(() => undefined);
     // Signed out here even when the server could not be told.
     await signOut.mutateAsync().catch(() => undefined);
     navigate('/sign-in', { replace: true });
@@ -88,8 +96,14 @@ export function AccountMenu({ session }: { session: Session }) {
           </div>
         )}
         <div className="border-t border-linen pt-1">
+          {askedOnce && (
+            <p role="alert" className="px-3 py-2 text-sm">
+              Some taps of the run have not reached the desk yet. They stay on this phone and go out
+              when you sign in again.
+            </p>
+          )}
           <button type="button" className={row} disabled={signOut.isPending} onClick={leave}>
-            Sign out
+            {askedOnce ? 'Sign out and leave them unsent' : 'Sign out'}
           </button>
         </div>
       </div>

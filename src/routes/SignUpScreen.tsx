@@ -20,7 +20,7 @@ export function SignUpScreen() {
   const session = useMaybeSession();
   const navigate = useNavigate();
   const create = useSignUp();
-  const here = useMemo(detectPlace, []);
+  const here = useMemo(() => detectPlace(), []);
   const form = useZodForm(signUp.body, {
     name: '',
     email: '',
