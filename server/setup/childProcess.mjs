@@ -108,6 +108,11 @@ export async function stopEveryChild() {
   for (const child of [...running].reverse()) await stopChild(child);
 }
 
+/** Whether we are ending everything: then a child's end is no surprise. */
+export function isClosing() {
+  return closing;
+}
+
 /** @param {number} pid @param {NodeJS.Signals} signal */
 function signalGroup(pid, signal) {
   try {

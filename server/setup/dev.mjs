@@ -1,7 +1,7 @@
 // `npm run dev`: as `npm start`, but the server restarts and the client reloads at each change.
 import path from 'node:path';
 import { lockCheckout } from './checkoutLock.mjs';
-import { startChild } from './childProcess.mjs';
+import { isClosing, startChild } from './childProcess.mjs';
 import { ensureModules } from './ensureModules.mjs';
 import { ensureNode } from './ensureNode.mjs';
 import { freePort } from './freePort.mjs';
@@ -53,6 +53,6 @@ async function dev() {
 
   const ends = [server.finished, vite.finished, ...(database ? [database.finished] : [])];
   await Promise.race(ends);
-  say('A part of it has ended, so the rest stops too.');
+  if (!isClosing()) say('A part of it has ended, so the rest stops too.');
   return 1;
 }

@@ -14,6 +14,8 @@ const endings = [];
  */
 export async function runSetup(main, { stoppedCode }) {
   let code = 1;
+  // A terminal that was closed takes no more words; that must not stop the stopping.
+  for (const stream of [process.stdout, process.stderr]) stream.on('error', () => {});
   try {
     code = await Promise.race([main(), stopSignal().then(() => stoppedCode)]);
   } catch (error) {
@@ -35,13 +37,18 @@ export function atEnd(end) {
 function stopSignal() {
   return new Promise((resolve) => {
     let stopping = false;
-    for (const name of /** @type {NodeJS.Signals[]} */ (['SIGINT', 'SIGTERM', 'SIGHUP'])) {
-      process.on(name, () => {
-        if (stopping) return;
-        stopping = true;
-        say('\nStopping …');
-        resolve();
-      });
+    const stop = () => {
+      if (stopping) return;
+      stopping = true;
+      say('\nStopping …');
+      resolve();
+    };
+    for (const name of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(name, stop);
+    // Who ends only npm (a service manager, a script) ends the shell between npm and us with it,
+    // and that shell tells us nothing: its going is the sign.
+    const parent = process.ppid;
+    if (process.env.npm_lifecycle_event) {
+      setInterval(() => process.ppid !== parent && stop(), 500).unref();
     }
   });
 }

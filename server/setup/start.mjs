@@ -1,6 +1,7 @@
 // `npm start`: everything from a bare checkout to a running Furlong. Plain Node, because it runs
 // before any package is installed.
 import { lockCheckout } from './checkoutLock.mjs';
+import { isClosing } from './childProcess.mjs';
 import { ensureModules } from './ensureModules.mjs';
 import { ensureNode } from './ensureNode.mjs';
 import { ensureMariadb } from './mariadb.mjs';
@@ -38,6 +39,7 @@ async function start() {
   let crashes = [];
   for (;;) {
     const ended = await Promise.race([databaseEnded, server.finished.then(() => 'server')]);
+    if (isClosing()) return 0;
     if (ended === 'database') {
       say(
         'The database has ended, so Furlong stops too. `npm start` brings both back, nothing is lost.',
