@@ -1,4 +1,5 @@
 import { dropDatabase, makeDatabase } from '../support/freshDatabase.ts';
+import { seededRandom } from '../support/random.ts';
 import type { Server } from 'node:http';
 import type { AddressInfo } from 'node:net';
 import express from 'express';
@@ -259,6 +260,31 @@ describe('sendDueTexts', () => {
   });
 });
 
+describe('a bad day at the carrier', () => {
+  it('delivers each text once through lost answers, outages and muddled callbacks', async () => {
+    const household = await makeHousehold();
+    for (let n = 0; n < 40; n += 1) await queue(household, { petNames: [`Pet ${n}`] });
+    const draw = seededRandom(7);
+    const oneOf = <Thing>(things: readonly Thing[]) => things[Math.floor(draw() * things.length)]!;
+    const modes = ['fine', 'acceptThenDrop', 'down', 'throttled'] as const;
+    for (let round = 0; round < 60; round += 1) {
+      fake().switches.mode = oneOf(modes);
+      fake().switches.callbacks = oneOf(['inOrder', 'duplicate', 'reversed'] as const);
+      await Promise.all([send(round * 15_000, draw), send(round * 15_000, draw)]);
+      if (draw() < 0.3) await fake().settle();
+    }
+    fake().switches.mode = 'fine';
+    for (let n = 0; n < 6; n += 1) await send(3_600_000 + n * 300_000);
+    await fake().settle();
+    const bodies = fake()
+      .messages()
+      .map((message) => message.body);
+    expect(bodies).toHaveLength(40);
+    expect(new Set(bodies).size).toBe(40);
+    expect(new Set(await statuses())).toEqual(new Set(['delivered']));
+  });
+});
+
 describe('status callbacks', () => {
   it('move a text forward only', async () => {
     const text = await queue(await makeHousehold());
@@ -445,15 +471,21 @@ async function makeVisit(household: Household): Promise<string> {
   return visit.id;
 }
 
-type Extra = { visitId?: string; promiseVersion?: number; dueAt?: Date; until?: Date };
+type Extra = {
+  petNames?: string[];
+  visitId?: string;
+  promiseVersion?: number;
+  dueAt?: Date;
+  until?: Date;
+};
 
-function booked(household: Household, extra: Extra = {}) {
+function booked(household: Household, { petNames = ['Pip'], ...extra }: Extra = {}) {
   return {
     householdId: household.id,
     visitId: null,
     kind: 'booked' as const,
     promiseVersion: 1,
-    fields: { petNames: ['Pip'], date: '2026-04-14', promise: { from: '9:30', to: '11:30' } },
+    fields: { petNames, date: '2026-04-14', promise: { from: '9:30', to: '11:30' } },
     now: new Date(),
     ...extra,
   };

@@ -51,22 +51,25 @@ export async function queueText<Kind extends TextKind>(
     statusAt: now,
   };
   const key = { visitId, kind, promiseVersion, recipient };
-  const known = await findKnown(key);
+  const known = await findKnown(key, false);
   if (known) return known.status === 'notSent' ? known.update(state) : known;
   try {
     return await OutboxText.create({ ...key, ...state, householdId, createdAt: now });
   } catch (error) {
     // Another process wrote the same text between our look and our write.
     if (!(error instanceof UniqueConstraintError)) throw error;
-    return (await findKnown(key))!;
+    return (await findKnown(key, true))!;
   }
 }
 
 type Key = Pick<OutboxText, 'visitId' | 'kind' | 'promiseVersion' | 'recipient'>;
 
-async function findKnown(key: Key): Promise<OutboxText | null> {
-  // Locked, because a plain read would not see rows committed after this transaction began.
-  return key.visitId === null ? null : OutboxText.findOne({ where: { ...key }, lock: true });
+/**
+ * Locking also sees rows committed after this transaction began. The first look must not lock: on
+ * a row that is not there it would lock the gap, and texts of other visits would wait for each other.
+ */
+async function findKnown(key: Key, lock: boolean): Promise<OutboxText | null> {
+  return key.visitId === null ? null : OutboxText.findOne({ where: { ...key }, lock });
 }
 
 async function whyQuiet(household: Household, sender: string): Promise<string | null> {
