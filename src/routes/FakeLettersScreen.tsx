@@ -1,5 +1,5 @@
-import { PageHeader } from '#src/components/PageHeader.tsx';
+import { FakeLetters } from '#src/features/texts/FakeLetters.tsx';
 
 export function FakeLettersScreen() {
-  return <PageHeader title="FakeLetters" />;
+  return <FakeLetters />;
 }

@@ -1,5 +1,5 @@
-import { PageHeader } from '#src/components/PageHeader.tsx';
+import { FakePhones } from '#src/features/texts/FakePhones.tsx';
 
 export function FakePhonesScreen() {
-  return <PageHeader title="FakePhones" />;
+  return <FakePhones />;
 }

@@ -1,5 +1,5 @@
-import { PageHeader } from '#src/components/PageHeader.tsx';
+import { ReviewPage } from '#src/features/review/ReviewPage.tsx';
 
 export function ReviewScreen() {
-  return <PageHeader title="Review" />;
+  return <ReviewPage />;
 }

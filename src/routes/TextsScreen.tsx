@@ -1,5 +1,5 @@
-import { PageHeader } from '#src/components/PageHeader.tsx';
+import { TextList } from '#src/features/texts/TextList.tsx';
 
 export function TextsScreen() {
-  return <PageHeader title="Texts" />;
+  return <TextList />;
 }

@@ -1,0 +1,46 @@
+import type { Review } from '#shared/api/review.ts';
+import { leanWords } from './reviewWords.ts';
+
+/** A lean of this much or more is worth a look. */
+const notable = 80;
+
+export function LeanTable({ leans }: { leans: Review['leans'] }) {
+  if (leans.length === 0)
+    return <p className="text-slate">Leans show once finished visits can be compared.</p>;
+  const sorted = leans.toSorted(
+    (a, b) => Math.abs(b.leanPermille) - Math.abs(a.leanPermille) || b.visits - a.visits,
+  );
+  return (
+    <div className="-mx-2 overflow-x-auto">
+      <table className="plain">
+        <thead>
+          <tr>
+            <th scope="col">Coat and style</th>
+            {['visits', 'forecast', 'clock', 'lean'].map((words) => (
+              <th key={words} scope="col" className="num">
+                {words}
+              </th>
+            ))}
+          </tr>
+        </thead>
+        <tbody>
+          {sorted.map((lean) => {
+            const far = Math.abs(lean.leanPermille) >= notable && lean.visits >= 3;
+            return (
+              <tr key={lean.coatStyle}>
+                <td>{lean.coatStyle}</td>
+                <td className="num">{lean.visits}</td>
+                <td className="num">{Math.round(lean.forecastSeconds / 60)}</td>
+                <td className="num">{Math.round(lean.clockSeconds / 60)}</td>
+                <td className={`num ${far ? 'font-semibold text-rosette' : ''}`}>
+                  {far && <span aria-hidden="true">▲ </span>}
+                  {leanWords(lean.leanPermille)}
+                </td>
+              </tr>
+            );
+          })}
+        </tbody>
+      </table>
+    </div>
+  );
+}
