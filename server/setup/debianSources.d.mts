@@ -1,0 +1,4 @@
+export function debianSources(
+  targets: string,
+  release: string,
+): { mirror: string; aptSources: string };
