@@ -10,18 +10,24 @@ import { newId } from '#server/db/newId.ts';
 import { env } from '#server/env.ts';
 import { answerErrors } from '#server/http/answerErrors.ts';
 import { startJobs } from '#server/jobs/startJobs.ts';
+import { ArrivalLink } from '#server/models/ArrivalLink.ts';
 import { Business } from '#server/models/Business.ts';
 import { Household } from '#server/models/Household.ts';
 import { InboundText } from '#server/models/InboundText.ts';
 import { OptOut } from '#server/models/OptOut.ts';
 import { OutboxText } from '#server/models/OutboxText.ts';
+import { Pet } from '#server/models/Pet.ts';
 import { Visit } from '#server/models/Visit.ts';
+import { VisitPet } from '#server/models/VisitPet.ts';
 import { textRoutes } from '#server/routes/textRoutes.ts';
 import { webhookRoutes } from '#server/routes/webhookRoutes.ts';
 import { startingWeights } from '#server/services/accounts/startingWeights.ts';
+import { hashToken } from '#server/services/secrets/tokens.ts';
 import { callbackUrl } from '#server/services/texts/callbackUrl.ts';
+import { dropTexts } from '#server/services/texts/dropTexts.ts';
 import { listTexts } from '#server/services/texts/listTexts.ts';
 import { currentFake, openCarriers } from '#server/services/texts/openCarriers.ts';
+import { queueOnTheWay } from '#server/services/texts/queueOnTheWay.ts';
 import { queueText } from '#server/services/texts/queueText.ts';
 import { sendDueTexts } from '#server/services/texts/sendDueTexts.ts';
 import { magicNumbers } from '#server/sms/fake/refusals.ts';
@@ -113,6 +119,57 @@ describe('queueText', () => {
     await expect(inBusiness(other.id, () => queueText(booked(household)))).rejects.toMatchObject({
       code: 'notFound',
     });
+  });
+});
+
+describe('queueOnTheWay', () => {
+  const until = new Date(Date.now() + 20 * 60_000);
+  const onTheWay = (visitId: string) =>
+    inBusiness(business.id, () =>
+      queueOnTheWay({
+        visitId,
+        runId: newId(),
+        groomerName: 'Mika',
+        arrival: { from: '9:48', to: '9:56' },
+        until,
+        origin: 'https://vans.example.org',
+        now: new Date(),
+      }),
+    );
+
+  it('tells the household once, with a link only its hash is kept of', async () => {
+    const household = await makeHousehold();
+    const visitId = await makeVisit(household);
+    await addPets(household, visitId, ['Pip', 'Juno']);
+    const text = await onTheWay(visitId);
+    const words =
+      /^Saltmarsh: Mika is on the way for Pip and Juno\. Please open the door 9:48-9:56\. Live: https:\/\/vans\.example\.org\/a\/([\w-]{22})$/;
+    const token = words.exec(text.body)![1]!;
+    expect(text.staleAfter).toEqual(until);
+    expect((await onTheWay(visitId)).id).toBe(text.id);
+    const links = await inBusiness(business.id, () => ArrivalLink.findAll());
+    expect(links).toMatchObject([{ visitId, tokenHash: hashToken(token) }]);
+    await send();
+    expect(fake().messages()).toMatchObject([{ to: household.phone, body: text.body }]);
+  });
+
+  it('makes no link for a text that stays', async () => {
+    const household = await makeHousehold({ textsConsent: false });
+    const text = await onTheWay(await makeVisit(household));
+    expect(text.status).toBe('notSent');
+    expect(await inBusiness(business.id, () => ArrivalLink.count())).toBe(0);
+  });
+
+  it('is taken back when the van has arrived first', async () => {
+    const visitId = await makeVisit(await makeHousehold());
+    await onTheWay(visitId);
+    const dropped = await inBusiness(business.id, () =>
+      dropTexts({ visitId, kinds: ['onTheWay'], reason: 'The van had arrived.', now: new Date() }),
+    );
+    expect(dropped).toBe(1);
+    await send();
+    expect(await rows()).toMatchObject([{ status: 'stale', reason: 'The van had arrived.' }]);
+    expect(fake().messages()).toEqual([]);
   });
 });
 
@@ -469,6 +526,28 @@ async function makeVisit(household: Household): Promise<string> {
     }),
   );
   return visit.id;
+}
+
+async function addPets(household: Household, visitId: string, names: string[]): Promise<void> {
+  await inBusiness(business.id, async () => {
+    for (const [position, name] of names.entries()) {
+      const pet = await Pet.create({
+        householdId: household.id,
+        name,
+        species: 'dog',
+        matting: 0,
+        soil: 0,
+        temperament: 'calm',
+        cautions: [],
+        cautionNote: 'bites when towelled',
+        vetName: '',
+        styleId: 'bath',
+        styleNotes: '',
+        intervalWeeks: 6,
+      });
+      await VisitPet.create({ visitId, petId: pet.id, position });
+    }
+  });
 }
 
 type Extra = {
