@@ -1,5 +1,57 @@
+import { useQuery } from '@tanstack/react-query';
+import { useNavigate, useParams } from 'react-router-dom';
+import { householdQueries, useCreateHousehold, useUpdateHousehold } from '#src/api/households.ts';
+import { ErrorNote } from '#src/components/ErrorNote.tsx';
+import { Loading } from '#src/components/Loading.tsx';
 import { PageHeader } from '#src/components/PageHeader.tsx';
+import { toast } from '#src/components/toast.ts';
+import { HouseholdForm } from '#src/features/households/HouseholdForm.tsx';
 
+/** A household to write: a new one, or the one in the address. */
 export function HouseholdFormScreen() {
-  return <PageHeader title="HouseholdForm" />;
+  const { householdId } = useParams();
+  return householdId ? <EditHousehold householdId={householdId} /> : <NewHousehold />;
+}
+
+function NewHousehold() {
+  const navigate = useNavigate();
+  const create = useCreateHousehold();
+  return (
+    <>
+      <PageHeader title="Add a household" back={{ to: '/households', words: 'Households' }} />
+      <HouseholdForm
+        household={null}
+        saveWords="Add the household"
+        onSave={async (body) => {
+          const made = await create.mutateAsync({ body });
+          toast(`${made.name} is added. Now its pets.`);
+          navigate(`/households/${made.id}`, { state: { saved: true }, replace: true });
+        }}
+      />
+    </>
+  );
+}
+
+function EditHousehold({ householdId }: { householdId: string }) {
+  const navigate = useNavigate();
+  const update = useUpdateHousehold();
+  const found = useQuery(householdQueries.one(householdId));
+  if (found.isPending) return <Loading lines={8} />;
+  if (found.isError) return <ErrorNote error={found.error} onRetry={() => found.refetch()} />;
+  const { household } = found.data;
+  const back = `/households/${householdId}`;
+  return (
+    <>
+      <PageHeader title={`Change ${household.name}`} back={{ to: back, words: household.name }} />
+      <HouseholdForm
+        household={household}
+        saveWords="Save the household"
+        onSave={async (body) => {
+          await update.mutateAsync({ params: { householdId }, body });
+          toast(`${body.name} is saved.`);
+          navigate(back, { state: { saved: true } });
+        }}
+      />
+    </>
+  );
 }

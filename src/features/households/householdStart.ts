@@ -1,0 +1,20 @@
+import type { z } from 'zod';
+import type { createHousehold, Household } from '#shared/api/households.ts';
+
+/** What a household's form begins with. The spot is null until one is picked. */
+export function householdStart(household: Household | null): z.input<typeof createHousehold.body> {
+  return {
+    name: household?.name ?? '',
+    addressLabel: household?.addressLabel ?? '',
+    lat: household?.lat ?? (null as unknown as number),
+    lon: household?.lon ?? (null as unknown as number),
+    siteId: household?.siteId ?? null,
+    accessNotes: household?.accessNotes ?? '',
+    handoverNotes: household?.handoverNotes ?? '',
+    contactName: household?.contactName ?? '',
+    phone: household?.phone ?? null,
+    textsConsent: household?.textsConsent ?? false,
+    secondContactName: household?.secondContactName ?? '',
+    secondContactPhone: household?.secondContactPhone ?? null,
+  };
+}

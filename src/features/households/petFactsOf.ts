@@ -1,0 +1,57 @@
+import type { Pet } from '#shared/api/pets.ts';
+import { findBreed } from '#shared/grooming/breeds.ts';
+import type { CautionKey, CoatState, PetFacts } from '#shared/grooming/types.ts';
+import { daysBetween } from '#shared/time/localDate.ts';
+
+/** What of a pet's form the forecast reads. */
+export type PetLike = Pick<
+  Pet,
+  | 'species'
+  | 'breedId'
+  | 'weightGrams'
+  | 'coatType'
+  | 'matting'
+  | 'soil'
+  | 'temperament'
+  | 'birthYear'
+  | 'cautions'
+>;
+
+/**
+ * The pet as the groom-minute model wants it, or the words of what is still missing. `lastVisitDate`
+ * null means a first visit.
+ */
+export function petFactsOf(
+  pet: PetLike,
+  lastVisitDate: string | null,
+  today: string,
+): PetFacts | string {
+  const breed = pet.breedId ? findBreed(pet.breedId) : null;
+  if (!breed && !(pet.weightGrams && pet.coatType))
+    return 'Choose a breed, or give weight and coat, and the minutes show here.';
+  if (Number.isNaN(pet.weightGrams) || (pet.weightGrams !== null && pet.weightGrams < 300))
+    return 'Give the weight as a number, and the minutes show here.';
+  const year = Number(today.slice(0, 4));
+  const badYear = pet.birthYear !== null && !(pet.birthYear >= year - 40 && pet.birthYear <= year);
+  return {
+    species: pet.species,
+    breedId: pet.breedId,
+    weightGrams: pet.weightGrams,
+    sizeClass: null,
+    ageYears: pet.birthYear === null || badYear ? null : year - pet.birthYear,
+    coatType: (pet.coatType as PetFacts['coatType']) ?? null,
+    coatState: {
+      matting: pet.matting as CoatState['matting'],
+      undercoatLoad: 0,
+      soil: pet.soil as CoatState['soil'],
+      lengthTenthsMm: null,
+    },
+    temperament: pet.temperament as PetFacts['temperament'],
+    cautions: pet.cautions as CautionKey[],
+    firstVisit: lastVisitDate === null,
+    weeksSinceLast:
+      lastVisitDate === null
+        ? null
+        : Math.max(0, Math.floor(daysBetween(lastVisitDate, today) / 7)),
+  };
+}
