@@ -1,5 +1,4 @@
 import {
-  addPets,
   booked,
   business,
   fake,
@@ -15,11 +14,7 @@ import {
 import { seededRandom } from '../support/random.ts';
 import { describe, expect, it } from 'vitest';
 import { inBusiness } from '#server/db/database.ts';
-import { newId } from '#server/db/newId.ts';
-import { ArrivalLink } from '#server/models/ArrivalLink.ts';
-import { hashToken } from '#server/services/secrets/tokens.ts';
 import { dropTexts } from '#server/services/texts/dropTexts.ts';
-import { queueOnTheWay } from '#server/services/texts/queueOnTheWay.ts';
 import { queueText } from '#server/services/texts/queueText.ts';
 import { magicNumbers } from '#server/sms/fake/refusals.ts';
 
@@ -75,54 +70,22 @@ describe('queueText', () => {
   });
 });
 
-describe('queueOnTheWay', () => {
-  const until = new Date(Date.now() + 20 * 60_000);
-  const onTheWay = (visitId: string) =>
-    inBusiness(business.id, () =>
-      queueOnTheWay({
-        visitId,
-        runId: newId(),
-        groomerName: 'Mika',
-        arrival: { from: '9:48', to: '9:56' },
-        until,
-        origin: 'https://vans.example.org',
-        now: new Date(),
-      }),
-    );
-
-  it('tells the household once, with a link only its hash is kept of', async () => {
+describe('dropTexts', () => {
+  it('takes back what has not left yet', async () => {
     const household = await makeHousehold();
     const visitId = await makeVisit(household);
-    await addPets(household, visitId, ['Pip', 'Juno']);
-    const text = await onTheWay(visitId);
-    const words =
-      /^Saltmarsh: Mika is on the way for Pip and Juno\. Please open the door 9:48-9:56\. Live: https:\/\/vans\.example\.org\/a\/([\w-]{22})$/;
-    const token = words.exec(text.body)![1]!;
-    expect(text.staleAfter).toEqual(until);
-    expect((await onTheWay(visitId)).id).toBe(text.id);
-    const links = await inBusiness(business.id, () => ArrivalLink.findAll());
-    expect(links).toMatchObject([{ visitId, tokenHash: hashToken(token) }]);
-    await send();
-    expect(fake().messages()).toMatchObject([{ to: household.phone, body: text.body }]);
-  });
-
-  it('makes no link for a text that stays', async () => {
-    const household = await makeHousehold({ textsConsent: false });
-    const text = await onTheWay(await makeVisit(household));
-    expect(text.status).toBe('notSent');
-    expect(await inBusiness(business.id, () => ArrivalLink.count())).toBe(0);
-  });
-
-  it('is taken back when the van has arrived first', async () => {
-    const visitId = await makeVisit(await makeHousehold());
-    await onTheWay(visitId);
+    await queue(household, { visitId });
+    await queue(household);
     const dropped = await inBusiness(business.id, () =>
-      dropTexts({ visitId, kinds: ['onTheWay'], reason: 'The van had arrived.', now: new Date() }),
+      dropTexts({ visitId, kinds: ['booked'], reason: 'The visit is off.', now: new Date() }),
     );
     expect(dropped).toBe(1);
     await send();
-    expect(await rows()).toMatchObject([{ status: 'stale', reason: 'The van had arrived.' }]);
-    expect(fake().messages()).toEqual([]);
+    expect(await rows()).toMatchObject([
+      { status: 'stale', reason: 'The visit is off.' },
+      { status: 'queued' },
+    ]);
+    expect(fake().messages()).toHaveLength(1);
   });
 });
 

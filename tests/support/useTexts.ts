@@ -9,9 +9,7 @@ import { answerErrors } from '#server/http/answerErrors.ts';
 import { Business } from '#server/models/Business.ts';
 import { Household } from '#server/models/Household.ts';
 import { OutboxText } from '#server/models/OutboxText.ts';
-import { Pet } from '#server/models/Pet.ts';
 import { Visit } from '#server/models/Visit.ts';
-import { VisitPet } from '#server/models/VisitPet.ts';
 import { textRoutes } from '#server/routes/textRoutes.ts';
 import { webhookRoutes } from '#server/routes/webhookRoutes.ts';
 import { startingWeights } from '#server/services/accounts/startingWeights.ts';
@@ -122,32 +120,6 @@ export async function makeVisit(household: Household): Promise<string> {
     }),
   );
   return visit.id;
-}
-
-export async function addPets(
-  household: Household,
-  visitId: string,
-  names: string[],
-): Promise<void> {
-  await inBusiness(business.id, async () => {
-    for (const [position, name] of names.entries()) {
-      const pet = await Pet.create({
-        householdId: household.id,
-        name,
-        species: 'dog',
-        matting: 0,
-        soil: 0,
-        temperament: 'calm',
-        cautions: [],
-        cautionNote: 'bites when towelled',
-        vetName: '',
-        styleId: 'bath',
-        styleNotes: '',
-        intervalWeeks: 6,
-      });
-      await VisitPet.create({ visitId, petId: pet.id, position });
-    }
-  });
 }
 
 type Extra = {
