@@ -20,6 +20,16 @@ interface StreetDoc {
 const MOST_STREETS = 12;
 /** A street this far away counts half of one at the door. */
 const HALF_WORTH_METRES = 15_000;
+/**
+ * A street that has the asked-for number beats its namesake in the next town that has not, but not a
+ * street that fits the words much better.
+ */
+const NUMBER_WORTH = 1.4;
+
+interface RankedStreet {
+  id: number;
+  score: number;
+}
 
 /**
  * Forgiving address search: streets are searched, house numbers looked up. MiniSearch answers nearly
@@ -64,17 +74,19 @@ export class AddressBook {
     const { words, number } = addressQuery(text, (word) => this.#postcodes.has(word));
     if (words.length === 0) return [];
     const streets = this.#streets(words, near);
-    const perStreet = number === null ? Math.max(1, Math.ceil(limit / streets.length)) : 1;
-    const found = streets.flatMap((street) => {
-      const houses = this.#housesOf[street]!;
-      if (number === null)
-        return houses.slice(0, perStreet).map((house) => ({ ...this.at(house), exact: true }));
-      const { house, exact } = this.#houseNumbered(houses, number);
-      return [{ ...this.at(house), exact }];
+    if (number === null) {
+      const perStreet = Math.max(1, Math.ceil(limit / streets.length));
+      return streets
+        .flatMap(({ id }) => this.#housesOf[id]!.slice(0, perStreet))
+        .slice(0, limit)
+        .map((house) => ({ ...this.at(house), exact: true }));
+    }
+    const found = streets.map(({ id, score }) => {
+      const { house, exact } = this.#houseNumbered(this.#housesOf[id]!, number);
+      return { house, exact, score: exact ? score * NUMBER_WORTH : score };
     });
-    // A street that has the number beats one of the same name in the next town that has not.
-    if (number !== null) found.sort((a, b) => Number(b.exact) - Number(a.exact));
-    return found.slice(0, limit);
+    found.sort((a, b) => b.score - a.score);
+    return found.slice(0, limit).map(({ house, exact }) => ({ ...this.at(house), exact }));
   }
 
   nearest(lat: number, lon: number): (Address & { metres: number }) | null {
@@ -112,7 +124,7 @@ export class AddressBook {
     };
   }
 
-  #streets(words: readonly string[], near: LatLon | undefined): number[] {
+  #streets(words: readonly string[], near: LatLon | undefined): RankedStreet[] {
     const text = words.join(' ');
     const worth = (id: number) => {
       if (!near) return 1;
@@ -124,15 +136,14 @@ export class AddressBook {
         .search(text, { combineWith })
         .map(({ id, score }) => ({ id: id as number, score: score * worth(id as number) }))
         .sort((a, b) => b.score - a.score || a.id - b.id)
-        .slice(0, MOST_STREETS)
-        .map(({ id }) => id);
+        .slice(0, MOST_STREETS);
     const found = ranked('AND');
     if (found.length > 0) return found;
     const guessed = this.#fuzzy(text);
     return guessed.length > 0 ? guessed : ranked('OR');
   }
 
-  #fuzzy(text: string): number[] {
+  #fuzzy(text: string): RankedStreet[] {
     this.#fuse ??= new Fuse(this.#docs, {
       keys: [
         { name: 'street', weight: 2 },
@@ -140,8 +151,11 @@ export class AddressBook {
       ],
       threshold: 0.4,
       ignoreLocation: true,
+      includeScore: true,
     });
-    return this.#fuse.search(text, { limit: MOST_STREETS }).map(({ item }) => item.id);
+    return this.#fuse
+      .search(text, { limit: MOST_STREETS })
+      .map(({ item, score = 1 }) => ({ id: item.id, score: 1 - score }));
   }
 
   #houseNumbered(houses: readonly number[], number: string): { house: number; exact: boolean } {

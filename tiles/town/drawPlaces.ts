@@ -18,14 +18,13 @@ export function drawPlaces(draft: OsmDraft): void {
   draft.node([7250, -4600], { natural: 'cape', name: 'Skerrow Head' });
   for (const [name, at, hours] of VETS)
     draft.node(at, { amenity: 'veterinary', name, opening_hours: hours });
-  for (const { name, centre, radius, place } of SETTLEMENTS) {
-    if (place !== 'village') continue;
+  for (const { centre, radius } of SETTLEMENTS) {
     const ring = Array.from({ length: 24 }, (_, i): Point => {
       const angle = (i / 24) * 2 * Math.PI;
       const ragged = 1.02 + 0.12 * Math.sin(3 * angle + centre[0]);
       const reach = radius * ragged;
       return [centre[0] + reach * Math.cos(angle), centre[1] + reach * Math.sin(angle)];
     });
-    draft.ring(ring, { landuse: 'residential', 'addr:city': name });
+    draft.ring(ring, { landuse: 'residential' });
   }
 }

@@ -3,6 +3,7 @@ import { drawRoads } from './drawRoads.ts';
 import { growStreets } from './growStreets.ts';
 import { joinRoads } from './joinRoads.ts';
 import {
+  harbourShapes,
   openShapes,
   riverLine,
   sea,
@@ -32,8 +33,8 @@ export function drawTown(): OsmDraft {
   const random = seededRandom(SEED);
   const draft = new OsmDraft();
   draft.multipolygon(sea.outer, sea.islands, { natural: 'water', water: 'sea' });
-  for (const { ring, tags } of [...waterShapes, ...wildShapes, ...openShapes, ...shoreShapes])
-    draft.ring(ring, tags);
+  const shapes = [waterShapes, wildShapes, openShapes, shoreShapes, harbourShapes];
+  for (const { ring, tags } of shapes.flat()) draft.ring(ring, tags);
   draft.way(
     riverLine.map((at) => draft.node(at)),
     { waterway: 'river', name: 'River Pell' },

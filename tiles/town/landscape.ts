@@ -107,6 +107,22 @@ export const openShapes: Shape[] = [
   ),
 ];
 
+const yard = (ring: Line, name: string): Shape => ({ ring, tags: { landuse: 'harbour', name } });
+const shed = (x: number, y: number, w: number, d: number): Shape => ({
+  ring: [[x, y], [x + w, y], [x + w, y + d], [x, y + d]], // prettier-ignore
+  tags: { building: 'warehouse' },
+});
+
+/** The quays between the Strand and the water. */
+export const harbourShapes: Shape[] = [
+  yard([[-600, -150], [-345, -115], [-345, 165], [-560, 150]], 'Fish Quay'), // prettier-ignore
+  yard([[-165, -105], [560, -110], [520, 150], [-100, 180], [-165, 170]], 'Quay Yard'), // prettier-ignore
+  shed(-520, -60, 120, 34), shed(-520, 20, 90, 34), shed(-120, -60, 140, 36), shed(-110, 40, 60, 60),
+  shed(90, -60, 150, 36), shed(60, 50, 110, 40), shed(300, -60, 160, 40), shed(330, 40, 90, 50),
+  shed(1450, -160, 120, 40), shed(1480, -60, 160, 50), shed(1470, 40, 70, 50),
+  shed(-3380, 3230, 130, 60), shed(-3220, 3260, 90, 70), shed(-3330, 3360, 150, 50),
+]; // prettier-ignore
+
 /** Roads may pass through these. */
 export const wildShapes: Shape[] = [
   ...patches(

@@ -38,8 +38,8 @@ export function placeHouses(roads: readonly JoinedRoad[], random: Random): House
     for (const { at, heading, number } of plotsAlong(road)) {
       const { settlement, radii } = settlementAt(at);
       if (radii > 1.04 || isForbidden(at) || random.chance(0.07)) continue;
-      const width = Math.min(15, settlement.plot * random.between(0.42, 0.62));
-      const depth = random.between(8, 11);
+      const width = Math.min(17, settlement.plot * random.between(0.52, 0.72));
+      const depth = random.between(9, settlement.plot < 25 ? 11 : 13);
       const clear = depth / 2 + 4;
       const crowded = [...streets.near(at, at, clear)].some(
         ([a, b]) => gap(nearestOnSegment(at, a, b).at, at) < clear,
@@ -78,7 +78,7 @@ function plotsAlong({ spots, settlement }: JoinedRoad): Plot[] {
     const heading = Math.atan2(b[1] - a[1], b[0] - a[0]);
     for (; next < walked + length; next += local.plot) {
       const along = next - walked;
-      const back = local.plot < 25 ? 11 : 16;
+      const back = local.plot < 25 ? 12 : 18;
       for (const side of [1, -1]) {
         const at: Point = [
           a[0] + along * Math.cos(heading) - side * back * Math.sin(heading),
