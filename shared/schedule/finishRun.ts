@@ -1,6 +1,7 @@
 import type { ReadyDay, ReadyStop } from './compileDay.ts';
 import { driveLeg } from './driveLeg.ts';
 import { beginAhead, stepRun } from './stepRun.ts';
+import type { VanShift } from './types.ts';
 import {
   breakRule,
   cloneWalk,
@@ -55,7 +56,19 @@ export function walkStarted(day: ReadyDay, vanIndex: number, started: ReadyStop[
     finishRun(day, home, { finishSeconds: 0, overtimeSeconds: 0, cost: 0 });
     state.inherited = amountsOver(home, home.freeSeconds);
   }
+  beginAhead(day, state);
   return state;
+}
+
+/** Whether a run that finishes then must hold a meal: never for a short day, nor one that ends before meal time. */
+export function isMealDue(van: VanShift, finishSeconds: number): boolean {
+  const meal = van.meal;
+  return (
+    meal !== null &&
+    finishSeconds - van.startSeconds > meal.dueAfterSeconds &&
+    finishSeconds > meal.earliestStartSeconds &&
+    van.startSeconds <= meal.latestStartSeconds
+  );
 }
 
 const nothingInherited: InheritedAmounts = { overtimeBy: 0, driveBy: 0, mealBy: 0 };
@@ -76,16 +89,10 @@ function amountsOver(state: WalkState, finish: number): InheritedAmounts {
   const { van, mealStopId, mealLateBy, driveSeconds } = state;
   const overtime = finish - van.endSeconds - van.mostOvertimeSeconds;
   const drive = van.mostDriveSeconds === null ? 0 : driveSeconds - van.mostDriveSeconds;
-  const meal = van.meal;
   let mealBy = 0;
-  if (meal) {
-    const span = finish - van.startSeconds;
-    const due =
-      span > meal.dueAfterSeconds &&
-      finish > meal.earliestStartSeconds &&
-      van.startSeconds <= meal.latestStartSeconds;
-    if (due) mealBy = mealStopId === null ? span - meal.dueAfterSeconds : mealLateBy;
-  }
+  if (isMealDue(van, finish))
+    mealBy =
+      mealStopId === null ? finish - van.startSeconds - van.meal!.dueAfterSeconds : mealLateBy;
   return {
     overtimeBy: overtime > 0 ? overtime : 0,
     driveBy: drive > 0 ? drive : 0,

@@ -1,8 +1,8 @@
 import type { ReadyDay, ReadyStop } from './compileDay.ts';
-import { finishRun, type RunEnd } from './finishRun.ts';
+import { finishRun, isMealDue, type RunEnd } from './finishRun.ts';
 import { stepRun } from './stepRun.ts';
-import type { RefillPlace } from './types.ts';
-import { cloneWalk, type WalkState } from './walkState.ts';
+import type { RefillPlace, TankKind } from './types.ts';
+import { copyWalk, startWalk, type WalkState } from './walkState.ts';
 
 /** A settled run: its stops after the started ones, what they cost and how many hard rules they break. */
 export interface Settled {
@@ -11,10 +11,13 @@ export interface Settled {
   hard: number;
   /** Hard rules broken that a meal or refill could mend. */
   mendable: number;
+  finishSeconds: number;
 }
 
-/** Steps a single run may take before the best found so far is kept; a bound, not a time. */
+/** Steps one run may take before the best found so far is kept: a bound on work, the same everywhere. */
 const mostSteps = 20_000;
+/** Fewer for the search, which asks for a bound and asks often. */
+const mostBoundedSteps = 2_000;
 
 /** Nothing worse than this is of interest: the search's way to stop early. */
 export interface SettleBound {
@@ -44,11 +47,30 @@ export function settleStops(
   const bare = walkAll(day, from, fixed);
   if (bare.mendable === 0) return bound && !beats(bare, bound) ? null : bare;
   const mayEat = from.van.meal !== null && from.mealStopId === null && !hasMeal(fixed);
+  // Refills only lengthen a run: a meal due without them is due with them.
+  const mustEat = mayEat && isMealDue(from.van, bare.finishSeconds);
   const places = usefulPlaces(day, from);
-  const need = places.length > 0 ? fewestRefills(day, from, fixed) : 0;
+  const need = places.length > 0 ? fewestRefills(from, fixed) : 0;
   const limit = bound ?? { hard: bare.hard, cost: bare.cost };
   for (let refills = need; refills <= need + 2; refills += 1) {
-    const found = search(day, from, fixed, mayEat, places, refills, limit);
+    const search: Search = {
+      day,
+      fixed,
+      meal: readyMeal(from),
+      mayEat,
+      mustEat,
+      latestMeal: from.van.meal?.latestStartSeconds ?? 0,
+      places,
+      mostRefills: refills,
+      steps: bound ? mostBoundedSteps : mostSteps,
+      hard: limit.hard,
+      cost: limit.cost,
+      chosen: [],
+      found: null,
+      end: { finishSeconds: 0, overtimeSeconds: 0, cost: 0 },
+    };
+    explore(search, 1, 0, from, null, false, 0);
+    const found = search.found;
     if (found && (found.hard === 0 || refills === need + 2)) return found;
     if (places.length === 0) return found ?? (bound ? null : bare);
   }
@@ -61,11 +83,17 @@ function beats(one: SettleBound, other: SettleBound): boolean {
 
 /** Walks stops as they stand. */
 export function walkAll(day: ReadyDay, from: WalkState, stops: ReadyStop[]): Settled {
-  const state = cloneWalk(from);
+  const state = walkAt(0, from);
   for (let i = 0; i < stops.length; i += 1) stepRun(day, state, stops[i]!, stops[i + 1] ?? null);
   const end: RunEnd = { finishSeconds: 0, overtimeSeconds: 0, cost: 0 };
   finishRun(day, state, end);
-  return { stops, cost: end.cost, hard: state.hard, mendable: state.mendable };
+  return {
+    stops,
+    cost: end.cost,
+    hard: state.hard,
+    mendable: state.mendable,
+    finishSeconds: end.finishSeconds,
+  };
 }
 
 /** A meal for a van; its id is one per van, because a run has one. */
@@ -95,110 +123,151 @@ function readyRefill(place: RefillPlace): ReadyStop {
   };
 }
 
-/** Depth-first over every gap: a meal, a refill, or on to the next stop; cut where it cannot win. */
-function search(
-  day: ReadyDay,
-  from: WalkState,
-  fixed: ReadyStop[],
-  mayEat: boolean,
-  places: ReadyStop[],
-  mostRefills: number,
-  limit: SettleBound,
-): Settled | null {
-  let best = limit;
-  let found: Settled | null = null;
-  let steps = 0;
-  const end: RunEnd = { finishSeconds: 0, overtimeSeconds: 0, cost: 0 };
-  const meal = readyMeal(from);
-  const chosen: ReadyStop[] = [];
-  const weights = day.problem.weights;
+/** One search for the best places; functions below share it, because closures would be made anew each time. */
+interface Search {
+  day: ReadyDay;
+  fixed: ReadyStop[];
+  meal: ReadyStop;
+  mayEat: boolean;
+  mustEat: boolean;
+  latestMeal: number;
+  places: ReadyStop[];
+  mostRefills: number;
+  steps: number;
+  /** To be beaten. */
+  hard: number;
+  cost: number;
+  chosen: ReadyStop[];
+  found: Settled | null;
+  end: RunEnd;
+}
 
-  const costSoFar = (state: WalkState) =>
+/**
+ * Depth-first over every gap: a meal, a refill, or on to the next stop; cut where it cannot win.
+ * `held` is a meal chosen but not walked: where it is eaten depends on what comes after it.
+ */
+function explore(
+  search: Search,
+  depth: number,
+  at: number,
+  state: WalkState,
+  held: ReadyStop | null,
+  eaten: boolean,
+  refills: number,
+): void {
+  if (search.steps <= 0) return;
+  const { fixed, chosen, places } = search;
+  if (search.mayEat && !eaten && held === null && state.freeSeconds <= search.latestMeal) {
+    chosen.push(search.meal);
+    explore(search, depth, at, state, search.meal, true, refills);
+    chosen.pop();
+  }
+  if (refills < search.mostRefills)
+    for (let i = 0; i < places.length; i += 1) {
+      const place = places[i]!;
+      if (!isUseful(state, place)) continue;
+      const next = take(search, depth, state, held, place, fixed[at] ?? null);
+      if (!mayWin(search, next, eaten)) continue;
+      chosen.push(place);
+      explore(search, depth + 1, at, next, null, eaten, refills + 1);
+      chosen.pop();
+    }
+  if (at < fixed.length) {
+    const stop = fixed[at]!;
+    // A fixed meal is held too, so that what is put after it is seen.
+    const next = take(search, depth, state, held, stop, fixed[at + 1] ?? null);
+    if (!mayWin(search, next, eaten)) return;
+    chosen.push(stop);
+    explore(search, depth + 1, at + 1, next, stop.kind === 'meal' ? stop : null, eaten, refills);
+    chosen.pop();
+    return;
+  }
+  const last = take(search, depth, state, held, null, null);
+  finishRun(search.day, last, search.end);
+  const { cost, finishSeconds } = search.end;
+  if (last.hard > search.hard || (last.hard === search.hard && cost >= search.cost)) return;
+  search.hard = last.hard;
+  search.cost = cost;
+  search.found = {
+    stops: [...chosen],
+    cost,
+    hard: last.hard,
+    mendable: last.mendable,
+    finishSeconds,
+  };
+}
+
+/** States by depth, used again and again: settling is most of the search's work. */
+const pool: WalkState[] = [];
+
+function walkAt(depth: number, from: WalkState): WalkState {
+  while (pool.length <= depth) pool.push(startWalk(from.van, from.vanIndex));
+  const state = pool[depth]!;
+  copyWalk(from, state);
+  return state;
+}
+
+function take(
+  search: Search,
+  depth: number,
+  state: WalkState,
+  held: ReadyStop | null,
+  stop: ReadyStop | null,
+  after: ReadyStop | null,
+): WalkState {
+  const next = walkAt(depth, state);
+  search.steps -= 1;
+  if (held) stepRun(search.day, next, held, stop);
+  if (stop && stop.kind !== 'meal') stepRun(search.day, next, stop, after);
+  return next;
+}
+
+function mayWin(search: Search, next: WalkState, eaten: boolean): boolean {
+  const tooLate = search.mustEat && !eaten && next.freeSeconds > search.latestMeal;
+  const hard = next.hard + (tooLate ? 1 : 0);
+  return hard < search.hard || (hard === search.hard && costSoFar(search.day, next) < search.cost);
+}
+
+function costSoFar(day: ReadyDay, state: WalkState): number {
+  const weights = day.problem.weights;
+  return (
     state.driveSeconds +
     weights.lateFactor * state.lateSeconds +
     Math.floor((weights.waitFactorPermille * state.waitSeconds + 500) / 1000) +
     weights.otherGroomerSeconds * state.otherGroomers +
-    weights.disturbSeconds * state.disturbed;
-
-  /** `held` is a meal chosen but not walked: where it is eaten depends on what comes after it. */
-  const visit = (
-    at: number,
-    state: WalkState,
-    held: ReadyStop | null,
-    eaten: boolean,
-    refills: number,
-  ) => {
-    if (steps >= mostSteps) return;
-    const take = (stop: ReadyStop | null): WalkState => {
-      const next = cloneWalk(state);
-      steps += 1;
-      if (held) stepRun(day, next, held, stop);
-      if (stop && stop.kind !== 'meal') stepRun(day, next, stop, fixed[at + 1] ?? null);
-      return next;
-    };
-    const wins = (next: WalkState) =>
-      next.hard < best.hard || (next.hard === best.hard && costSoFar(next) < best.cost);
-    if (mayEat && !eaten && held === null) {
-      chosen.push(meal);
-      visit(at, state, meal, true, refills);
-      chosen.pop();
-    }
-    if (refills < mostRefills)
-      for (const place of places) {
-        if (!isUseful(state, place)) continue;
-        const next = take(place);
-        if (!wins(next)) continue;
-        chosen.push(place);
-        visit(at, next, null, eaten, refills + 1);
-        chosen.pop();
-      }
-    if (at < fixed.length) {
-      const stop = fixed[at]!;
-      // A fixed meal is held too, so that what is put after it is seen.
-      const next = take(stop);
-      if (!wins(next)) return;
-      chosen.push(stop);
-      visit(at + 1, next, stop.kind === 'meal' ? stop : null, eaten, refills);
-      chosen.pop();
-      return;
-    }
-    const last = take(null);
-    finishRun(day, last, end);
-    if (last.hard < best.hard || (last.hard === best.hard && end.cost < best.cost)) {
-      found = { stops: [...chosen], cost: end.cost, hard: last.hard, mendable: last.mendable };
-      best = found;
-    }
-  };
-  visit(0, from, null, false, 0);
-  return found;
+    weights.disturbSeconds * state.disturbed
+  );
 }
 
 /** The fewest refills that keep every tank in bounds when time does not matter. */
-function fewestRefills(day: ReadyDay, from: WalkState, fixed: ReadyStop[]): number {
+function fewestRefills(from: WalkState, fixed: ReadyStop[]): number {
   const tanks = from.van.tanks;
   const used = [...from.tanks];
   let count = 0;
-  for (const stop of fixed) {
-    if (stop.place)
-      tanks.forEach((tank, i) => {
-        if (stop.place!.kinds.includes(tank.kind)) used[i] = 0;
-      });
-    const uses = stop.visit?.fact.tankUse ?? [];
-    const over = tanks.some((tank, i) => {
-      const ml = uses.reduce((sum, use) => sum + (use.kind === tank.kind ? use.ml : 0), 0);
-      return ml > 0 && used[i]! + ml > tank.capacityMl && used[i]! > 0;
-    });
+  for (let s = 0; s < fixed.length; s += 1) {
+    const stop = fixed[s]!;
+    let over = false;
+    for (let i = 0; i < tanks.length; i += 1) {
+      const tank = tanks[i]!;
+      if (stop.place?.kinds.includes(tank.kind)) used[i] = 0;
+      const ml = usedBy(stop, tank.kind);
+      if (ml > 0 && used[i]! > 0 && used[i]! + ml > tank.capacityMl) over = true;
+    }
     if (over) {
+      // One call fills and empties everything at best; the caller tries one or two more.
       count += 1;
-      // One call at a place is counted even if two are needed; the search tries one more.
       used.fill(0);
     }
-    for (const use of uses)
-      tanks.forEach((tank, i) => {
-        if (tank.kind === use.kind) used[i] = used[i]! + use.ml;
-      });
+    for (let i = 0; i < tanks.length; i += 1) used[i] = used[i]! + usedBy(stop, tanks[i]!.kind);
   }
-  return Math.min(count, day.problem.refills.length * fixed.length);
+  return count;
+}
+
+function usedBy(stop: ReadyStop, kind: TankKind): number {
+  const uses = stop.visit?.fact.tankUse;
+  let ml = 0;
+  if (uses) for (let u = 0; u < uses.length; u += 1) if (uses[u]!.kind === kind) ml += uses[u]!.ml;
+  return ml;
 }
 
 function usefulPlaces(day: ReadyDay, from: WalkState): ReadyStop[] {

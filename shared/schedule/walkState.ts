@@ -77,6 +77,8 @@ export function startWalk(
   record: RunRecord | null = null,
 ): WalkState {
   const leave = van.startSeconds + van.loadSeconds;
+  const tanks: number[] = [];
+  for (let i = 0; i < van.tanks.length; i += 1) tanks.push(van.tanks[i]!.usedAtStartMl);
   return {
     van,
     vanIndex,
@@ -84,7 +86,7 @@ export function startWalk(
     point: van.startPoint,
     siteId: null,
     risk: certainAt(leave),
-    tanks: van.tanks.map((tank) => tank.usedAtStartMl),
+    tanks,
     stopsSeen: 0,
     visitsSeen: 0,
     lastPinnedId: null,
@@ -119,7 +121,7 @@ export function copyWalk(from: WalkState, to: WalkState): void {
   to.risk.varianceSeconds2 = from.risk.varianceSeconds2;
   to.risk.thirdSeconds3 = from.risk.thirdSeconds3;
   const tanks = from.tanks.length;
-  to.tanks.length = tanks;
+  if (to.tanks.length !== tanks) to.tanks.length = tanks;
   for (let i = 0; i < tanks; i += 1) to.tanks[i] = from.tanks[i]!;
   to.stopsSeen = from.stopsSeen;
   to.visitsSeen = from.visitsSeen;
