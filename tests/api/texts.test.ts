@@ -1,6 +1,7 @@
 import {
   booked,
   business,
+  carriers,
   fake,
   makeBusiness,
   makeHousehold,
@@ -8,12 +9,19 @@ import {
   queue,
   rows,
   send,
+  server,
   statuses,
   useTexts,
 } from '../support/useTexts.ts';
 import { seededRandom } from '../support/random.ts';
+import request from 'supertest';
 import { describe, expect, it } from 'vitest';
 import { inBusiness } from '#server/db/database.ts';
+import type { Business } from '#server/models/Business.ts';
+import { Membership, type RoleName } from '#server/models/Membership.ts';
+import { User } from '#server/models/User.ts';
+import { newId } from '#server/db/newId.ts';
+import { openSession } from '#server/services/accounts/openSession.ts';
 import { dropTexts } from '#server/services/texts/dropTexts.ts';
 import { queueText } from '#server/services/texts/queueText.ts';
 import { magicNumbers } from '#server/sms/fake/refusals.ts';
@@ -59,6 +67,13 @@ describe('queueText', () => {
     await send();
     expect(await rows()).toMatchObject([{ status: 'notSent', reason }]);
     expect(fake().messages()).toEqual([]);
+  });
+
+  it('says so when no carrier is connected', async () => {
+    await carriers.close();
+    const text = await queue(await makeHousehold());
+    expect([text.status, text.reason]).toEqual(['notSent', 'No SMS carrier is connected.']);
+    expect(await send()).toBe(0);
   });
 
   it('knows no other business’s household', async () => {
@@ -257,3 +272,52 @@ describe('a bad day at the carrier', () => {
     expect(new Set(await statuses())).toEqual(new Set(['delivered']));
   });
 });
+
+describe('GET /api/texts', () => {
+  it('shows the threads of the own business to its desk, nobody else', async () => {
+    const household = await makeHousehold({ name: 'Okafor' });
+    await queue(household);
+    const mine = await enter(business, ['dispatcher']);
+    const answer = await request(server).get('/api/texts').set('Cookie', mine);
+    expect([answer.status, answer.body]).toEqual([
+      200,
+      [
+        {
+          id: expect.any(String),
+          direction: 'out',
+          kind: 'booked',
+          body: expect.stringContaining('Saltmarsh: booked for Pip'),
+          at: expect.any(String),
+          status: 'waiting',
+          reason: null,
+          householdId: household.id,
+          householdName: 'Okafor',
+          phone: household.phone,
+        },
+      ],
+    ]);
+    const stranger = await enter(await makeBusiness(), ['operator']);
+    const theirs = await request(server)
+      .get(`/api/texts?householdId=${household.id}`)
+      .set('Cookie', stranger);
+    expect([theirs.status, theirs.body]).toEqual([200, []]);
+    const groomer = await enter(business, ['groomer']);
+    expect((await request(server).get('/api/texts').set('Cookie', groomer)).status).toBe(403);
+    expect((await request(server).get('/api/texts')).status).toBe(401);
+  });
+});
+
+/** Signs someone in to a business with these roles; answers the cookie. */
+async function enter(where: Business, roles: RoleName[]): Promise<string> {
+  const user = await User.create({
+    name: 'Runa',
+    email: `${newId()}@example.org`,
+    passwordHash: 'unused',
+    createdAt: new Date(),
+  });
+  await inBusiness(where.id, () =>
+    Membership.create({ userId: user.id, roles, createdAt: new Date() }),
+  );
+  const { access } = await openSession(user.id, where.id, new Date());
+  return `furlong_access=${access}`;
+}

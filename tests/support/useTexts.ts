@@ -1,11 +1,13 @@
 import { dropDatabase, makeDatabase } from './freshDatabase.ts';
 import type { Server } from 'node:http';
 import type { AddressInfo } from 'node:net';
+import cookieParser from 'cookie-parser';
 import express from 'express';
 import request from 'supertest';
 import { afterAll, afterEach, beforeAll, beforeEach } from 'vitest';
 import { inBusiness, unsafeAcrossBusinesses } from '#server/db/database.ts';
 import { answerErrors } from '#server/http/answerErrors.ts';
+import { readActor } from '#server/http/sessionCookies.ts';
 import { Business } from '#server/models/Business.ts';
 import { Household } from '#server/models/Household.ts';
 import { OutboxText } from '#server/models/OutboxText.ts';
@@ -20,13 +22,14 @@ import { signWebhook } from '#server/sms/fake/signWebhook.ts';
 
 const app = express();
 app.use(webhookRoutes);
-app.use(express.json());
+app.use(cookieParser());
+app.use(express.json(), readActor);
 app.use(textRoutes);
 app.use(answerErrors);
 
 export let server: Server;
 export let origin: string;
-let carriers: Awaited<ReturnType<typeof openCarriers>>;
+export let carriers: Awaited<ReturnType<typeof openCarriers>>;
 /** The business of the test running; a fresh one for each. */
 export let business: Business;
 
