@@ -1,3 +1,4 @@
+import { isGivenUp } from '#shared/schedule/stepFact.ts';
 import type { DayProblem, Move, Plan } from '#shared/schedule/types.ts';
 import { otherVisits, placeOf } from './moveWords.ts';
 
@@ -50,6 +51,8 @@ export function stayMove(plan: Plan, visitId: string): Move {
 
 /** How many of these visits, from the first on, have begun: nothing lands before them. */
 export function begunBefore(problem: DayProblem, visitIds: readonly string[]): number {
-  const begun = new Set(problem.facts.map((fact) => fact.stopId));
+  const begun = new Set(
+    problem.facts.filter((fact) => !isGivenUp(fact)).map((fact) => fact.stopId),
+  );
   return visitIds.findLastIndex((id) => begun.has(id)) + 1;
 }
