@@ -4,6 +4,7 @@ import { readSession } from './api/sessionStore.ts';
 import { AppShell } from './routes/AppShell.tsx';
 import { BrokenScreen } from './routes/BrokenScreen.tsx';
 import { DoorShell } from './routes/DoorShell.tsx';
+import { HomeScreen } from './routes/HomeScreen.tsx';
 import { NotFoundScreen } from './routes/NotFoundScreen.tsx';
 import { OpeningScreen } from './routes/OpeningScreen.tsx';
 
@@ -57,7 +58,7 @@ export const routes: RouteObject[] = [
         Component: AppShell,
         ErrorBoundary: BrokenScreen,
         children: [
-          { index: true, path: '/', loader: () => redirect(homeAddress()) },
+          { path: '/', Component: HomeScreen },
           {
             path: '/day/:date?',
             lazy: () => screen(import('./routes/DayScreen.tsx'), 'DayScreen'),
@@ -113,13 +114,6 @@ export const routes: RouteObject[] = [
 
 export function makeRouter() {
   return createBrowserRouter(routes);
-}
-
-/** The one home that fits: the desk sees the day, a groomer sees the run. */
-export function homeAddress(): string {
-  const session = readSession();
-  if (!session) return '/sign-in';
-  return session.abilities.includes('days.read') ? '/day' : '/run';
 }
 
 async function readOrLoadSession() {

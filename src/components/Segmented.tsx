@@ -27,7 +27,7 @@ export function Segmented<Value extends string>({
         {choices.map((choice) => (
           <label
             key={choice.value}
-            className="grid min-h-10 cursor-pointer place-items-center rounded-[9px] px-3.5 text-[15px] has-checked:bg-white has-checked:font-semibold has-checked:shadow-[0_0_0_1px_var(--collar)] has-focus-visible:outline-3 has-focus-visible:outline-collar md:min-h-8.5"
+            className="grid min-h-10 cursor-pointer place-items-center rounded-[9px] px-2.5 text-[15px] has-checked:bg-white has-checked:font-semibold has-checked:shadow-[0_0_0_1px_var(--collar)] has-focus-visible:outline-3 has-focus-visible:outline-collar md:min-h-8.5"
           >
             <input
               type="radio"

@@ -1,10 +1,9 @@
 import { reasonWords, summaryWords } from '#shared/grooming/explain.ts';
-import { forecastPet } from '#shared/grooming/forecastPet.ts';
-import { findStyle } from '#shared/grooming/styles.ts';
 import type { PetFacts, PetForecast } from '#shared/grooming/types.ts';
 import { Card } from '#src/components/Card.tsx';
 import { Chip } from '#src/components/Chip.tsx';
 import { PetStrip } from '#src/strips/PetStrip.tsx';
+import { tryForecast } from './tryForecast.ts';
 
 /** Each step's minutes and why, worked out anew with every change of the form. */
 export function ForecastPanel({
@@ -17,7 +16,7 @@ export function ForecastPanel({
   styleId: string;
   petName: string;
 }) {
-  const forecast = typeof facts === 'string' ? facts : tryForecast(facts, styleId);
+  const forecast = tryForecast(facts, styleId);
   if (typeof forecast === 'string')
     return (
       <Card title="What it takes">
@@ -112,14 +111,4 @@ function tellable(reasons: PetForecast['steps'][number]['reasons']) {
   return reasons
     .filter(({ deltaSeconds }) => Math.abs(deltaSeconds) >= 30)
     .toSorted((a, b) => Math.abs(b.deltaSeconds) - Math.abs(a.deltaSeconds));
-}
-
-function tryForecast(facts: PetFacts, styleId: string): PetForecast | string {
-  if (!styleId) return 'Choose a style, and the minutes show here.';
-  try {
-    return forecastPet(facts, findStyle(styleId));
-  } catch (error) {
-    if (error instanceof RangeError) return `No forecast yet: ${error.message}`;
-    throw error;
-  }
 }

@@ -12,13 +12,14 @@ import { SelectField } from '#src/components/SelectField.tsx';
 import { TextArea } from '#src/components/TextArea.tsx';
 import { TextField } from '#src/components/TextField.tsx';
 import { UnsavedGuard } from '#src/components/UnsavedGuard.tsx';
+import { PinMap } from '#src/map/PinMap.tsx';
+import { useSession } from '#src/api/sessionStore.ts';
 import { WhereEntry } from '#src/components/WhereEntry.tsx';
 import { emptyToNull } from '#src/lib/emptyToNull.ts';
 import { useSubmit } from '#src/lib/useSubmit.ts';
 import { useZodForm } from '#src/lib/useZodForm.ts';
 import { GateCodeField } from './GateCodeField.tsx';
 import { householdStart } from './householdStart.ts';
-import { PinMap } from './PinMap.tsx';
 import { SiteDialog } from './SiteDialog.tsx';
 
 export type HouseholdFields = z.output<typeof createHousehold.body>;
@@ -33,6 +34,7 @@ export function HouseholdForm({
   onSave: (fields: HouseholdFields) => Promise<void>;
   saveWords: string;
 }) {
+  const { business } = useSession();
   const form = useZodForm(createHousehold.body, householdStart(household));
   const submit = useSubmit(form, onSave);
   const sites = useQuery(householdQueries.sites());
@@ -121,7 +123,7 @@ export function HouseholdForm({
                   ? 'Pick an address from the list, or drop a pin.'
                   : undefined)
               }
-              map={() => <PinMap lat={lat} lon={lon} onPin={where.onPin} />}
+              map={() => <PinMap area={business} lat={lat} lon={lon} onPin={where.onPin} />}
             />
             <div className="grid items-end gap-3 md:grid-cols-[1fr_auto]">
               <SelectField

@@ -28,6 +28,7 @@ import {
   temperamentChoices,
 } from './coatWords.ts';
 import { FormLevel } from './FormLevel.tsx';
+import { ForecastLine } from './ForecastLine.tsx';
 import { ForecastPanel } from './ForecastPanel.tsx';
 import { petFactsOf } from './petFactsOf.ts';
 import { petStart } from './petStart.ts';
@@ -71,6 +72,11 @@ export function PetForm({
     form.setValue('styleId', '', { shouldDirty: true });
   };
 
+  const facts = petFactsOf(
+    { ...(values as PetFields), coatType: coat },
+    pet?.lastVisitDate ?? null,
+    today,
+  );
   return (
     <form
       onSubmit={submit.onSubmit}
@@ -143,13 +149,21 @@ export function PetForm({
               {...form.register('styleId')}
               error={errors.styleId && 'Choose a style.'}
             />
-            <FormLevel
-              control={form.control}
-              name="matting"
-              label="Matting"
-              choices={mattingChoices}
-            />
+            <div className="md:col-span-2">
+              <FormLevel
+                control={form.control}
+                name="matting"
+                label="Matting"
+                choices={mattingChoices}
+              />
+            </div>
             <FormLevel control={form.control} name="soil" label="Dirt" choices={soilChoices} />
+            <FormNumber
+              control={form.control}
+              name="intervalWeeks"
+              label="Comes every"
+              unit="weeks"
+            />
             <TextArea
               label="Style notes"
               required={false}
@@ -159,14 +173,9 @@ export function PetForm({
               {...form.register('styleNotes')}
               error={errors.styleNotes?.message}
             />
-            <FormNumber
-              control={form.control}
-              name="intervalWeeks"
-              label="Comes every"
-              unit="weeks"
-            />
           </div>
         </Card>
+        <ForecastLine facts={facts} styleId={values.styleId} />
         <Card title="Cautions" dim="shown wherever the pet is handled">
           <FormChecks
             control={form.control}
@@ -200,23 +209,15 @@ export function PetForm({
           </div>
         </Card>
       </div>
-      <div className="grid gap-4 lg:sticky lg:top-4">
-        <ForecastPanel
-          facts={petFactsOf(
-            { ...(values as PetFields), coatType: coat },
-            pet?.lastVisitDate ?? null,
-            today,
-          )}
-          styleId={values.styleId}
-          petName={values.name}
-        />
-        {below}
+      <div id="what-it-takes" className="grid scroll-mt-4 gap-4 lg:sticky lg:top-4">
+        <ForecastPanel facts={facts} styleId={values.styleId} petName={values.name} />
         <FormErrors error={submit.failure} fields={submit.strayFields} />
         <div>
           <Button type="submit" kind="go" busy={submit.busy} busyWords="Saving">
             {saveWords}
           </Button>
         </div>
+        {below}
       </div>
       <UnsavedGuard when={isDirty} />
     </form>

@@ -6,13 +6,14 @@ import { Dialog } from '#src/components/Dialog.tsx';
 import { FormErrors } from '#src/components/FormErrors.tsx';
 import { TextArea } from '#src/components/TextArea.tsx';
 import { TextField } from '#src/components/TextField.tsx';
+import { PinMap } from '#src/map/PinMap.tsx';
+import { useSession } from '#src/api/sessionStore.ts';
 import { WhereEntry } from '#src/components/WhereEntry.tsx';
 import { toast } from '#src/components/toast.ts';
 import { emptyToNull } from '#src/lib/emptyToNull.ts';
 import { useSubmit } from '#src/lib/useSubmit.ts';
 import { useZodForm } from '#src/lib/useZodForm.ts';
 import { useState } from 'react';
-import { PinMap } from './PinMap.tsx';
 
 /** A place several households share; it begins at the spot of the household being written. */
 export function SiteDialog({
@@ -24,6 +25,7 @@ export function SiteDialog({
   onMade: (site: Site) => void;
   onClose: () => void;
 }) {
+  const { business } = useSession();
   const create = useCreateSite();
   const [address, setAddress] = useState('');
   const form = useZodForm(createSite.body, {
@@ -63,7 +65,7 @@ export function SiteDialog({
           error={
             errors.lat || errors.lon ? 'Pick an address from the list, or drop a pin.' : undefined
           }
-          map={() => <PinMap lat={lat} lon={lon} onPin={where.onPin} />}
+          map={() => <PinMap area={business} lat={lat} lon={lon} onPin={where.onPin} />}
         />
         <TextArea
           label="Parking"

@@ -9,14 +9,16 @@ import { FormTime } from '#src/components/FormTime.tsx';
 import { SelectField } from '#src/components/SelectField.tsx';
 import { TextField } from '#src/components/TextField.tsx';
 import { toast } from '#src/components/toast.ts';
+import { PinMap } from '#src/map/PinMap.tsx';
+import { useSession } from '#src/api/sessionStore.ts';
 import { WhereEntry } from '#src/components/WhereEntry.tsx';
 import { emptyToNull } from '#src/lib/emptyToNull.ts';
 import { useSubmit } from '#src/lib/useSubmit.ts';
 import { useZodForm } from '#src/lib/useZodForm.ts';
-import { PinMap } from './PinMap.tsx';
 import { isRefill, placeKinds } from './placeKinds.ts';
 
 export function PlaceDialog({ place, onClose }: { place: Place | null; onClose: () => void }) {
+  const { business } = useSession();
   const create = useCreatePlace();
   const update = useUpdatePlace();
   const form = useZodForm(createPlace.body, {
@@ -64,7 +66,7 @@ export function PlaceDialog({ place, onClose }: { place: Place | null; onClose: 
             errors.addressLabel?.message ??
             (errors.lat || errors.lon ? 'Pick an address from the list, or drop a pin.' : undefined)
           }
-          map={() => <PinMap lat={lat} lon={lon} onPin={where.onPin} />}
+          map={() => <PinMap area={business} lat={lat} lon={lon} onPin={where.onPin} />}
         />
         {kind !== 'depot' && (
           <div className="grid gap-4 md:grid-cols-3">

@@ -97,8 +97,10 @@ export function ShiftDialog({
                 control={form.control}
                 name="meal.dueAfterMinutes"
                 label="Due after"
-                unit="min"
+                unit="hours"
+                decimals={2}
                 hint="Shorter days go without."
+                shownAs={{ show: (minutes) => minutes / 60, store: (h) => Math.round(h * 60) }}
               />
               <FormTime control={form.control} name="meal.earliestMinutes" label="Begins from" />
               <FormTime control={form.control} name="meal.latestMinutes" label="Begins until" />

@@ -1,0 +1,17 @@
+import { summaryWords } from '#shared/grooming/explain.ts';
+import type { PetFacts } from '#shared/grooming/types.ts';
+import { tryForecast } from './tryForecast.ts';
+
+/** On a phone the whole forecast stands below the form; its sum keeps up here. */
+export function ForecastLine({ facts, styleId }: { facts: PetFacts | string; styleId: string }) {
+  const forecast = tryForecast(facts, styleId);
+  if (typeof forecast === 'string') return null;
+  return (
+    <a
+      href="#what-it-takes"
+      className="sticky bottom-[4.25rem] z-20 block rounded-card border border-fawn bg-linen px-4 py-3 text-ink no-underline md:bottom-3 lg:hidden"
+    >
+      <span className="font-semibold">What it takes</span> {summaryWords(forecast)}
+    </a>
+  );
+}
