@@ -1,6 +1,7 @@
 import { readdir } from 'node:fs/promises';
 import { fileURLToPath, pathToFileURL } from 'node:url';
 import { join } from 'node:path';
+import { QueryTypes } from 'sequelize';
 import { SequelizeStorage, Umzug } from 'umzug';
 import { database } from './database.ts';
 import type { Migration } from './table.ts';
@@ -21,10 +22,13 @@ export async function migrate(onStep: (name: string) => void = () => {}): Promis
   });
   umzug.on('migrated', ({ name }) => onStep(name));
   return database.transaction(async (lock) => {
-    const rows = (await database.query("SELECT GET_LOCK('furlong-migrate', 60) AS got", {
-      type: 'SELECT' as never,
-      transaction: lock,
-    })) as { got: number }[];
+    const rows = await database.query<{ got: number }>(
+      "SELECT GET_LOCK('furlong-migrate', 60) AS got",
+      {
+        type: QueryTypes.SELECT,
+        transaction: lock,
+      },
+    );
     if (Number(rows[0]?.got) !== 1)
       throw new Error('Another process is still migrating the database.');
     try {

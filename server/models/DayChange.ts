@@ -8,7 +8,7 @@ import {
 import { database } from '#server/db/database.ts';
 import { newId } from '#server/db/newId.ts';
 import { scopeModel } from '#server/db/scopeModel.ts';
-import type { Plan } from '#shared/schedule/types.ts';
+import type { Move, Plan } from '#shared/schedule/types.ts';
 
 export class DayChange extends Model<
   InferAttributes<DayChange>,
@@ -23,6 +23,7 @@ export class DayChange extends Model<
   declare who: string;
   declare kind: string;
   declare words: string;
+  declare move: CreationOptional<Move | null>;
   declare before: CreationOptional<Plan | null>;
   declare after: CreationOptional<Plan | null>;
   declare undoneAt: CreationOptional<Date | null>;
@@ -40,6 +41,7 @@ DayChange.init(
     who: DataTypes.STRING,
     kind: DataTypes.STRING,
     words: DataTypes.STRING,
+    move: DataTypes.JSON,
     before: DataTypes.JSON,
     after: DataTypes.JSON,
     undoneAt: DataTypes.DATE(3),

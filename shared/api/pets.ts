@@ -19,7 +19,7 @@ const petFields = z.object({
   coatType: tableKey.nullable().default(null),
   matting: z.int().min(0).max(4).default(0),
   soil: z.int().min(0).max(2).default(0),
-  temperament: tableKey.default('steady'),
+  temperament: tableKey.default('calm'),
   birthYear: z.int().min(1990).max(2100).nullable().default(null),
   cautions: z.array(tableKey).max(20).default([]),
   cautionNote: note.default(''),

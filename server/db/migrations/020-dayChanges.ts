@@ -11,6 +11,7 @@ export const { up, down } = table(
   who VARCHAR(80) NOT NULL,
   kind VARCHAR(30) NOT NULL,
   words VARCHAR(300) NOT NULL,
+  move JSON NULL,
   \`before\` JSON NULL,
   \`after\` JSON NULL,
   undoneAt DATETIME(3) NULL,

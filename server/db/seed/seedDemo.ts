@@ -1,0 +1,94 @@
+import { addDays, daysBetween } from '#shared/time/localDate.ts';
+import { localDateAt } from '#shared/time/dayStart.ts';
+import { areaFor } from '#server/area/openAreas.ts';
+import { inBusiness } from '#server/db/database.ts';
+import { env } from '#server/env.ts';
+import { Business } from '#server/models/Business.ts';
+import { Household } from '#server/models/Household.ts';
+import { Pet } from '#server/models/Pet.ts';
+import { Place } from '#server/models/Place.ts';
+import { Run } from '#server/models/Run.ts';
+import { Shift } from '#server/models/Shift.ts';
+import { type DemoSignIn, demoSignIns } from './demoSignIns.ts';
+import { dueOn, type Rhythm } from './dueOn.ts';
+import { householdCount, makeHouseholds } from './makeHouseholds.ts';
+import { makeBusiness } from './makeBusiness.ts';
+import { planDate } from './planDate.ts';
+import { seedActor } from './seedActor.ts';
+import { workDate } from './workDate.ts';
+
+const pastDays = 42;
+const futureDays = 14;
+/** Per date: what three vans can take, so that a busy day stays a day. */
+const mostVisits = 15;
+const demoArea = 'pellan-bay';
+
+export type OnStep = (step: string, done: number, of: number) => void;
+
+/**
+ * Makes the demo business, or tops it up to today: six weeks of worked days behind, today and two
+ * weeks ahead booked. Each date is one transaction, so a killed seed goes on where it stopped.
+ * null when the database belongs to someone else.
+ */
+export async function seedDemo(now: Date, onStep: OnStep): Promise<DemoSignIn[] | null> {
+  const demo = await Business.findOne({ where: { isDemo: true } });
+  if (!demo && (await Business.count()) > 0) return null;
+  const area = areaFor(demoArea);
+  if (!area) throw new Error('The demo area is not imported yet: run npm run area -- town first.');
+  const signIns = demoSignIns(env.dataFolder);
+  const start = new Date(now.getTime() - (pastDays + 1) * 86_400_000);
+  const business = demo ?? (await makeBusiness(area, signIns, start));
+  if ((await inBusiness(business.id, () => Household.count())) < householdCount)
+    await makeHouseholds(business.id, area, start, (done, of) => onStep('Households', done, of));
+  await seedDates(business, now, onStep);
+  return signIns;
+}
+
+async function seedDates(business: Business, now: Date, onStep: OnStep): Promise<void> {
+  const today = localDateAt(now.getTime(), business.timeZone);
+  const first = addDays(today, -pastDays);
+  const total = pastDays + futureDays + 1;
+  const { rhythms, centre } = await inBusiness(business.id, loadRhythms);
+  const dispatcher = await inBusiness(business.id, () =>
+    seedActor(business.id, 'runa@saltmarsh.example'),
+  );
+  for (let i = 0; i < total; i++) {
+    const date = addDays(first, i);
+    await inBusiness(business.id, async () => {
+      if (!(await Shift.findOne({ where: { date } }))) {
+        // Booked a fortnight before, so that the past was once a future.
+        const bookedOn = new Date(
+          Math.min(now.getTime(), Date.parse(date) - futureDays * 86_400_000),
+        );
+        const due = dueOn(date, rhythms, centre).slice(0, mostVisits);
+        await planDate(dispatcher, date, due, bookedOn, { leaveOut: date >= today ? 1 : 0 });
+      }
+      const open = await Run.findOne({ where: { date, sentVersion: null } });
+      if (date < today && open)
+        await workDate(business, dispatcher, date, Math.floor(daysBetween(first, date) / 7));
+    });
+    onStep('Days', i + 1, total);
+  }
+}
+
+async function loadRhythms(): Promise<{ rhythms: Rhythm[]; centre: { lat: number; lon: number } }> {
+  const [households, pets, depot] = await Promise.all([
+    Household.findAll({
+      order: [
+        ['name', 'ASC'],
+        ['addressLabel', 'ASC'],
+      ],
+    }),
+    Pet.findAll({ where: { active: true }, order: [['name', 'ASC']] }),
+    Place.findOne({ where: { kind: 'depot' } }),
+  ]);
+  const rhythms = households.map((household) => {
+    const own = pets.filter((pet) => pet.householdId === household.id);
+    return {
+      household,
+      petIds: own.map((pet) => pet.id),
+      intervalWeeks: Math.min(...own.map((pet) => pet.intervalWeeks)),
+    };
+  });
+  return { rhythms: rhythms.filter((one) => one.petIds.length > 0), centre: depot! };
+}

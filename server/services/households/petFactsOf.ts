@@ -1,0 +1,32 @@
+import type {
+  CautionKey,
+  CoatType,
+  MattingLevel,
+  PetFacts,
+  Temperament,
+} from '#shared/grooming/types.ts';
+import type { Pet } from '#server/models/Pet.ts';
+
+/** What the groom-minute model needs, from a pet's row. `lastVisitDate` null = first visit. */
+export function petFactsOf(pet: Pet, on: Date, lastVisitDate: string | null): PetFacts {
+  const weeks = lastVisitDate
+    ? Math.max(0, Math.floor((on.getTime() - Date.parse(lastVisitDate)) / (7 * 86_400_000)))
+    : null;
+  return {
+    species: pet.species,
+    breedId: pet.breedId ?? null,
+    weightGrams: pet.weightGrams ?? null,
+    ageYears: pet.birthYear == null ? null : Math.max(0, on.getUTCFullYear() - pet.birthYear),
+    coatType: (pet.coatType ?? null) as CoatType | null,
+    coatState: {
+      matting: pet.matting as MattingLevel,
+      undercoatLoad: 0,
+      soil: pet.soil as 0 | 1 | 2,
+      lengthTenthsMm: null,
+    },
+    temperament: pet.temperament as Temperament,
+    cautions: pet.cautions as CautionKey[],
+    firstVisit: lastVisitDate === null,
+    weeksSinceLast: weeks,
+  };
+}

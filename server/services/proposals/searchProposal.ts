@@ -1,0 +1,84 @@
+import type { DayProblem, Plan } from '#shared/schedule/types.ts';
+import { inBusiness } from '#server/db/database.ts';
+import { log } from '#server/log.ts';
+import { Proposal } from '#server/models/Proposal.ts';
+import { planInWorker } from '#server/optimiser/planInWorker.ts';
+
+const searches = new Map<string, AbortController>();
+
+/** Stops a search of this process; another process notices by the row's state. */
+export function stopSearch(proposalId: string): void {
+  searches.get(proposalId)?.abort();
+}
+
+/** Runs the search outside any transaction and writes progress and result to the proposal's row. */
+export async function searchProposal(
+  businessId: string,
+  proposalId: string,
+  problem: DayProblem,
+  plan: Plan,
+  seconds: number,
+): Promise<void> {
+  const controller = new AbortController();
+  searches.set(proposalId, controller);
+  // One write at a time, so that progress cannot overtake the result.
+  let writes: Promise<unknown> = Promise.resolve();
+  const write = (
+    change: Partial<
+      Pick<Proposal, 'progressPermille' | 'plan' | 'state' | 'message' | 'iterations'>
+    >,
+  ) => {
+    writes = writes
+      .then(() => save(businessId, proposalId, change, controller))
+      .catch((error: unknown) => {
+        log.error({ err: error, proposalId }, 'a proposal could not be written');
+      });
+    return writes;
+  };
+  try {
+    const seed = await inBusiness(
+      businessId,
+      async () => (await Proposal.findByPk(proposalId))?.seed ?? 1,
+    );
+    const result = await planInWorker(problem, plan, {
+      seed,
+      seconds,
+      signal: controller.signal,
+      onProgress: ({ permille }) => void write({ progressPermille: permille }),
+      onBest: (best) => void write({ plan: best }),
+    });
+    await write({
+      state: 'ready',
+      plan: result.plan,
+      progressPermille: 1000,
+      iterations: result.iterations,
+    });
+  } catch (error) {
+    if (!controller.signal.aborted) {
+      log.error({ err: error, proposalId }, 'a search failed');
+      await write({
+        state: 'failed',
+        message: 'The search broke off. Nothing changed; ask again.',
+      });
+    }
+  } finally {
+    searches.delete(proposalId);
+  }
+}
+
+async function save(
+  businessId: string,
+  proposalId: string,
+  change: Partial<Pick<Proposal, 'progressPermille' | 'plan' | 'state' | 'message' | 'iterations'>>,
+  controller: AbortController,
+): Promise<void> {
+  const [count] = await inBusiness(businessId, () =>
+    Proposal.update(change, { where: { id: proposalId, state: 'working' } }),
+  );
+  if (count > 0) return;
+  // No row changed: either nothing differed (then it is still working) or someone dropped it.
+  const row = await inBusiness(businessId, () =>
+    Proposal.findByPk(proposalId, { attributes: ['id', 'businessId', 'state'] }),
+  );
+  if (row?.state !== 'working' && row?.state !== 'ready') controller.abort();
+}

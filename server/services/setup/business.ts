@@ -1,0 +1,44 @@
+import { areaFor, listAreas } from '#server/area/openAreas.ts';
+import { badField } from '#server/errors.ts';
+import { Business } from '#server/models/Business.ts';
+
+export async function getBusiness(businessId: string): Promise<Business> {
+  return (await Business.findByPk(businessId))!;
+}
+
+export type BusinessChange = Partial<
+  Pick<
+    Business,
+    | 'name'
+    | 'timeZone'
+    | 'currency'
+    | 'distanceUnit'
+    | 'weightUnit'
+    | 'areaName'
+    | 'senderPhone'
+    | 'deskPhone'
+    | 'setUpMinutes'
+    | 'cleanDownMinutes'
+  >
+>;
+
+/** The working area must be one that is imported here. */
+export async function updateBusiness(
+  businessId: string,
+  change: BusinessChange,
+): Promise<Business> {
+  if (change.areaName !== undefined && !areaFor(change.areaName)) {
+    const names = listAreas()
+      .map((area) => area.name)
+      .join(', ');
+    throw badField('areaName', `must be an imported area (${names || 'none yet'})`);
+  }
+  // Inbound texts are routed by the number they were sent to, so it belongs to one business.
+  const holder = change.senderPhone
+    ? await Business.findOne({ where: { senderPhone: change.senderPhone } })
+    : null;
+  if (holder && holder.id !== businessId)
+    throw badField('senderPhone', 'is another business’s number');
+  const business = await getBusiness(businessId);
+  return business.update(change);
+}
