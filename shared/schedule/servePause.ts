@@ -4,16 +4,20 @@ import { closeStop, openStop } from './recordStop.ts';
 import type { StopTimes } from './types.ts';
 import { breakRule, type WalkState } from './walkState.ts';
 
-/** A refill, errand, rest or meal the van is ready for. `endNotBefore`: now, for one under way. */
+/**
+ * A refill, errand, rest or meal the van is ready for. `endNotBefore`: now, for one under way;
+ * `begunSeconds`: the tap that began it, −1 without.
+ */
 export function servePause(
   state: WalkState,
   stop: ReadyStop,
   arrive: number,
   endNotBefore: number,
+  begunSeconds: number,
   shown: StopTimes['state'],
 ): void {
   const times = openStop(state, stop, arrive, shown);
-  const held = heldUntil(state, stop);
+  const held = begunSeconds >= 0 ? begunSeconds : heldUntil(state, stop);
   const begin = arrive > held ? arrive : held;
   if (held >= 0) waitUntil(state.risk, held);
   state.waitSeconds += begin - arrive;

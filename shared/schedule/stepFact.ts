@@ -49,7 +49,7 @@ export function stepFact(day: ReadyDay, state: WalkState, stop: ReadyStop, fact:
     const shown = working !== null ? 'working' : arrived !== null ? 'arrived' : 'driving';
     const heldOpen = arrived !== null ? now : 0;
     if (stop.visit) serveVisit(day, state, stop, arrive, heldOpen, shown);
-    else servePause(state, stop, working ?? arrive, heldOpen, shown);
+    else servePause(state, stop, arrive, heldOpen, working ?? -1, shown);
   }
 }
 

@@ -31,7 +31,7 @@ export function stepRun(
   if (stop.point >= 0) driveLeg(day, state, stop.point, false);
   else noLeg(state);
   if (stop.kind === 'meal') driveOnToEat(day, state, next);
-  servePause(state, stop, state.freeSeconds, 0, 'ahead');
+  servePause(state, stop, state.freeSeconds, 0, -1, 'ahead');
 }
 
 /** From here on nothing has started: the rest follows from now. */
