@@ -5,7 +5,7 @@ import type { Point } from './plane.ts';
 import type { Random } from './seededRandom.ts';
 
 /** Not every house is surveyed, as in real extracts; search then answers with the nearest number. */
-const SURVEYED = 0.51;
+const SURVEYED = 0.45;
 
 /** Buildings with their addresses: on the building itself, or on a node at the door, as mappers do both. */
 export function drawHouses(draft: OsmDraft, houses: readonly House[], random: Random): void {
