@@ -33,6 +33,8 @@ export async function makeBareSystem(folder, access) {
     PATH: '/usr/local/sbin:/usr/local/bin:/usr/sbin:/usr/bin:/sbin:/bin',
     HOME: '/root',
     LANG: 'C.UTF-8',
+    // A newer npm somewhere is no part of the proof, and its notice would follow the last line.
+    npm_config_update_notifier: 'false',
   };
   if (!access.certificates) return env;
   // Beside Debian's own bundle, which a package may replace on the way.

@@ -31,7 +31,10 @@ export async function ensureClient() {
     try {
       const vite = path.join(projectRoot, 'node_modules/vite/bin/vite.js');
       const args = [vite, 'build', '--outDir', fresh, '--emptyOutDir', '--logLevel', 'warn'];
-      await runToEnd('vite build', process.execPath, args, { onLine: progress });
+      await runToEnd('vite build', process.execPath, args, {
+        onLine: progress,
+        env: { NO_COLOR: '1' },
+      });
       fs.writeFileSync(path.join(fresh, '.stamp'), stamp);
       if (fs.existsSync(dist)) fs.renameSync(dist, old);
       fs.renameSync(fresh, dist);
