@@ -76,9 +76,6 @@ export function ArrivalPage({ token, given }: { token: string; given: Arrival | 
             Call us
           </a>
         )}
-        {arrival.attribution && arrival.van && (
-          <p className="mt-2 text-[13px] text-slate">{arrival.attribution}</p>
-        )}
       </footer>
     </div>
   );

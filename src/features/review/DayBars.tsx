@@ -2,6 +2,7 @@ import { useId } from 'react';
 import type { Review } from '#shared/api/review.ts';
 import { niceTop } from './niceTop.ts';
 import { hoursWords } from './reviewWords.ts';
+import { useBoxWidth } from './useBoxWidth.ts';
 
 type ReviewDay = Review['days'][number];
 
@@ -13,13 +14,13 @@ const parts = [
 ] as const;
 type PartKey = (typeof parts)[number]['key'];
 
-const W = 700;
 const H = 262;
 const left = 34;
 const ground = 226;
 
 /** Hours of each day as stacked bars; each part has a pattern of its own. */
 export function DayBars({ days }: { days: readonly ReviewDay[] }) {
+  const [box, W] = useBoxWidth<HTMLElement>(700);
   const id = useId().replace(/[^a-zA-Z0-9]/g, '');
   const paint = paints(id);
   const most = Math.max(...days.map((day) => sum(day))) / 3600;
@@ -27,9 +28,11 @@ export function DayBars({ days }: { days: readonly ReviewDay[] }) {
   const yOf = (hours: number) => ground - (hours / top) * (ground - 14);
   const slot = (W - left - 6) / days.length;
   const width = Math.min(62, slot * 0.56);
+  // On a phone the numbers beside the bars would run into each other: the table has them.
+  const roomForNumbers = slot - width > 34;
   const ticks = Array.from({ length: Math.round(top / step) + 1 }, (_, at) => at * step);
   return (
-    <figure>
+    <figure ref={box}>
       <svg viewBox={`0 0 ${W} ${H}`} className="block h-auto w-full" aria-hidden="true">
         <Patterns id={id} />
         {ticks.map((hours) => (
@@ -47,7 +50,7 @@ export function DayBars({ days }: { days: readonly ReviewDay[] }) {
           </g>
         ))}
         {days.map((day, index) => {
-          const x = left + slot * (index + 0.5) - width / 2 - 8;
+          const x = left + slot * (index + 0.5) - width / 2 - (roomForNumbers ? 8 : 0);
           let base = 0;
           return (
             <g key={day.date}>
@@ -71,7 +74,7 @@ export function DayBars({ days }: { days: readonly ReviewDay[] }) {
                   )
                 );
               })}
-              {day.groomSeconds > 0 && (
+              {roomForNumbers && day.groomSeconds > 0 && (
                 <text
                   x={x + width + 5}
                   y={yOf(day.groomSeconds / 7200) + 4}
@@ -81,7 +84,7 @@ export function DayBars({ days }: { days: readonly ReviewDay[] }) {
                   {(day.groomSeconds / 3600).toFixed(1)}
                 </text>
               )}
-              {day.driveSeconds > 0 && (
+              {roomForNumbers && day.driveSeconds > 0 && (
                 <text
                   x={x + width + 5}
                   y={yOf((day.groomSeconds + day.driveSeconds / 2) / 3600) + 4}
@@ -153,7 +156,7 @@ function BarTable({ days }: { days: readonly ReviewDay[] }) {
           <tbody>
             {days.map((day) => (
               <tr key={day.date}>
-                <th scope="row" className="!text-[15px] !text-ink">
+                <th scope="row" className="border-t border-linen !text-[15px] !text-ink">
                   {weekday(day.date, 'long')}
                 </th>
                 <td className="num">{hoursWords(day.groomSeconds)}</td>

@@ -3,10 +3,10 @@ import type { Review } from '#shared/api/review.ts';
 import { bandEdges } from './bandEdges.ts';
 import { bandShare, isInside, type BandShare } from './bandShare.ts';
 import { niceTop } from './niceTop.ts';
+import { useBoxWidth } from './useBoxWidth.ts';
 
 type ReviewVisit = Review['visits'][number];
 
-const W = 580;
 const H = 300;
 const left = 42;
 const ground = 262;
@@ -14,6 +14,7 @@ const ground = 262;
 /** Forecast minutes against the clock, each visit judged by its own 8-in-10 band. */
 export function ForecastScatter({ visits }: { visits: readonly ReviewVisit[] }) {
   const [picked, setPicked] = useState<ReviewVisit | null>(null);
+  const [box, W] = useBoxWidth<HTMLElement>(580);
   const most = Math.max(...visits.map((v) => Math.max(v.forecastSeconds, v.clockSeconds))) / 60;
   const { top, step } = niceTop(most);
   const xOf = (seconds: number) => left + (seconds / 60 / top) * (W - left - 12);
@@ -22,7 +23,7 @@ export function ForecastScatter({ visits }: { visits: readonly ReviewVisit[] }) 
   const ticks = Array.from({ length: Math.round(top / step) + 1 }, (_, at) => at * step);
   const share = bandShare(visits);
   return (
-    <figure>
+    <figure ref={box}>
       <p className="text-[15px] text-slate">{shareWords(share)}</p>
       <svg
         viewBox={`0 0 ${W} ${H}`}
@@ -69,7 +70,11 @@ export function ForecastScatter({ visits }: { visits: readonly ReviewVisit[] }) 
           const x = xOf(visit.forecastSeconds);
           const y = yOf(visit.clockSeconds);
           return (
-            <g key={visit.visitId} onPointerEnter={() => setPicked(visit)}>
+            <g
+              key={visit.visitId}
+              onPointerEnter={() => setPicked(visit)}
+              onPointerDown={() => setPicked(visit)}
+            >
               {isInside(visit) ? (
                 <circle cx={x} cy={y} r={4.2} fill="var(--collar)" fillOpacity={0.8} />
               ) : (

@@ -17,7 +17,7 @@ export function LeanTable({ leans }: { leans: Review['leans'] }) {
           <tr>
             <th scope="col">Coat and style</th>
             {['visits', 'forecast', 'clock', 'lean'].map((words) => (
-              <th key={words} scope="col" className="num">
+              <th key={words} scope="col" className={`num ${narrow(words)}`}>
                 {words}
               </th>
             ))}
@@ -30,8 +30,10 @@ export function LeanTable({ leans }: { leans: Review['leans'] }) {
               <tr key={lean.coatStyle}>
                 <td>{lean.coatStyle}</td>
                 <td className="num">{lean.visits}</td>
-                <td className="num">{Math.round(lean.forecastSeconds / 60)}</td>
-                <td className="num">{Math.round(lean.clockSeconds / 60)}</td>
+                <td className={`num ${narrow('forecast')}`}>
+                  {Math.round(lean.forecastSeconds / 60)}
+                </td>
+                <td className={`num ${narrow('clock')}`}>{Math.round(lean.clockSeconds / 60)}</td>
                 <td className={`num ${far ? 'font-semibold text-rosette' : ''}`}>
                   {far && <span aria-hidden="true">▲ </span>}
                   {leanWords(lean.leanPermille)}
@@ -43,4 +45,9 @@ export function LeanTable({ leans }: { leans: Review['leans'] }) {
       </table>
     </div>
   );
+}
+
+/** On a phone the lean itself is enough. */
+function narrow(column: string): string {
+  return column === 'forecast' || column === 'clock' ? 'hidden sm:table-cell' : '';
 }

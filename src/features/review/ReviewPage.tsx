@@ -102,25 +102,29 @@ function Numbers({ review }: { review: Review }) {
     <>
       <Figures review={review} />
       <div className="mt-5 grid gap-4.5 lg:grid-cols-[1.25fr_1fr]">
-        <Card title="Where each day went" dim="hours, all vans">
+        <Card className="min-w-0" title="Where each day went" dim="hours, all vans">
           <DayBars days={review.days} />
         </Card>
-        <Card title="Forecast against the clock">
+        <Card className="min-w-0" title="Forecast against the clock">
           {review.visits.length > 0 ? (
             <ForecastScatter visits={review.visits} />
           ) : (
             <p className="text-slate">No finished visit to compare yet.</p>
           )}
         </Card>
-        <Card title="Van by van">
+        <Card className="min-w-0" title="Van by van">
           <VanTable vans={review.vans} />
         </Card>
-        <Card title="Where forecasts lean" dim="minutes a visit">
+        <Card className="min-w-0" title="Where forecasts lean" dim="minutes a visit">
           <LeanTable leans={review.leans} />
         </Card>
       </div>
     </>
   );
+}
+
+function deltaWords(seconds: number): string {
+  return Math.abs(seconds) < 30 ? '0 min' : `${writeDelta(seconds)} min`;
 }
 
 function Figures({ review }: { review: Review }) {
@@ -134,10 +138,7 @@ function Figures({ review }: { review: Review }) {
     [hoursWords(week.waitSeconds), 'waiting and gaps'],
     [keptWords(week) ?? '–', 'arrived as promised'],
     ...(visits.length > 0
-      ? ([[`${writeDelta(over / visits.length)} min`, 'a visit against its forecast']] as [
-          string,
-          string,
-        ][])
+      ? ([[deltaWords(over / visits.length), 'a visit against its forecast']] as [string, string][])
       : []),
     [String(week.visits), week.visits === 1 ? 'visit' : 'visits'],
   ];

@@ -31,7 +31,10 @@ export function VanTable({ vans }: { vans: Review['vans'] }) {
         <tbody>
           {vans.map((van) => (
             <tr key={van.vanId}>
-              <th scope="row" className="!text-base !font-semibold !text-ink">
+              <th
+                scope="row"
+                className="border-t border-linen !text-base !font-semibold whitespace-nowrap !text-ink"
+              >
                 <ShapeMark shape={van.shape} /> {van.vanName}
               </th>
               <td className="num">{van.visits}</td>

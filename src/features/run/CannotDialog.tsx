@@ -1,11 +1,11 @@
-import { useState } from 'react';
+import { Fragment, useState } from 'react';
 import type { CannotReason } from '#shared/api/runs.ts';
 import { Button } from '#src/components/Button.tsx';
 import { Dialog } from '#src/components/Dialog.tsx';
 import { TextArea } from '#src/components/TextArea.tsx';
 import { cannotReasons } from './cannotReasons.ts';
 import { EmergencyVets, type EmergencyVet } from './EmergencyVets.tsx';
-import type { RunStop } from './runView.ts';
+import type { RunStop, RunVisit } from './runView.ts';
 
 /** Why a stop cannot be done. An unwell pet brings the vets' numbers before anything else. */
 export function CannotDialog({
@@ -36,7 +36,7 @@ export function CannotDialog({
           disabled={!reason}
           onClick={() => reason && onConfirm(reason, note.trim())}
         >
-          {reason ? 'Leave it undone and tell the desk' : 'Pick what is in the way'}
+          {reason ? 'Leave undone · tell the desk' : 'Pick what is in the way'}
         </Button>
       }
     >
@@ -44,43 +44,24 @@ export function CannotDialog({
         <legend className="sr-only">What is in the way</legend>
         <div className="grid gap-1.5">
           {offered.map((one) => (
-            <label
-              key={one.reason}
-              className="flex min-h-12 cursor-pointer items-center gap-3 rounded-[10px] border border-fawn px-3 has-checked:border-collar has-checked:bg-collar-soft has-checked:font-semibold has-focus-visible:outline-3 has-focus-visible:outline-collar"
-            >
-              <input
-                type="radio"
-                name="reason"
-                className="size-5 accent-collar"
-                checked={reason === one.reason}
-                onChange={() => setReason(one.reason)}
-              />
-              {one.words}
-            </label>
+            <Fragment key={one.reason}>
+              <label className="flex min-h-12 cursor-pointer items-center gap-3 rounded-[10px] border border-fawn px-3 py-1.5 leading-snug has-checked:border-collar has-checked:bg-collar-soft has-checked:font-semibold has-focus-visible:outline-3 has-focus-visible:outline-collar">
+                <input
+                  type="radio"
+                  name="reason"
+                  className="size-5 shrink-0 accent-collar"
+                  checked={reason === one.reason}
+                  onChange={() => setReason(one.reason)}
+                />
+                {one.words}
+              </label>
+              {one.reason === 'unwellPet' && reason === 'unwellPet' && visit && (
+                <VetFirst visit={visit} emergencyVets={emergencyVets} />
+              )}
+            </Fragment>
           ))}
         </div>
       </fieldset>
-      {reason === 'unwellPet' && visit && (
-        <div className="mt-3 rounded-card bg-rosette-soft px-4 py-3">
-          <p className="font-semibold text-[#8f2826]">
-            ▲ Do not start. Call the household, and a vet if the pet is in trouble.
-          </p>
-          {visit.pets
-            .filter(({ vetPhone }) => vetPhone)
-            .map((pet) => (
-              <p key={pet.id}>
-                {pet.name}’s vet{pet.vetName && ` ${pet.vetName}`}:{' '}
-                <a
-                  className="text-link inline-flex min-h-12 items-center"
-                  href={`tel:${pet.vetPhone}`}
-                >
-                  {pet.vetPhone}
-                </a>
-              </p>
-            ))}
-          <EmergencyVets vets={emergencyVets} />
-        </div>
-      )}
       <TextArea
         className="mt-3"
         label="Note for the desk"
@@ -91,6 +72,34 @@ export function CannotDialog({
         onChange={(event) => setNote(event.target.value)}
       />
     </Dialog>
+  );
+}
+
+/** Whom to call, right where the finger is: before the stop is closed. */
+function VetFirst({
+  visit,
+  emergencyVets,
+}: {
+  visit: RunVisit;
+  emergencyVets: readonly EmergencyVet[];
+}) {
+  return (
+    <div role="alert" className="rounded-[10px] bg-rosette-soft px-4 py-3">
+      <p className="font-semibold text-[#8f2826]">
+        ▲ Do not start. Call the household, and a vet if the pet is in trouble.
+      </p>
+      {visit.pets
+        .filter(({ vetPhone }) => vetPhone)
+        .map((pet) => (
+          <p key={pet.id}>
+            {pet.name}’s vet{pet.vetName && ` ${pet.vetName}`}:{' '}
+            <a className="text-link inline-flex min-h-12 items-center" href={`tel:${pet.vetPhone}`}>
+              {pet.vetPhone}
+            </a>
+          </p>
+        ))}
+      <EmergencyVets vets={emergencyVets} />
+    </div>
   );
 }
 

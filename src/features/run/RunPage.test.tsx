@@ -107,9 +107,9 @@ describe('a groomer works a run', () => {
     expect(screen.getByText(/^On the way, there about 9:5/)).toBeTruthy();
     await press('Arrived');
     await press('Clover on the table');
-    expect(screen.getByRole('heading', { level: 1 }).textContent).toBe('hands-on look');
+    expect(screen.getByRole('heading', { level: 1 }).textContent).toBe('Hands-on look');
     await press('Section done');
-    expect(screen.getByText('✓ hands-on look')).toBeTruthy();
+    expect(screen.getByText('✓ Hands-on look')).toBeTruthy();
     await press('Section done');
     await press('Clover is done');
     await press('Done here');
@@ -173,7 +173,7 @@ describe('a groomer works a run', () => {
     await user.click(screen.getByRole('radio', { name: 'The pet is unwell' }));
     expect(screen.getAllByRole('link', { name: /\+15550100199/ }).length).toBeGreaterThan(1);
     await user.type(screen.getByLabelText(/Note for the desk/), 'vomits');
-    await press('Leave it undone and tell the desk');
+    await press('Leave undone · tell the desk');
     await vi.advanceTimersByTimeAsync(5_000);
     await waitFor(() =>
       expect([...server.events.values()]).toMatchObject([

@@ -8,6 +8,7 @@ import { ErrorNote } from '#src/components/ErrorNote.tsx';
 import { Loading } from '#src/components/Loading.tsx';
 import { useTitle } from '#src/lib/useTitle.ts';
 import { writeSpan } from '#src/lib/words.ts';
+import { clockOffsetMs } from '#src/offline/clockOffset.ts';
 import { useEventQueue } from '#src/offline/useEventQueue.ts';
 import { useKeptRun } from '#src/offline/useKeptRun.ts';
 import { ActionBar } from './ActionBar.tsx';
@@ -57,11 +58,14 @@ function LoadedRun({ run, aboveNav }: { run: RunDetail; aboveNav: boolean }) {
   const stop = view?.current ?? null;
   const place = usePositionFixes(run.runId, stop?.state === 'driving');
   const stopId = stop?.stopId ?? null;
-  useEffect(() => window.scrollTo(0, 0), [stopId, whole]);
+  useEffect(() => {
+    // In braces: newer browsers answer with a promise, which React would take for a clean-up.
+    window.scrollTo(0, 0);
+  }, [stopId, whole]);
 
   return (
     <div className="mx-auto max-w-[520px]">
-      <RunTopBar {...{ run, view, whole, unsent, waiting }} />
+      <RunTopBar {...{ run, view, whole, unsent, waiting }} nowMs={now - clockOffsetMs()} />
       <ChangedRun run={run} />
       <UnsentNotes
         refused={mine.filter(({ refusedWhy }) => refusedWhy !== null)}

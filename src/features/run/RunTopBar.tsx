@@ -13,15 +13,21 @@ export function RunTopBar({
   whole,
   unsent,
   waiting,
+  nowMs,
 }: {
   run: RunDetail;
   view: RunView | null;
   whole: boolean;
   unsent: readonly QueuedEvent[];
   waiting: boolean;
+  /** By this phone's clock. */
+  nowMs: number;
 }) {
   const online = useOnline() && !waiting;
   const current = view?.current;
+  // A tap still in its hold is not late; only what should have gone is worth a line.
+  const late =
+    waiting || !online || unsent.some(({ holdUntilMs }) => holdUntilMs + slackMs < nowMs);
   return (
     <div className="-mx-4 -mt-4 mb-3 border-b border-fawn px-4 md:mx-0 md:mt-0 md:px-0">
       <div className="flex min-h-14 items-center justify-between gap-3">
@@ -43,7 +49,7 @@ export function RunTopBar({
           </Link>
         )}
       </div>
-      {(!online || unsent.length > 0) && (
+      {(!online || (late && unsent.length > 0)) && (
         <p role="status" className="pb-2.5">
           <Chip tone={online ? 'plain' : 'heed'}>
             {[!online && 'offline', unsent.length > 0 && `${unsent.length} to send`]
@@ -55,3 +61,5 @@ export function RunTopBar({
     </div>
   );
 }
+
+const slackMs = 3_000;

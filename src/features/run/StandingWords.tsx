@@ -4,7 +4,7 @@ export function StandingWords({ standing }: { standing: Standing | null }) {
   if (!standing) return null;
   const bad = standing.tone === 'bad';
   return (
-    <span className={`font-semibold ${bad ? 'text-rosette' : 'text-collar'}`}>
+    <span className={`font-semibold whitespace-nowrap ${bad ? 'text-rosette' : 'text-collar'}`}>
       <span aria-hidden="true">{bad ? '▲ ' : '✓ '}</span>
       {standing.words}
     </span>

@@ -1,5 +1,6 @@
 import { PetStrip } from '#src/strips/PetStrip.tsx';
 import { writeSpan } from '#src/lib/words.ts';
+import { sentenceCase } from './sentenceCase.ts';
 import type { RunVisit } from './runView.ts';
 
 /** The strip of the visit and, opened, each step's minutes with why. */
@@ -30,7 +31,7 @@ export function VisitMinutes({ visit }: { visit: RunVisit }) {
                   {visit.pets.length > 1 && (
                     <span className="text-slate">{names.get(step.petId)} · </span>
                   )}
-                  <span className="inline-block first-letter:uppercase">{step.label}</span>
+                  {sentenceCase(step.label)}
                 </span>
                 <b className="whitespace-nowrap">{writeSpan(step.meanSeconds)}</b>
               </div>

@@ -3,6 +3,7 @@ import { instantToSeconds } from '#shared/time/wallSeconds.ts';
 import { writeSpan } from '#src/lib/words.ts';
 import { Cautions } from './Cautions.tsx';
 import { clockWords } from './clockWords.ts';
+import { sentenceCase } from './sentenceCase.ts';
 import type { PetAtWork } from './nextAction.ts';
 import { StandingWords } from './StandingWords.tsx';
 import { stopStanding } from './stopStanding.ts';
@@ -24,17 +25,19 @@ export function WorkPanel({ view, stop, work }: { view: RunView; stop: RunStop; 
       <p className="text-[15px] text-slate">
         {pet.name}, {pet.breedName} · {Math.max(0, Math.floor(spent / 60))} of {writeSpan(total)}
       </p>
-      <h1 className="text-[26px] leading-[1.12] tracking-tight first-letter:uppercase">
-        {step?.label ?? `${pet.name}: check over`}
+      <h1 className="text-[26px] leading-[1.12] tracking-tight">
+        {step ? sentenceCase(step.label) : `${pet.name}: check over`}
       </h1>
-      <p className="mb-3 text-slate">
-        {writeSpan(left)} left on this pet. The clock never hurries.
-      </p>
+      <p className="mb-3 text-slate">{writeSpan(left)} left on this pet.</p>
       <Cautions pet={pet} />
       <section aria-label="Sections" className="card my-3 overflow-hidden px-4 py-1">
         <ul className="rows">
           {done.map(({ step: over, tookSeconds }) => (
-            <Row key={over.key} label={`✓ ${over.label}`} right={clockWords(tookSeconds)} />
+            <Row
+              key={over.key}
+              label={`✓ ${sentenceCase(over.label)}`}
+              right={clockWords(tookSeconds)}
+            />
           ))}
           {open.map((one) =>
             one === step ? (
@@ -43,14 +46,18 @@ export function WorkPanel({ view, stop, work }: { view: RunView; stop: RunStop; 
                 aria-current="step"
                 className="-mx-4 flex justify-between gap-3 bg-[var(--apricot-soft)] px-4 py-3"
               >
-                <b className="first-letter:uppercase">{one.label}</b>
+                <b>{sentenceCase(one.label)}</b>
                 <span className="whitespace-nowrap">
                   <b aria-hidden="true">{clockWords(stepSpent)}</b>{' '}
                   <span className="text-slate">of {writeSpan(one.meanSeconds)}</span>
                 </span>
               </li>
             ) : (
-              <Row key={one.key} label={one.label} right={writeSpan(one.meanSeconds)} />
+              <Row
+                key={one.key}
+                label={sentenceCase(one.label)}
+                right={writeSpan(one.meanSeconds)}
+              />
             ),
           )}
         </ul>
@@ -94,7 +101,7 @@ function DoneAbout({ view, stop }: { view: RunView; stop: RunStop }) {
 function Row({ label, right }: { label: string; right: string }) {
   return (
     <li className="flex justify-between gap-3 py-2.5 text-slate">
-      <span className="first-letter:uppercase">{label}</span>
+      <span>{label}</span>
       <span className="whitespace-nowrap">{right}</span>
     </li>
   );
