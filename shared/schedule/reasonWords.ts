@@ -1,6 +1,6 @@
 import { formatWall } from '#shared/time/formatWall.ts';
-import type { VanReason } from './explainNotPlaced.ts';
 import type { DayProblem, VanShift, VisitFact } from './types.ts';
+import type { VanReason } from './vanReason.ts';
 
 /** One van's reason in words, e.g. "fits if Curlew may finish 25 min later". */
 export function reasonWords(
