@@ -1,5 +1,6 @@
 import { lazy, Suspense } from 'react';
 import type { Session } from '#shared/api/session.ts';
+import { CatchBoundary } from '#src/components/CatchBoundary.tsx';
 import { Loading } from '#src/components/Loading.tsx';
 import { PinFields } from '#src/components/PinFields.tsx';
 
@@ -28,19 +29,25 @@ export function PinMap({
   return (
     <div className="grid gap-3">
       {area.areaVersion && area.areaBounds && (
-        <Suspense fallback={<Loading words="Loading the map" lines={5} />}>
-          <PinMapBody
-            areaName={area.areaName}
-            version={area.areaVersion}
-            bounds={area.areaBounds}
-            attribution={area.attribution ?? ''}
-            spot={spot}
-            onPin={onPin}
-          />
-        </Suspense>
+        <CatchBoundary
+          instead={
+            <p className="text-slate">The map could not be loaded. Give the pin by numbers.</p>
+          }
+        >
+          <Suspense fallback={<Loading words="Loading the map" lines={5} />}>
+            <PinMapBody
+              areaName={area.areaName}
+              version={area.areaVersion}
+              bounds={area.areaBounds}
+              attribution={area.attribution ?? ''}
+              spot={spot}
+              onPin={onPin}
+            />
+          </Suspense>
+        </CatchBoundary>
       )}
       <details>
-        <summary className="inline-flex min-h-11 items-center text-[15px] font-medium text-slate md:min-h-8">
+        <summary className="text-link py-2 text-[15px]">
           By numbers
         </summary>
         <PinFields key={`${lat} ${lon}`} lat={lat} lon={lon} onPin={onPin} />
