@@ -2,7 +2,7 @@ import { runToEnd } from './childProcess.mjs';
 import { ensureClient } from './clientBuild.mjs';
 import { startOwnDatabase } from './ownDatabase.mjs';
 import { dataFolder } from './projectRoot.mjs';
-import { say, step } from './say.mjs';
+import { step } from './say.mjs';
 import { seedLine } from './seedLine.mjs';
 
 /**
@@ -58,7 +58,6 @@ async function seed(env) {
         const read = seedLine(line);
         if ('signIns' in read) signIns = read.signIns;
         else if ('progress' in read) progress(read.progress);
-        else if (read.text) say(read.text);
       },
     });
   });
