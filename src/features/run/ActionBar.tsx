@@ -86,7 +86,7 @@ function UndoRow({ last, onUndo }: { last: LastTap | null; onUndo: () => void })
         <div className="flex items-center justify-between gap-3 rounded-[10px] bg-ink pl-4 text-white">
           <span className="min-w-0 truncate">
             <span aria-hidden="true">✓ </span>
-            {last.words}
+            {last.words.split(' · ')[0]}
           </span>
           <button
             type="button"
