@@ -47,9 +47,7 @@ export function PinMap({
         </CatchBoundary>
       )}
       <details>
-        <summary className="text-link py-2 text-[15px]">
-          By numbers
-        </summary>
+        <summary className="text-link py-2 text-[15px]">By numbers</summary>
         <PinFields key={`${lat} ${lon}`} lat={lat} lon={lon} onPin={onPin} />
       </details>
     </div>
