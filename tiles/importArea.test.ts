@@ -6,6 +6,7 @@ import { afterAll, describe, expect, it } from 'vitest';
 import { AreaImportError } from './AreaImportError.ts';
 import { CURRENT_FILE } from './AreaMeta.ts';
 import { importArea, type ImportProgress } from './importArea.ts';
+import type { OsmNode, OsmWay } from './osm/osmTypes.ts';
 import { readRoadGraph } from './roads/roadGraphFile.ts';
 import { openTiles } from './tileFile.ts';
 import { tileNumbers } from './tileNumbers.ts';
@@ -14,13 +15,13 @@ import { writeOsmPbf } from './town/writeOsmPbf.ts';
 const folder = mkdtempSync(join(tmpdir(), 'furlong-import-'));
 afterAll(() => rmSync(folder, { recursive: true }));
 
-const NODES = [
+const NODES: Omit<OsmNode, 'type'>[] = [
   { id: 1, lat: 41, lon: -36 },
   { id: 2, lat: 41.002, lon: -36 },
   { id: 3, lat: 41.002, lon: -35.997 },
   { id: 4, lat: 41.001, lon: -35.999, tags: { 'addr:housenumber': '7', 'addr:street': 'Tern Street', 'addr:city': 'Skerrow', 'addr:postcode': '7127' } },
 ]; // prettier-ignore
-const WAYS = [
+const WAYS: Omit<OsmWay, 'type'>[] = [
   { id: 10, refs: [1, 2], tags: { highway: 'residential', name: 'Tern Street' } },
   { id: 11, refs: [2, 3], tags: { highway: 'primary', name: 'Strand', oneway: 'no' } },
   { id: 12, refs: [1, 2, 3, 1], tags: { natural: 'water', name: 'The Pool' } },

@@ -1,3 +1,4 @@
+import L from 'leaflet';
 import { useMap, useMapEvents } from 'react-leaflet';
 import { MapMark } from './MapMark.tsx';
 
@@ -28,9 +29,10 @@ export function PinPicker({
       <div className="leaflet-top leaflet-left">
         <button
           type="button"
+          // React hears clicks only after Leaflet did, so stopping them there is too late.
+          ref={(button) => void (button && L.DomEvent.disableClickPropagation(button))}
           className="leaflet-control rounded-full border border-fawn bg-white px-4 py-2 font-semibold"
-          onClick={(event) => {
-            event.stopPropagation();
+          onClick={() => {
             const { lat, lng } = map.getCenter();
             onChange(rounded(lat, lng));
           }}
