@@ -27,27 +27,29 @@ async function dev() {
   await Promise.all([ensureModules(), mode.databaseUrl ? undefined : ensureMariadb()]);
   const { env, signIns, database } = await prepare(mode, { client: false });
 
+  const vitePort = await freePort(VITE_PORT);
+  const url = `http://127.0.0.1:${vitePort}`;
   const watched = [
     modulesFile('tsx/dist/cli.mjs'),
     'watch',
     '--clear-screen=false',
     'server/main.ts',
   ];
-  const server = await startWebServer(watched, env, mode.port);
-  const port = await freePort(VITE_PORT);
+  // Links in texts and letters then open the client that reloads.
+  const server = await startWebServer(watched, { PUBLIC_URL: url, ...env }, mode.port);
+  const host = mode.host.includes(':') ? `[${mode.host}]` : mode.host;
   const vite = startChild(
     process.execPath,
     [
       modulesFile('vite/bin/vite.js'),
       '--port',
-      String(port),
+      String(vitePort),
       '--strictPort',
       '--clearScreen',
       'false',
     ],
-    { env: { FURLONG_DEV_SERVER: server.url } },
+    { env: { FURLONG_DEV_SERVER: `http://${host}:${server.port}` } },
   );
-  const url = `http://127.0.0.1:${port}/`;
   lock.tell(url);
   sayWelcome(url, mode, signIns);
 

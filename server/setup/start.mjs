@@ -53,7 +53,7 @@ async function start() {
       return 1;
     }
     say('The server has ended unexpectedly; starting it again.');
-    server = await serve(Number(new URL(server.url).port));
+    server = await serve(server.port);
     say(`Furlong is back: ${server.url}`);
   }
 }

@@ -32,7 +32,7 @@ test.each([
   expect(mode.noDemoBecause).toContain(reason);
 });
 
-test.each(['127.0.0.1', '127.1.2.3', '::1', 'localhost'])('%s is loopback', (HOST) => {
+test.each(['127.0.0.1', '::1', 'localhost'])('%s is loopback', (HOST) => {
   expect(startMode({ HOST }).demo).toBe(true);
 });
 

@@ -12,7 +12,7 @@ const USUAL_PORT = 4173;
  * @param {string[]} nodeArgs what node is to run
  * @param {NodeJS.ProcessEnv} env
  * @param {number | undefined} askedPort undefined: the last start's, else the usual, else any free
- * @returns {Promise<{ url: string, finished: import('./childProcess.mjs').Child['finished'] }>}
+ * @returns {Promise<{ url: string, port: number, finished: import('./childProcess.mjs').Child['finished'] }>}
  */
 export async function startWebServer(nodeArgs, env, askedPort) {
   const port = askedPort ?? (await freePort(rememberedPorts().web ?? USUAL_PORT));
@@ -31,7 +31,8 @@ export async function startWebServer(nodeArgs, env, askedPort) {
     });
     const url = await Promise.race([ready, child.finished.then(() => undefined)]);
     if (!url) throw new SetupError('The server ended before it was ready; see its words above.');
-    if (askedPort === undefined) rememberPorts({ web: Number(new URL(url).port) });
-    return { url, finished: child.finished };
+    if (askedPort === undefined) rememberPorts({ web: port });
+    // The address may be a public one, behind something else; only PORT=0 makes it tell the port.
+    return { url, port: port || Number(new URL(url).port), finished: child.finished };
   });
 }
