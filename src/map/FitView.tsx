@@ -1,5 +1,5 @@
 import L from 'leaflet';
-import { useEffect } from 'react';
+import { useEffect, useRef } from 'react';
 import { useMap } from 'react-leaflet';
 
 /** Below this the tiles have no data (their least data zoom is 8, shown one zoom deeper). */
@@ -8,7 +8,7 @@ const MOST_ZOOM_FITTED = 16;
 
 /**
  * Keeps the map right in a container of any size, and shows all of `fitTo` whenever those points
- * change. A person's own panning is left alone in between.
+ * change. Once a person has moved the map themselves, a new size leaves their view alone.
  */
 export function FitView({
   bounds,
@@ -18,24 +18,45 @@ export function FitView({
   fitTo: readonly (readonly [lat: number, lon: number])[] | undefined;
 }) {
   const map = useMap();
+  const touched = useRef(false);
   const key = JSON.stringify(fitTo ?? []);
 
   useEffect(() => {
-    const settle = () => {
-      map.invalidateSize({ pan: false });
-      const fits = map.getBoundsZoom(bounds, false);
-      if (Number.isFinite(fits)) map.setMinZoom(Math.max(LEAST_ZOOM, Math.floor(fits) - 1));
+    const container = map.getContainer();
+    container.setAttribute('role', 'group');
+    container.setAttribute('aria-label', 'Arrow keys move the map, plus and minus zoom');
+    const touch = (event: Event) => {
+      if (!(event instanceof KeyboardEvent && event.key === 'Tab')) touched.current = true;
     };
-    settle();
-    const observer = new ResizeObserver(settle);
-    observer.observe(map.getContainer());
-    return () => observer.disconnect();
-  }, [map, bounds]);
+    const kinds = ['pointerdown', 'wheel', 'keydown'] as const;
+    for (const kind of kinds) container.addEventListener(kind, touch, { passive: true });
+    return () => {
+      for (const kind of kinds) container.removeEventListener(kind, touch);
+    };
+  }, [map]);
 
   useEffect(() => {
+    touched.current = false;
     const points = JSON.parse(key) as [number, number][];
-    const box = points.length > 0 ? L.latLngBounds(points) : bounds;
-    map.fitBounds(box, { padding: [36, 36], maxZoom: MOST_ZOOM_FITTED, animate: false });
+    const wanted = points.length > 0 ? L.latLngBounds(points) : bounds;
+    const settle = () => {
+      map.invalidateSize({ animate: false });
+      const { x, y } = map.getSize();
+      // Hidden behind a tab: there is nothing to fit into yet.
+      if (x === 0 || y === 0) return;
+      map.setMinZoom(Math.max(LEAST_ZOOM, Math.floor(map.getBoundsZoom(bounds, false)) - 1));
+      if (touched.current) return;
+      const edge = Math.min(36, Math.floor(Math.min(x, y) / 8));
+      map.fitBounds(wanted, {
+        padding: [edge, edge],
+        maxZoom: MOST_ZOOM_FITTED,
+        animate: false,
+      });
+    };
+    const observer = new ResizeObserver(settle);
+    settle();
+    observer.observe(map.getContainer());
+    return () => observer.disconnect();
   }, [map, bounds, key]);
   return null;
 }
