@@ -101,7 +101,7 @@ export function Combobox({
             ref={list}
             id={`${wiring.id}-list`}
             role="listbox"
-            aria-label={label}
+            aria-label="Matches"
             hidden={!showList}
             className="absolute inset-x-0 top-full z-30 mt-1 max-h-72 overflow-y-auto rounded-[12px] border border-fawn bg-white p-1 shadow-lg"
           >

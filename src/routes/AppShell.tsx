@@ -1,5 +1,13 @@
-import { Suspense } from 'react';
-import { Link, Navigate, NavLink, Outlet, useLocation, useNavigation } from 'react-router-dom';
+import { Suspense, useEffect } from 'react';
+import {
+  Link,
+  Navigate,
+  NavLink,
+  Outlet,
+  ScrollRestoration,
+  useLocation,
+  useNavigation,
+} from 'react-router-dom';
 import { useMaybeSession } from '#src/api/sessionStore.ts';
 import { CombMark } from '#src/components/CombMark.tsx';
 import { Loading } from '#src/components/Loading.tsx';
@@ -14,6 +22,11 @@ export function AppShell() {
   const session = useMaybeSession();
   const location = useLocation();
   const moving = useNavigation().state !== 'idle';
+  useEffect(() => {
+    // Where the pressed link left with its screen, the keyboard goes on in the new one.
+    if (document.activeElement === document.body)
+      document.getElementById('main')?.focus({ preventScroll: true });
+  }, [location.pathname]);
   if (!session) {
     const place = location.pathname + location.search;
     return (
@@ -103,6 +116,7 @@ export function AppShell() {
         </nav>
       )}
       <ToastRegion />
+      <ScrollRestoration />
     </div>
   );
 }
