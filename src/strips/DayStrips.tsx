@@ -66,7 +66,7 @@ export function DayStrips(props: DayStripsProps) {
   const compact = strips.length > 5;
   const rows = useMemo(() => stripRows(strips, compact), [strips, compact]);
   const hours = (range.toSeconds - range.fromSeconds) / 3600;
-  const inner = Math.max(width - EDGE, hours * LEAST_HOUR_PX) * zoom;
+  const inner = Math.max(width - EDGE, hours * (props.bare ? PHONE_HOUR_PX : LEAST_HOUR_PX)) * zoom;
   const axis = useMemo(
     () => timeAxis(day, range.fromSeconds, range.toSeconds, inner),
     [day, range.fromSeconds, range.toSeconds, inner],
@@ -152,7 +152,7 @@ export function DayStrips(props: DayStripsProps) {
           </svg>
         )}
       </div>
-      <StripTip day={day} tip={tip} />
+      <StripTip day={day} tip={props.carriedVisitId === null && props.drop === null ? tip : null} />
     </div>
   );
 }
@@ -175,3 +175,4 @@ function useStartInView(
 /** Room left and right of the axis, so that the first and last hour's words are whole. */
 const EDGE = 32;
 const LEAST_HOUR_PX = 58;
+const PHONE_HOUR_PX = 86;

@@ -36,11 +36,13 @@ export const StopMark = memo(function StopMark(props: StopMarkProps) {
     <g>
       {stop.drive && <DriveLine drive={stop.drive} axis={axis} y={row.baseline} />}
       {stop.wait && <WaitLine stop={stop} row={row} axis={axis} />}
+      {/* Outside the button: its box is then what one sees and presses. */}
+      {isVisit && <PromiseBracket stop={stop} row={row} axis={axis} />}
       <g
         data-stop={stop.stopId}
         data-visit={stop.visitId ?? undefined}
         data-van={row.vanId}
-        className="strip-stop"
+        className="group/stop outline-none"
         {...(isVisit && {
           tabIndex: 0,
           role: 'button',
@@ -51,7 +53,6 @@ export const StopMark = memo(function StopMark(props: StopMarkProps) {
         <StopGround {...props} x={x} width={width} />
         {isVisit ? (
           <>
-            <PromiseBracket stop={stop} row={row} axis={axis} />
             <StepTowers
               towers={joinNarrow(stop.towers, 5 / axis.pxPerSecond)}
               baseline={row.baseline}
@@ -81,7 +82,7 @@ function StopGround(props: StopMarkProps & { x: number; width: number }) {
   return (
     <>
       <rect
-        className="strip-ring"
+        className="strip-ring group-focus-visible/stop:[stroke-width:3px] group-focus-visible/stop:[stroke:var(--collar)]"
         x={x - 4}
         y={top}
         width={width + 8}

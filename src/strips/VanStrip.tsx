@@ -85,9 +85,8 @@ function ShiftGround({ strip, row, axis }: { strip: Strip; row: StripRow; axis: 
         <g>
           <rect x={end} y={y - 14} width={finish - end} height={14} fill={over} />
           <text
-            x={finish}
-            y={y - 18}
-            textAnchor="end"
+            x={finish + 4}
+            y={y - 4}
             fontSize={11}
             fontWeight={600}
             fill="var(--rosette)"

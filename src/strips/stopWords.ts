@@ -1,4 +1,5 @@
 import { formatWall, formatWallRange, type DayClock } from '#shared/time/formatWall.ts';
+import { writeSpan } from '#src/lib/words.ts';
 import type { StripStop } from './types.ts';
 
 /** The second line under a stop's name: what matters most about it now. */
@@ -45,6 +46,5 @@ export function percentWords(permille: number): string {
 
 /** '+14 min' or '−8 min' against the day as it is. */
 export function shiftWords(seconds: number): string {
-  const minutes = Math.round(Math.abs(seconds) / 60);
-  return `${seconds < 0 ? '−' : '+'}${minutes} min`;
+  return `${seconds < 0 ? '−' : '+'}${writeSpan(Math.abs(seconds))}`;
 }

@@ -13,7 +13,13 @@ export function stripsRange(strips: readonly Strip[]): { fromSeconds: number; to
       ...promises.map((promise) => promise.startSeconds),
     ),
     toSeconds: Math.max(
-      ...strips.map((strip) => Math.max(strip.shiftEndSeconds, strip.finishSeconds)),
+      ...strips.map((strip) =>
+        // Overtime says its minutes behind the finish.
+        Math.max(
+          strip.shiftEndSeconds,
+          strip.finishSeconds + (strip.overtimeSeconds > 0 ? 2700 : 0),
+        ),
+      ),
       ...promises.map((promise) => promise.endSeconds),
     ),
   };

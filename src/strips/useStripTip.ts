@@ -1,4 +1,4 @@
-import { useCallback, useState, type FocusEvent, type PointerEvent } from 'react';
+import { useCallback, useRef, useState, type FocusEvent, type PointerEvent } from 'react';
 import type { TipPlace } from './StripTip.tsx';
 import type { Strip, Tower } from './types.ts';
 
@@ -32,12 +32,24 @@ export function useStripTip(
     },
     [strips, onHighlight],
   );
+  // After a press the strips move under a still pointer; words wait until it moves itself.
+  const quiet = useRef(false);
   const handlers = {
     onPointerOver: (event: PointerEvent) => {
-      if (event.pointerType !== 'touch' && event.buttons === 0) point(event.target);
+      if (event.pointerType !== 'touch' && event.buttons === 0 && !quiet.current)
+        point(event.target);
+    },
+    onPointerMove: (event: PointerEvent) => {
+      if (!quiet.current || event.buttons !== 0) return;
+      if (event.movementX === 0 && event.movementY === 0) return;
+      quiet.current = false;
+      if (event.pointerType !== 'touch') point(event.target);
     },
     onPointerLeave: () => point(null),
-    onPointerDownCapture: () => setTip(null),
+    onPointerDownCapture: () => {
+      quiet.current = true;
+      setTip(null);
+    },
     onFocus: (event: FocusEvent) => {
       if ((event.target as Element).matches(':focus-visible')) point(event.target);
     },

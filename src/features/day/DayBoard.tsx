@@ -2,6 +2,7 @@ import { lazy, Suspense, useCallback, useMemo, useState, type ReactNode } from '
 import type { Day } from '#shared/api/days.ts';
 import { evaluateDay } from '#shared/schedule/evaluateDay.ts';
 import { useCan, useSession } from '#src/api/sessionStore.ts';
+import { Button } from '#src/components/Button.tsx';
 import { Tabs } from '#src/components/Tabs.tsx';
 import { writeDistance } from '#src/lib/measures.ts';
 import { writeCount } from '#src/lib/words.ts';
@@ -17,7 +18,7 @@ import { StripsCard } from './StripsCard.tsx';
 import { summaryWords } from './summaryWords.ts';
 import { useBoardActions } from './useBoardActions.ts';
 import { useBoardMoves } from './useBoardMoves.ts';
-import { useDayChange } from './useDayChange.ts';
+import { useDayChange, type DayChange } from './useDayChange.ts';
 import { useNarrow } from './useNarrow.ts';
 import { useNowSeconds } from './useNowSeconds.ts';
 import { useProposal } from './useProposal.ts';
@@ -92,6 +93,7 @@ export function DayBoard({
       vanId={pending?.move.kind === 'placeVisit' ? pending.move.vanId : vanShown}
       onVan={setVanShown}
       title={title}
+      actions={pending && <PendingButtons change={change} moves={moves} />}
       day={problem}
       strips={shown.strips}
       range={shown.range}
@@ -148,7 +150,7 @@ export function DayBoard({
         />
       </div>
       <DaySummary
-        words={summaryWords(shown.plan, shown.times, business.distanceUnit)}
+        words={summaryWords(shown.plan, shown.times, business.distanceUnit, past)}
         dim={past ? 'this day is over' : null}
       />
       {empty && <EmptyDay past={past} notPlaced={plan.notPlaced.length} canSetUp={can.setUp} />}
@@ -169,6 +171,7 @@ export function DayBoard({
           change={change}
           proposal={proposal}
           view={view}
+          past={past}
           canMove={can.move && !empty}
           dropping={dragging?.target === 'notPlaced'}
           moves={moves}
@@ -198,6 +201,29 @@ export function DayBoard({
         readAgain={readAgain}
       />
     </>
+  );
+}
+
+/** Keep or put back right above the strips, where the eyes are. */
+function PendingButtons({
+  change,
+  moves,
+}: {
+  change: DayChange;
+  moves: ReturnType<typeof useBoardMoves>;
+}) {
+  const keepable = change.trial?.moved && !change.trial.refusedBecause;
+  return (
+    <div ref={moves.keepBox} className="flex gap-2">
+      {keepable && (
+        <Button kind="go" size="small" busy={change.keeping} onClick={() => void moves.keep()}>
+          Keep the move
+        </Button>
+      )}
+      <Button size="small" disabled={change.keeping} onClick={moves.putBack}>
+        Put it back
+      </Button>
+    </div>
   );
 }
 

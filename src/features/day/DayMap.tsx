@@ -208,7 +208,12 @@ function ExpectedVan({
 }) {
   const place = expectedPlace(day.problem, run, legs, nowSeconds);
   const van = day.problem.vans.find((one) => one.vanId === run.vanId);
-  if (!place || !van) return null;
+  // At a stop the stop's own number says it, and would be hidden.
+  const atStop = run.stops.some((stop) => {
+    const point = day.problem.points[stop.point];
+    return point?.lat === place?.[0] && point?.lon === place?.[1];
+  });
+  if (!place || !van || atStop) return null;
   return (
     <VanMarker
       shape={shape}

@@ -24,6 +24,7 @@ export function DaySide({
   change,
   proposal,
   view,
+  past,
   canMove,
   dropping,
   moves,
@@ -37,6 +38,7 @@ export function DaySide({
   change: DayChange;
   proposal: OpenProposal;
   view: ProposalView;
+  past: boolean;
   canMove: boolean;
   dropping: boolean;
   moves: ReturnType<typeof useBoardMoves>;
@@ -63,7 +65,6 @@ export function DaySide({
           carried={pending.carried}
           onKeep={() => void moves.keep()}
           onPutBack={moves.putBack}
-          keepRef={moves.keepBox}
         />
       )}
       {proposal.proposal && !pending && (
@@ -96,6 +97,7 @@ export function DaySide({
         cards={cards}
         reasons={reasons}
         unit={business.weightUnit}
+        past={past}
         canMove={canMove}
         dropping={dropping}
         onOpen={onOpenVisit}

@@ -1,4 +1,3 @@
-import type { Ref } from 'react';
 import { Button } from '#src/components/Button.tsx';
 import { Chip } from '#src/components/Chip.tsx';
 import type { KnockOnRow } from './knockOnRows.ts';
@@ -14,7 +13,6 @@ export function KnockOnCard({
   carried,
   onKeep,
   onPutBack,
-  keepRef,
 }: {
   /** "Juniper moves to Plover, after Sorrel" */
   title: string;
@@ -27,7 +25,6 @@ export function KnockOnCard({
   carried: boolean;
   onKeep: () => void;
   onPutBack: () => void;
-  keepRef?: Ref<HTMLDivElement>;
 }) {
   return (
     <section className="card border-collar px-4 py-4 md:px-5" aria-label="What the move changes">
@@ -53,9 +50,9 @@ export function KnockOnCard({
           ))}
         </dl>
       )}
-      <div ref={keepRef} className="mt-3 flex flex-wrap gap-2">
+      <div className="mt-3 flex flex-wrap gap-2">
         {!refusedBecause && !unchanged && (
-          <Button kind="go" busy={keeping} busyWords="Keeping" onClick={onKeep} data-keep>
+          <Button kind="go" busy={keeping} busyWords="Keeping" onClick={onKeep}>
             Keep the move
           </Button>
         )}

@@ -68,10 +68,9 @@ export function MoveDialog({
           ]}
           onChange={(event) => {
             const to = event.target.value;
-            const count = to ? otherVisits(plan, to, visitId).length : 0;
             setMove(
               to
-                ? { kind: 'placeVisit', visitId, vanId: to, index: count }
+                ? cheapestPlace(problem, plan, times, visitId, to)
                 : { kind: 'unplaceVisit', visitId },
             );
           }}
@@ -113,4 +112,27 @@ export function MoveDialog({
       </div>
     </Dialog>
   );
+}
+
+/** The place on a van that costs the day least: where the list begins. */
+function cheapestPlace(
+  problem: DayProblem,
+  plan: Plan,
+  times: DayTimes,
+  visitId: string,
+  vanId: string,
+): Move {
+  const others = otherVisits(plan, vanId, visitId);
+  const least = begunBefore(problem, others);
+  let best: Move = { kind: 'placeVisit', visitId, vanId, index: others.length };
+  let bestCost = Infinity;
+  for (let index = least; index <= others.length; index += 1) {
+    const move: Move = { kind: 'placeVisit', visitId, vanId, index };
+    const trial = tryMove(problem, plan, times, move);
+    const cost = trial.times.totalCost + (trial.times.feasible ? 0 : 1e9);
+    if (trial.refusedBecause || cost >= bestCost) continue;
+    best = move;
+    bestCost = cost;
+  }
+  return best;
 }

@@ -1,6 +1,7 @@
 import type { PointerEvent } from 'react';
 import type { VisitCard } from '#shared/api/visits.ts';
-import type { NotPlacedReason, VanReason } from '#shared/schedule/explainNotPlaced.ts';
+import type { NotPlacedReason } from '#shared/schedule/explainNotPlaced.ts';
+import type { VanReason } from '#shared/schedule/vanReason.ts';
 import type { DayProblem } from '#shared/schedule/types.ts';
 import { formatWallRange } from '#shared/time/formatWall.ts';
 import { Button } from '#src/components/Button.tsx';
@@ -16,6 +17,7 @@ export function NotPlacedCard({
   cards,
   reasons,
   unit,
+  past,
   canMove,
   dropping,
   onOpen,
@@ -28,6 +30,7 @@ export function NotPlacedCard({
   cards: ReadonlyMap<string, VisitCard>;
   reasons: ReadonlyMap<string, NotPlacedReason>;
   unit: WeightUnit;
+  past: boolean;
   canMove: boolean;
   /** A visit in hand is over this card. */
   dropping: boolean;
@@ -67,6 +70,7 @@ export function NotPlacedCard({
               card={cards.get(visitId)}
               reason={reasons.get(visitId)}
               unit={unit}
+              past={past}
               canMove={canMove}
               onOpen={() => onOpen(visitId)}
               onTry={onTry}
@@ -85,6 +89,7 @@ function NotPlacedRow({
   card,
   reason,
   unit,
+  past,
   canMove,
   onOpen,
   onTry,
@@ -95,6 +100,7 @@ function NotPlacedRow({
   card: VisitCard | undefined;
   reason: NotPlacedReason | undefined;
   unit: WeightUnit;
+  past: boolean;
   canMove: boolean;
   onOpen: () => void;
   onTry: (visitId: string, vanId: string, index: number) => void;
@@ -129,7 +135,11 @@ function NotPlacedRow({
         </button>{' '}
         <span className="text-slate">{about.join(' · ')}</span>
         <p className="text-[14.5px] text-slate first-letter:uppercase">
-          {reason ? reason.words : 'Looking for places …'}
+          {past
+            ? 'was on no van'
+            : reason
+              ? whyWords(reason, van?.vanName)
+              : 'Looking for places …'}
         </p>
       </div>
       {canMove && place && van && (
@@ -146,6 +156,13 @@ function NotPlacedRow({
       )}
     </li>
   );
+}
+
+/** A visit that fits as things are has no reason, only nobody who placed it. */
+function whyWords(reason: NotPlacedReason, vanName: string | undefined): string {
+  return reason.smallest?.rule === 'fits' && vanName
+    ? `Fits ${vanName} as the day stands.`
+    : reason.words;
 }
 
 /** The place the smallest relaxation names, else the van where least stands in the way. */

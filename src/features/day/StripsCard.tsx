@@ -1,4 +1,4 @@
-import { useState, type ComponentProps } from 'react';
+import { useState, type ComponentProps, type ReactNode } from 'react';
 import { ShapeMark } from '#src/components/ShapeMark.tsx';
 import { DayStrips } from '#src/strips/DayStrips.tsx';
 import { StripLegend } from '#src/strips/StripLegend.tsx';
@@ -12,6 +12,7 @@ export function StripsCard({
   vanId,
   onVan,
   title,
+  actions,
   ...strips
 }: StripsProps & {
   narrow: boolean;
@@ -20,6 +21,8 @@ export function StripsCard({
   onVan: (vanId: string) => void;
   /** Said above the strips while they show something else than the day as it is. */
   title: string | null;
+  /** What can be done about it, next to the words. */
+  actions?: ReactNode;
 }) {
   const [zoom, setZoom] = useState(1);
   const shown = narrow
@@ -29,9 +32,10 @@ export function StripsCard({
   return (
     <section className="card px-3 pt-2 pb-3 md:px-5" aria-label="Vans">
       {title && (
-        <p className="-mx-3 -mt-2 mb-1 rounded-t-[13px] bg-collar-soft px-4 py-1.5 text-sm font-semibold text-collar md:-mx-5 md:px-5">
-          {title}
-        </p>
+        <div className="-mx-3 -mt-2 mb-1 flex flex-wrap items-center justify-between gap-x-4 gap-y-2 rounded-t-[13px] bg-collar-soft px-4 py-1.5 md:-mx-5 md:px-5">
+          <p className="min-h-6 text-[15px] font-semibold text-collar">{title}</p>
+          {actions}
+        </div>
       )}
       {narrow && (
         <div
@@ -79,24 +83,39 @@ export function StripsCard({
         </div>
       )}
       <DayStrips {...strips} strips={shown} zoom={zoom} bare={narrow} />
-      <div className="mt-1 flex flex-wrap items-center justify-between gap-x-6 gap-y-2">
-        <StripLegend />
-        <div role="group" aria-label="Zoom" className="flex gap-1">
-          {[1, 2, 4].map((step) => (
-            <button
-              key={step}
-              type="button"
-              aria-pressed={zoom === step}
-              onClick={() => setZoom(step)}
-              className={`min-h-9 rounded-lg px-2.5 text-[13px] ${
-                zoom === step ? 'bg-linen font-semibold' : 'text-slate hover:bg-linen'
-              }`}
-            >
-              {step === 1 ? 'whole day' : `${step} ×`}
-            </button>
-          ))}
+      {narrow ? (
+        <details className="mt-1">
+          <summary className="min-h-11 content-center text-[15px] text-slate">
+            What the marks mean
+          </summary>
+          <StripLegend />
+        </details>
+      ) : (
+        <div className="mt-1 flex flex-wrap items-center justify-between gap-x-6 gap-y-2">
+          <StripLegend />
+          <Zoom zoom={zoom} onZoom={setZoom} />
         </div>
-      </div>
+      )}
     </section>
+  );
+}
+
+function Zoom({ zoom, onZoom }: { zoom: number; onZoom: (zoom: number) => void }) {
+  return (
+    <div role="group" aria-label="Zoom" className="flex gap-1">
+      {[1, 2, 4].map((step) => (
+        <button
+          key={step}
+          type="button"
+          aria-pressed={zoom === step}
+          onClick={() => onZoom(step)}
+          className={`min-h-9 rounded-lg px-2.5 text-[13px] ${
+            zoom === step ? 'bg-linen font-semibold' : 'text-slate hover:bg-linen'
+          }`}
+        >
+          {step === 1 ? 'whole day' : `${step} ×`}
+        </button>
+      ))}
+    </div>
   );
 }

@@ -39,6 +39,7 @@ export function knockOnRows(
           : `${formatWall(problem, run.finishBeforeSeconds)} → ${formatWall(problem, run.finishAfterSeconds)}`,
       tone: 'plain' as const,
     })),
+    ...overtimeRow(knockOn),
     ...refillRows(problem, knockOn),
     ...knockOn.promises
       .filter((promise) => promise.visitId !== movedId)
@@ -91,6 +92,19 @@ function drivingRow(knockOn: KnockOn): KnockOnRow {
   };
 }
 
+function overtimeRow(knockOn: KnockOn): KnockOnRow[] {
+  if (Math.abs(knockOn.overtimeSeconds) < 60) return [];
+  const more = knockOn.overtimeSeconds > 0;
+  return [
+    {
+      key: 'overtime',
+      label: 'Past the end of the shift',
+      value: `${writeSpan(Math.abs(knockOn.overtimeSeconds))} ${more ? 'more' : 'less'}`,
+      tone: more ? 'bad' : 'ok',
+    },
+  ];
+}
+
 function refillRows(problem: DayProblem, knockOn: KnockOn): KnockOnRow[] {
   const minutes = (placeId: string) =>
     writeSpan(problem.refills.find((place) => place.id === placeId)?.lengthSeconds ?? 0);
@@ -138,13 +152,13 @@ function othersRow(knockOn: KnockOn, movedId: string | null): KnockOnRow[] {
   );
   const side = (list: number[], word: string) => {
     if (list.length === 0) return [];
-    const minutes = list.map((seconds) => Math.round(Math.abs(seconds) / 60));
-    const [least, most] = [Math.min(...minutes), Math.max(...minutes)];
+    const sizes = list.map((seconds) => Math.abs(seconds));
+    const [least, most] = [writeSpan(Math.min(...sizes)), writeSpan(Math.max(...sizes))];
     return [
       {
         key: `others-${word}`,
-        label: `${writeCount(list.length, 'other arrival')}`,
-        value: `${least === most ? most : `${least}–${most}`} min ${word}`,
+        label: writeCount(list.length, 'other arrival'),
+        value: `${least === most ? most : `${most.endsWith('min') ? least.replace(/ min$/, '') : least}–${most}`} ${word}`,
         tone: 'plain' as const,
       },
     ];

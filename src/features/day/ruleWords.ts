@@ -27,9 +27,7 @@ export function ruleWords(problem: DayProblem, broken: BrokenRule, unit: WeightU
     case 'tank':
       return `${vanName}’s water runs ${Math.max(1, Math.round(broken.byAmount / 1000))} L short at ${label}`;
     case 'meal':
-      return broken.byAmount > 0
-        ? `${vanName}’s meal comes ${by} too late or not at all`
-        : `${vanName} has no meal`;
+      return `${van?.groomerName ?? vanName} has no meal within its hours`;
     case 'pin':
       return `${label} is pinned elsewhere`;
     case 'refillHours':

@@ -33,8 +33,28 @@ describe('summaryWords', () => {
   });
   it('says nothing of promises on a day without any', () => {
     const none = { ...times, promisesSafe: 0, promisesAtRisk: 0 };
-    const words = summaryWords({ runs: [], notPlaced: [] }, none, 'km');
-    expect(words.title).toBe('0 vans, 0 visits');
-    expect(words.parts).toHaveLength(3);
+    expect(summaryWords(day.plan, none, 'km').parts).toHaveLength(4);
+  });
+  it('says a day without vans short', () => {
+    expect(summaryWords({ runs: [], notPlaced: ['a'] }, times, 'km')).toEqual({
+      title: 'No vans',
+      parts: [{ words: '1 not placed', tone: 'plain' }],
+    });
+  });
+  it('counts of a past day what was done', () => {
+    const stop = (state: 'done' | 'ahead', onTimePermille: number) => ({
+      ...times.runs[0]!.stops[0]!,
+      state,
+      onTimePermille,
+    });
+    const past = {
+      ...times,
+      runs: [
+        { ...times.runs[0]!, stops: [stop('done', 1000), stop('done', 0), stop('ahead', 950)] },
+      ],
+    };
+    const words = summaryWords(day.plan, past, 'km', true).parts.map((part) => part.words);
+    expect(words).toContain('1 of 2 promises kept');
+    expect(words).toContain('1 not kept');
   });
 });
