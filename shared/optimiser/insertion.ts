@@ -13,6 +13,15 @@ export interface Insertion {
   stops: ReadyStop[] | null;
   secondDelta: number;
   secondAt: number;
+  /** Places that want a meal or refill settled first, by the floor under what they add. */
+  mend: MendPlace[];
+  /** Settling at those places is known to find nothing below this. */
+  mendTriedBelow: number;
+}
+
+interface MendPlace {
+  at: number;
+  floor: number;
 }
 
 /** What trying insertions needs besides the run. */
@@ -26,6 +35,7 @@ export interface Trial {
   homeVan: Int32Array;
 }
 
+const mendTries = 2;
 /** Where a trial stopped: at a rule only a meal or refill could mend. */
 const onlyMendable = -1;
 
@@ -40,20 +50,13 @@ export function bestInsertion(trial: Trial, run: SearchRun, stop: ReadyStop): In
   const { day } = trial;
   const frames = framesOf(day, run);
   const flat = flatCost(day, run, visit);
-  const found: Insertion = {
-    delta: Infinity,
-    at: -1,
-    stops: null,
-    secondDelta: Infinity,
-    secondAt: -1,
-  };
+  const found = nothingFound();
   const waitTotal = frames.states[run.stops.length]!.waitSeconds;
-  const mend: { at: number; floor: number }[] = [];
   for (let at = 0; at <= run.stops.length; at += 1) {
     const floor = flat + leastAdded(trial, run, frames, stop, at, waitTotal);
     if (floor >= found.secondDelta) continue;
     const delta = tryAt(trial, run, frames, stop, at, found.secondDelta);
-    if (delta === onlyMendable) mend.push({ at, floor });
+    if (delta === onlyMendable) found.mend.push({ at, floor });
     else if (delta < found.delta) {
       found.secondDelta = found.delta;
       found.secondAt = found.at;
@@ -64,47 +67,73 @@ export function bestInsertion(trial: Trial, run: SearchRun, stop: ReadyStop): In
       found.secondAt = at;
     }
   }
-  if (found.at < 0 && mend.length > 0) settleIn(trial, run, stop, mend, found);
-  return found.at < 0 ? null : found;
+  found.mend.sort((a, b) => a.floor - b.floor);
+  return found;
+}
+
+/**
+ * Settles meal and refills anew at the likeliest places where only they stand in the way. Fills
+ * `found` when that costs less than `below`.
+ */
+export function mendInsertion(
+  trial: Trial,
+  run: SearchRun,
+  stop: ReadyStop,
+  found: Insertion,
+  below: number,
+): void {
+  if (found.at >= 0 || found.mend.length === 0 || below <= found.mendTriedBelow) return;
+  if (found.mend[0]!.floor >= below) return;
+  found.mendTriedBelow = below;
+  found.delta = below;
+  for (const { at } of found.mend.slice(0, mendTries)) settleAt(trial, run, stop, at, found);
+  if (found.at < 0) found.delta = Infinity;
 }
 
 /** The visit put in anew, meal and refills settled, at every place: slow and thorough. */
-export function settledInsertion(trial: Trial, run: SearchRun, stop: ReadyStop): Insertion | null {
+export function settledInsertion(
+  trial: Trial,
+  run: SearchRun,
+  stop: ReadyStop,
+  below: number,
+): Insertion | null {
   if (stop.visit!.staticBroken[run.vanIndex]! > 0) return null;
-  const found: Insertion = {
+  const found = nothingFound();
+  found.delta = below;
+  for (let at = 0; at <= run.stops.length; at += 1) settleAt(trial, run, stop, at, found);
+  return found.at < 0 ? null : found;
+}
+
+function nothingFound(): Insertion {
+  return {
     delta: Infinity,
     at: -1,
     stops: null,
     secondDelta: Infinity,
     secondAt: -1,
+    mend: [],
+    mendTriedBelow: -Infinity,
   };
-  const all = Array.from({ length: run.stops.length + 1 }, (_, at) => ({ at, floor: at }));
-  settleIn(trial, run, stop, all, found, all.length);
-  return found.at < 0 ? null : found;
 }
 
-function settleIn(
+function settleAt(
   trial: Trial,
   run: SearchRun,
   stop: ReadyStop,
-  places: { at: number; floor: number }[],
+  at: number,
   found: Insertion,
-  most = 3,
 ): void {
   const fixed = fixedStops(run);
-  places.sort((a, b) => a.floor - b.floor);
-  for (const { at } of places.slice(0, most)) {
-    let place = 0;
-    for (let i = 0; i < at; i += 1) if (!isLoose(run.stops[i]!)) place += 1;
-    const settled = settleStops(trial.day, run.from, fixed.toSpliced(place, 0, stop), {
-      hard: run.floorHard,
-      cost: run.cost + found.delta,
-    });
-    if (!settled || missesAnew(trial, run, settled.stops)) continue;
-    found.delta = settled.cost - run.cost;
-    found.at = at;
-    found.stops = settled.stops;
-  }
+  let place = 0;
+  for (let i = 0; i < at; i += 1) if (!isLoose(run.stops[i]!)) place += 1;
+  const settled = settleStops(trial.day, run.from, fixed.toSpliced(place, 0, stop), {
+    hard: run.floorHard,
+    cost: run.cost + found.delta,
+  });
+  if (!settled || missesAnew(trial, run, settled.stops)) return;
+  found.delta = settled.cost - run.cost;
+  found.at = at;
+  found.stops = settled.stops;
 }
 
 /** True when a visit that was not on this van misses its window there, even if facts excuse it. */

@@ -3,7 +3,7 @@ import { settleRun, takeApart, toStops } from '#shared/schedule/settleRun.ts';
 import { compileDay } from '#shared/schedule/compileDay.ts';
 import type { DayProblem, DayTimes, Plan, Run } from '#shared/schedule/types.ts';
 import { localMove } from './localMove.ts';
-import { insertThoroughly, recreate } from './recreate.ts';
+import { insertThoroughly, recreate, resettleChanged } from './recreate.ts';
 import { ruin } from './ruin.ts';
 import { restore, type SearchState, type Snapshot, takeSnapshot } from './searchState.ts';
 import { startSearch } from './startSearch.ts';
@@ -34,7 +34,8 @@ export interface OptimiseResult {
 }
 
 const checkEvery = 256;
-const localChance = 0.35;
+const localChance = 0.5;
+const settlingGain = 600;
 
 /**
  * A good plan for the day: ruin and recreate by string removals under simulated annealing, with
@@ -107,15 +108,17 @@ function search(
         totalCost: best.cost,
       });
     }
+    const threshold = current.cost - temperature * Math.log(1 - dice.next());
     if (dice.chance(localChance)) {
-      if (!localMove(state)) continue;
+      if (!localMove(state, threshold)) continue;
     } else {
       recreate(state, ruin(state) + 4);
-    }
-    const threshold = current.cost - temperature * Math.log(1 - dice.next());
-    if (state.cost >= threshold) {
-      restore(state, current);
-      continue;
+      // Settling gains some minutes at most: it is left out where they would not help.
+      if (state.cost < threshold + settlingGain) resettleChanged(state, current.runs);
+      if (state.cost >= threshold) {
+        restore(state, current);
+        continue;
+      }
     }
     current = takeSnapshot(state);
     if (state.cost < best.cost) {

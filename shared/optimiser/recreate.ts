@@ -1,5 +1,5 @@
 import type { ReadyVisit } from '#shared/schedule/compileDay.ts';
-import { bestInsertion, type Insertion, settledInsertion } from './insertion.ts';
+import { bestInsertion, type Insertion, mendInsertion, settledInsertion } from './insertion.ts';
 import { makeRun, resettle, type SearchRun } from './searchRun.ts';
 import { replaceRun, type SearchState, takeAbsent } from './searchState.ts';
 
@@ -10,8 +10,11 @@ const blinkChance = 0.02;
  * best place now and then. A visit that costs more than it is worth stays out.
  */
 export function recreate(state: SearchState, most = Infinity): void {
-  const before = [...state.runs];
   for (const visit of throwOrder(state, most)) insertBest(state, visit, blinkChance);
+}
+
+/** Settles meals and refills anew in the runs that are not those of `before`. */
+export function resettleChanged(state: SearchState, before: readonly SearchRun[]): void {
   for (let van = 0; van < before.length; van += 1) {
     const run = state.runs[van]!;
     if (run === before[van]) continue;
@@ -27,13 +30,13 @@ export function insertThoroughly(state: SearchState): void {
     let best: Insertion | null = null;
     let bestRun: SearchRun | null = null;
     for (const run of state.runs) {
-      const found = settledInsertion(state.trial, run, state.stopOf[visit]!);
-      if (!found || (best && found.delta >= best.delta)) continue;
+      const below = best?.delta ?? worth(visit);
+      const found = settledInsertion(state.trial, run, state.stopOf[visit]!, below);
+      if (!found) continue;
       best = found;
       bestRun = run;
     }
-    if (best && bestRun && best.delta < worth(visit))
-      putIn(state, bestRun, visit, best.at, best.delta, best);
+    if (best && bestRun) putIn(state, bestRun, visit, best.at, best.delta, best);
   }
 }
 
@@ -43,9 +46,11 @@ export function insertBest(state: SearchState, visit: number, blink: number): bo
   let at = -1;
   let found: Insertion | null = null;
   let into: SearchRun | null = null;
+  let anyMend = false;
   for (const run of state.runs) {
     const tried = lookUp(state, run, visit);
     if (!tried) continue;
+    if (tried.stops === null && tried.mend.length > 0) anyMend = true;
     const blinks = blink > 0 && tried.secondAt >= 0 && state.dice.chance(blink);
     const cost = blinks ? tried.secondDelta : tried.delta;
     if (cost >= delta) continue;
@@ -54,6 +59,17 @@ export function insertBest(state: SearchState, visit: number, blink: number): bo
     found = blinks ? null : tried;
     into = run;
   }
+  if (anyMend)
+    for (const run of state.runs) {
+      const tried = lookUp(state, run, visit);
+      if (!tried || tried.at >= 0) continue;
+      mendInsertion(state.trial, run, state.stopOf[visit]!, tried, delta);
+      if (tried.delta >= delta) continue;
+      delta = tried.delta;
+      at = tried.at;
+      found = tried;
+      into = run;
+    }
   if (!into) return false;
   putIn(state, into, visit, at, delta, found);
   return true;

@@ -1,4 +1,4 @@
-import { fixedStops, isMovable, rebuildRun } from './searchRun.ts';
+import { isMovable, thinRun } from './searchRun.ts';
 import { putAbsent, replaceRun, type SearchState } from './searchState.ts';
 
 const mostRemoved = 10;
@@ -47,8 +47,11 @@ function cutString(state: SearchState, van: number, seed: number, longest: numbe
   const most = Math.min(movable.length, longest);
   const length = Math.max(1, Math.floor(1 + dice.next() * most - 1e-9));
   const cut = new Set(chooseString(state, movable, seedAt, Math.min(length, movable.length)));
-  const rest = fixedStops(run).filter((stop) => !stop.visit || !cut.has(stop.visit.index));
-  const rebuilt = rebuildRun(state.trial.day, run, rest);
+  const rebuilt = thinRun(
+    state.trial.day,
+    run,
+    (stop) => !stop.visit || !cut.has(stop.visit.index),
+  );
   if (!rebuilt) return false;
   for (const visit of cut) putAbsent(state, visit);
   replaceRun(state, rebuilt);

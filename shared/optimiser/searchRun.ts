@@ -49,13 +49,41 @@ export function makeRun(
   };
 }
 
-/** The run with other visits in it: meals and refills settled. Null when it breaks a hard rule. */
-export function rebuildRun(day: ReadyDay, like: SearchRun, fixed: ReadyStop[]): SearchRun | null {
-  const settled = settleStops(day, like.from, fixed, {
-    hard: like.floorHard,
-    cost: Infinity,
-  });
+/**
+ * The run with other visits in it: meals and refills settled. Null when it breaks a hard rule or
+ * costs `below` or more.
+ */
+export function rebuildRun(
+  day: ReadyDay,
+  like: SearchRun,
+  fixed: ReadyStop[],
+  below = Infinity,
+): SearchRun | null {
+  const settled = settleStops(day, like.from, fixed, { hard: like.floorHard, cost: below });
   return settled && makeRun(like, settled.stops, settled.cost);
+}
+
+/** The run without some visits, meals and refills left where they are; settled anew if that breaks a rule. */
+export function thinRun(
+  day: ReadyDay,
+  run: SearchRun,
+  keeps: (stop: ReadyStop) => boolean,
+): SearchRun | null {
+  const stops = run.stops.filter(keeps);
+  if (!stops.some((stop) => !isLoose(stop))) return rebuildRun(day, run, []);
+  const walked = walkAll(day, run.from, stops);
+  if (walked.hard <= run.floorHard) return makeRun(run, stops, walked.cost);
+  return rebuildRun(
+    day,
+    run,
+    stops.filter((stop) => !isLoose(stop)),
+  );
+}
+
+/** What the run would cost at least: without meal and refills. Infinite when a rule breaks that they cannot mend. */
+export function bareCost(day: ReadyDay, like: SearchRun, fixed: ReadyStop[]): number {
+  const bare = walkAll(day, like.from, fixed);
+  return bare.hard - bare.mendable > like.floorHard ? Infinity : bare.cost;
 }
 
 /** The same visits with meals and refills put back at least cost; the run itself when it is best. */

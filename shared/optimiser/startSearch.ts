@@ -4,7 +4,7 @@ import type { DayProblem, Plan } from '#shared/schedule/types.ts';
 import { startWalk } from '#shared/schedule/walkState.ts';
 import type { Trial } from './insertion.ts';
 import { Dice } from './random.ts';
-import { recreate } from './recreate.ts';
+import { recreate, resettleChanged } from './recreate.ts';
 import { fixedStops, hardOf, isMovable, makeRun, rebuildRun, type SearchRun } from './searchRun.ts';
 import { putAbsent, replaceRun, restore, type SearchState, takeSnapshot } from './searchState.ts';
 
@@ -30,7 +30,10 @@ export function startSearch(problem: DayProblem, plan: Plan, seed: number): Sear
 }
 
 function fill(state: SearchState): void {
-  if (state.absent.length > 0) recreate(state);
+  if (state.absent.length === 0) return;
+  const before = [...state.runs];
+  recreate(state);
+  resettleChanged(state, before);
 }
 
 function stateOf(day: ReadyDay, plan: Plan, seed: number): SearchState {
@@ -44,7 +47,7 @@ function stateOf(day: ReadyDay, plan: Plan, seed: number): SearchState {
     day,
     scratch: startWalk(problem.vans[0]!, 0),
     end: { finishSeconds: 0, overtimeSeconds: 0, cost: 0 },
-    leastPermille: Math.min(...day.bands.map((band) => band.permille)),
+    leastPermille: day.leastPermille,
     homeVan,
   };
   const runs: SearchRun[] = problem.vans.map((van) => {

@@ -46,6 +46,8 @@ export interface ReadyDay {
   base: readonly number[];
   metres: readonly number[];
   bands: readonly DriveBand[];
+  /** The fastest band: a floor under driving. */
+  leastPermille: number;
   cvPermille: number;
   vanIndex: Map<string, number>;
   visitIndex: Map<string, number>;
@@ -147,6 +149,7 @@ function makeReady(problem: DayProblem): ReadyDay {
     base: problem.drive.baseSeconds,
     metres: problem.drive.metres,
     bands: problem.drive.bands,
+    leastPermille: Math.min(...problem.drive.bands.map((band) => band.permille)),
     cvPermille: problem.drive.cvPermille,
     vanIndex,
     visitIndex: new Map(problem.visits.map((visit, i) => [visit.id, i])),

@@ -5,6 +5,8 @@ import { reasonWords } from './reasonWords.ts';
 import type { VanReason } from './vanReason.ts';
 import type { BrokenRule, DayProblem, Plan, VanShift, VisitFact } from './types.ts';
 
+export type { VanReason } from './vanReason.ts';
+
 /** A visit that is not placed: every van's reason, and the smallest single thing that would place it. */
 export interface NotPlacedReason {
   visitId: string;

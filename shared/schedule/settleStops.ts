@@ -12,6 +12,7 @@ export interface Settled {
   /** Hard rules broken that a meal or refill could mend. */
   mendable: number;
   finishSeconds: number;
+  waitSeconds: number;
 }
 
 /** Steps one run may take before the best found so far is kept: a bound on work, the same everywhere. */
@@ -46,12 +47,16 @@ export function settleStops(
 ): Settled | null {
   const bare = walkAll(day, from, fixed);
   if (bare.mendable === 0) return bound && !beats(bare, bound) ? null : bare;
+  // What neither meal nor refill mends only grows when they are put in.
+  if (bound && bare.hard - bare.mendable > bound.hard) return null;
   const mayEat = from.van.meal !== null && from.mealStopId === null && !hasMeal(fixed);
   // Refills only lengthen a run: a meal due without them is due with them.
   const mustEat = mayEat && isMealDue(from.van, bare.finishSeconds);
   const places = usefulPlaces(day, from);
   const need = places.length > 0 ? fewestRefills(from, fixed) : 0;
+  if (bound && bound.hard === 0 && isTooLong(day, from, bare, mustEat, places, need)) return null;
   const limit = bound ?? { hard: bare.hard, cost: bare.cost };
+  const toHome = leastToHome(day, from, fixed, places, bare.finishSeconds);
   for (let refills = need; refills <= need + 2; refills += 1) {
     const search: Search = {
       day,
@@ -61,6 +66,7 @@ export function settleStops(
       mustEat,
       latestMeal: from.van.meal?.latestStartSeconds ?? 0,
       places,
+      toHome,
       mostRefills: refills,
       steps: bound ? mostBoundedSteps : mostSteps,
       hard: limit.hard,
@@ -81,6 +87,25 @@ function beats(one: SettleBound, other: SettleBound): boolean {
   return one.hard < other.hard || (one.hard === other.hard && one.cost < other.cost);
 }
 
+/** True when even with all waiting used for meal and refills the van would be home too late. */
+function isTooLong(
+  day: ReadyDay,
+  from: WalkState,
+  bare: Settled,
+  mustEat: boolean,
+  places: ReadyStop[],
+  need: number,
+): boolean {
+  // With traffic by the hour a later leg may be shorter: then nothing is known beforehand.
+  if (day.bands.length > 1) return false;
+  const { van } = from;
+  let shortest = Infinity;
+  for (const place of places) shortest = Math.min(shortest, place.lengthSeconds);
+  const pauses = (mustEat ? van.meal!.lengthSeconds : 0) + (need > 0 ? need * shortest : 0);
+  const home = bare.finishSeconds + pauses - bare.waitSeconds;
+  return home > van.endSeconds + van.mostOvertimeSeconds;
+}
+
 /** Walks stops as they stand. */
 export function walkAll(day: ReadyDay, from: WalkState, stops: ReadyStop[]): Settled {
   const state = walkAt(0, from);
@@ -93,6 +118,7 @@ export function walkAll(day: ReadyDay, from: WalkState, stops: ReadyStop[]): Set
     hard: state.hard,
     mendable: state.mendable,
     finishSeconds: end.finishSeconds,
+    waitSeconds: state.waitSeconds,
   };
 }
 
@@ -132,6 +158,8 @@ interface Search {
   mustEat: boolean;
   latestMeal: number;
   places: ReadyStop[];
+  /** By index in `fixed`: the least that driving home from there, and overtime, still cost. */
+  toHome: Float64Array;
   mostRefills: number;
   steps: number;
   /** To be beaten. */
@@ -167,7 +195,7 @@ function explore(
       const place = places[i]!;
       if (!isUseful(state, place)) continue;
       const next = take(search, depth, state, held, place, fixed[at] ?? null);
-      if (!mayWin(search, next, eaten)) continue;
+      if (!mayWin(search, next, eaten, at)) continue;
       chosen.push(place);
       explore(search, depth + 1, at, next, null, eaten, refills + 1);
       chosen.pop();
@@ -176,7 +204,7 @@ function explore(
     const stop = fixed[at]!;
     // A fixed meal is held too, so that what is put after it is seen.
     const next = take(search, depth, state, held, stop, fixed[at + 1] ?? null);
-    if (!mayWin(search, next, eaten)) return;
+    if (!mayWin(search, next, eaten, at)) return;
     chosen.push(stop);
     explore(search, depth + 1, at + 1, next, stop.kind === 'meal' ? stop : null, eaten, refills);
     chosen.pop();
@@ -194,6 +222,7 @@ function explore(
     hard: last.hard,
     mendable: last.mendable,
     finishSeconds,
+    waitSeconds: last.waitSeconds,
   };
 }
 
@@ -222,10 +251,51 @@ function take(
   return next;
 }
 
-function mayWin(search: Search, next: WalkState, eaten: boolean): boolean {
+function mayWin(search: Search, next: WalkState, eaten: boolean, at: number): boolean {
   const tooLate = search.mustEat && !eaten && next.freeSeconds > search.latestMeal;
   const hard = next.hard + (tooLate ? 1 : 0);
-  return hard < search.hard || (hard === search.hard && costSoFar(search.day, next) < search.cost);
+  if (hard !== search.hard) return hard < search.hard;
+  return costSoFar(search.day, next) + search.toHome[at]! < search.cost;
+}
+
+/**
+ * What is still to come at least once `fixed[i]` is reached: every leg after it, cut short where a
+ * refill place makes a shorter way, and the overtime of the run without meal and refills.
+ */
+function leastToHome(
+  day: ReadyDay,
+  from: WalkState,
+  fixed: ReadyStop[],
+  places: ReadyStop[],
+  bareFinish: number,
+): Float64Array {
+  const n = fixed.length;
+  const overtime = bareFinish - from.van.endSeconds;
+  const least = new Float64Array(n + 1);
+  least[n] = overtime > 0 ? overtime * day.problem.weights.overtimeFactor : 0;
+  let point = from.van.endPoint;
+  let site: string | null = null;
+  for (let i = n - 1; i >= 0; i -= 1) {
+    const stop = fixed[i]!;
+    const ownSite = stop.visit?.fact.siteId ?? null;
+    let leg = 0;
+    if (stop.point >= 0) {
+      if (ownSite === null || ownSite !== site) {
+        leg = day.base[stop.point * day.pointCount + point]!;
+        for (let p = 0; p < places.length; p += 1) {
+          const place = places[p]!.point;
+          const way =
+            day.base[stop.point * day.pointCount + place]! +
+            day.base[place * day.pointCount + point]!;
+          if (way < leg) leg = way;
+        }
+      }
+      point = stop.point;
+      site = ownSite;
+    }
+    least[i] = least[i + 1]! + Math.floor((leg * day.leastPermille) / 1000);
+  }
+  return least;
 }
 
 function costSoFar(day: ReadyDay, state: WalkState): number {
