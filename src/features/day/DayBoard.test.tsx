@@ -55,7 +55,7 @@ it('moves a visit to another van by keys alone and keeps it', async () => {
     index: 3,
   });
   // The versions of exactly the two runs it touches: Otter's and Plover's.
-  expect(sent[0]!.body.runVersions).toEqual({ [uuid(900)]: 3, [uuid(901)]: 4 });
+  expect(sent[0]!.body.runVersions).toEqual({ [uuid(100)]: 3, [uuid(101)]: 4 });
   await waitFor(() => expect(screen.queryByText('Keep the move')).toBeNull());
   expect(placeOf(day.plan, idOf('Juniper'))).toEqual({ vanId: uuid(101), index: 3 });
 });

@@ -2,7 +2,7 @@ import type { Day } from '#shared/api/days.ts';
 import type { Move, Plan } from '#shared/schedule/types.ts';
 import { placeOf } from './moveWords.ts';
 
-/** Versions of the runs a move touches, by run id, as this screen saw them. */
+/** Versions of the runs a move touches, by van id, as this screen saw them. */
 export function runVersionsOf(day: Day, plan: Plan, move: Move): Record<string, number> {
   const touched = new Set<string>();
   if (move.kind === 'placeVisit' || move.kind === 'unplaceVisit') {
@@ -19,6 +19,6 @@ export function versionsOf(day: Day, vanIds?: ReadonlySet<string>): Record<strin
   return Object.fromEntries(
     day.runs
       .filter((run) => !vanIds || vanIds.has(run.vanId))
-      .map((run) => [run.runId, run.version]),
+      .map((run) => [run.vanId, run.version]),
   );
 }
