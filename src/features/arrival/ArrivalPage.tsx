@@ -37,7 +37,7 @@ export function ArrivalPage({ token, given }: { token: string; given: Arrival | 
             {clock(heardAtMs)}; it renews itself.
           </p>
         )}
-        <div className="grid gap-3">
+        <div className="grid grid-cols-1 gap-3">
           {isAhead(arrival) && arrival.steps.length > 0 && (
             <section aria-label="What will be done" className="card px-4 pt-3 pb-2">
               <VisitStrip steps={arrival.steps} />

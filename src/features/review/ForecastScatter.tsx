@@ -15,11 +15,15 @@ const ground = 262;
 export function ForecastScatter({ visits }: { visits: readonly ReviewVisit[] }) {
   const [picked, setPicked] = useState<ReviewVisit | null>(null);
   const [box, W] = useBoxWidth<HTMLElement>(580);
-  const most = Math.max(...visits.map((v) => Math.max(v.forecastSeconds, v.clockSeconds))) / 60;
+  const edges = bandEdges(visits);
+  const most =
+    Math.max(
+      ...visits.map((visit) => Math.max(visit.forecastSeconds, visit.clockSeconds)),
+      ...edges.map((edge) => edge.highSeconds),
+    ) / 60;
   const { top, step } = niceTop(most);
   const xOf = (seconds: number) => left + (seconds / 60 / top) * (W - left - 12);
   const yOf = (seconds: number) => ground - (seconds / 60 / top) * (ground - 12);
-  const edges = bandEdges(visits);
   const ticks = Array.from({ length: Math.round(top / step) + 1 }, (_, at) => at * step);
   const share = bandShare(visits);
   return (

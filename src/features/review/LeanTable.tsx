@@ -2,7 +2,7 @@ import type { Review } from '#shared/api/review.ts';
 import { leanWords } from './reviewWords.ts';
 
 /** A lean of this much or more is worth a look. */
-const notable = 80;
+const notablePercent = 8;
 
 export function LeanTable({ leans }: { leans: Review['leans'] }) {
   if (leans.length === 0)
@@ -25,7 +25,8 @@ export function LeanTable({ leans }: { leans: Review['leans'] }) {
         </thead>
         <tbody>
           {sorted.map((lean) => {
-            const far = Math.abs(lean.leanPermille) >= notable && lean.visits >= 3;
+            const far =
+              Math.abs(Math.round(lean.leanPermille / 10)) >= notablePercent && lean.visits >= 3;
             return (
               <tr key={lean.coatStyle}>
                 <td>{lean.coatStyle}</td>

@@ -101,23 +101,28 @@ function Numbers({ review }: { review: Review }) {
   return (
     <>
       <Figures review={review} />
-      <div className="mt-5 grid gap-4.5 lg:grid-cols-[1.25fr_1fr]">
-        <Card className="min-w-0" title="Where each day went" dim="hours, all vans">
-          <DayBars days={review.days} />
-        </Card>
-        <Card className="min-w-0" title="Forecast against the clock">
-          {review.visits.length > 0 ? (
-            <ForecastScatter visits={review.visits} />
-          ) : (
-            <p className="text-slate">No finished visit to compare yet.</p>
-          )}
-        </Card>
-        <Card className="min-w-0" title="Van by van">
-          <VanTable vans={review.vans} />
-        </Card>
-        <Card className="min-w-0" title="Where forecasts lean" dim="minutes a visit">
-          <LeanTable leans={review.leans} />
-        </Card>
+      {/* Two stacks, not rows: a long table must not leave a hole beside it. */}
+      <div className="mt-5 grid items-start gap-4.5 lg:grid-cols-[1.25fr_1fr]">
+        <div className="grid min-w-0 gap-4.5">
+          <Card title="Where each day went" dim="hours, all vans">
+            <DayBars days={review.days} />
+          </Card>
+          <Card title="Van by van">
+            <VanTable vans={review.vans} />
+          </Card>
+        </div>
+        <div className="grid min-w-0 gap-4.5">
+          <Card title="Forecast against the clock">
+            {review.visits.length > 0 ? (
+              <ForecastScatter visits={review.visits} />
+            ) : (
+              <p className="text-slate">No finished visit to compare yet.</p>
+            )}
+          </Card>
+          <Card title="Where forecasts lean" dim="minutes a visit">
+            <LeanTable leans={review.leans} />
+          </Card>
+        </div>
       </div>
     </>
   );

@@ -39,7 +39,7 @@ export function StopPanel({ view, stop }: { view: RunView; stop: RunStop }) {
           )}
         </p>
       )}
-      <div className="mt-3 grid gap-3">
+      <div className="mt-3 grid grid-cols-1 gap-3">
         <KerbCard stop={stop} />
         {visit?.pets.map((pet) => (
           <PetCard

@@ -1,3 +1,4 @@
+import { writeSpan } from '#src/lib/words.ts';
 import type { RunStop } from './runView.ts';
 
 export interface Standing {
@@ -14,16 +15,16 @@ export function stopStanding(stop: RunStop): Standing | null {
   const lateSeconds = stop.times.arriveSeconds - stop.promise.endSeconds;
   if (stop.state !== 'ahead' && stop.state !== 'driving')
     return lateSeconds > 0
-      ? { words: `came ${minutes(lateSeconds)} late`, tone: 'bad' }
+      ? { words: `came ${lateWords(lateSeconds)} late`, tone: 'bad' }
       : { words: 'promise kept', tone: 'ok' };
   const chance = stop.times.onTimePermille;
   if (chance === null) return null;
   if (chance >= safePermille) return { words: 'promise safe', tone: 'ok' };
   if (chance < 100 && lateSeconds > 0)
-    return { words: `about ${minutes(lateSeconds)} late`, tone: 'bad' };
+    return { words: `about ${lateWords(lateSeconds)} late`, tone: 'bad' };
   return { words: `${Math.max(1, Math.round(chance / 10))} % on time`, tone: 'bad' };
 }
 
-function minutes(seconds: number): string {
-  return `${Math.max(1, Math.round(seconds / 60))} min`;
+function lateWords(seconds: number): string {
+  return writeSpan(Math.max(60, seconds));
 }
