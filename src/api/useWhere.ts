@@ -32,7 +32,7 @@ export function useWhere(value: Where, onChange: (value: Where) => void) {
   return {
     text: value.addressLabel,
     onText: (addressLabel: string) => onChange({ ...value, addressLabel }),
-    options: addresses.map(({ id, label, postcode }) => ({ key: id, label, detail: postcode })),
+    options: addresses.map(({ id, label }) => ({ key: id, label })),
     onPick: ({ key }: { key: string }) => {
       const found = addresses.find(({ id }) => id === key);
       if (!found) return;

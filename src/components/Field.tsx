@@ -26,7 +26,8 @@ export function Field({
   children,
 }: FieldAbout & { children: (wiring: FieldWiring) => ReactNode }) {
   const id = useId();
-  const notes = [hint && `${id}-hint`, error && `${id}-error`].filter(Boolean).join(' ');
+  // What is wrong takes the hint's place: it says what would be right anyway.
+  const notes = error ? `${id}-error` : hint ? `${id}-hint` : undefined;
   return (
     <div className={className}>
       <label htmlFor={id} className="mb-1 block text-[15px] font-medium">
@@ -35,12 +36,12 @@ export function Field({
       </label>
       {children({
         id,
-        'aria-describedby': notes || undefined,
+        'aria-describedby': notes,
         'aria-invalid': error ? true : undefined,
         'aria-required': required ? true : undefined,
       })}
       {error && <FieldError id={`${id}-error`} words={error} />}
-      {hint && (
+      {hint && !error && (
         <p id={`${id}-hint`} className="mt-1 text-sm text-slate">
           {hint}
         </p>

@@ -3,6 +3,7 @@ import { cleanup, render, screen, waitFor } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { afterEach, expect, test, vi } from 'vitest';
 import { z } from 'zod';
+import { errorWords } from './errorWords.ts';
 import { useSubmit } from './useSubmit.ts';
 import { useZodForm } from './useZodForm.ts';
 
@@ -19,7 +20,7 @@ function Form({ send }: { send: (values: { name: string }) => Promise<void> }) {
       <input aria-label="Name" {...form.register('name')} />
       <p data-testid="error">{form.formState.errors.name?.message}</p>
       <p data-testid="stray">{JSON.stringify(submit.strayFields)}</p>
-      <p data-testid="failure">{submit.failure instanceof Error && submit.failure.message}</p>
+      <p data-testid="failure">{submit.failure ? errorWords(submit.failure) : ''}</p>
       <button type="submit">Save</button>
     </form>
   );
@@ -55,5 +56,7 @@ test('the server’s complaints land on their fields, the rest is kept to be sho
   await userEvent.click(screen.getByText('Save'));
   await waitFor(() => expect(screen.getByTestId('error').textContent).toBe('is already taken'));
   expect(screen.getByTestId('stray').textContent).toBe('{"siteId":"is not a site of yours"}');
-  expect(screen.getByTestId('failure').textContent).toBe('Two fields need another look.');
+  expect(screen.getByTestId('failure').textContent).toBe(
+    'Nothing was saved. Look at the marked fields.',
+  );
 });

@@ -5,6 +5,7 @@ import type { FieldPath, FieldValues, UseFormReturn } from 'react-hook-form';
 export interface SubmitState {
   onSubmit: (event: FormEvent) => void;
   busy: boolean;
+  /** The error, or words when fields say what is wrong. */
   failure: unknown;
   /** Complaints about paths no field of this form has. */
   strayFields: Record<string, string>;
@@ -31,8 +32,12 @@ export function useSubmit<Input extends FieldValues, Output extends FieldValues>
     try {
       await send(values);
     } catch (error) {
-      setStrayFields(placeErrors(form, fieldsOf(error)));
-      setFailure(error);
+      const fields = fieldsOf(error);
+      setStrayFields(placeErrors(form, fields));
+      // The fields say it better than a message that names them by their code.
+      setFailure(
+        Object.keys(fields).length > 0 ? 'Nothing was saved. Look at the marked fields.' : error,
+      );
     } finally {
       running.current = false;
       setBusy(false);

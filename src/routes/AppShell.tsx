@@ -1,4 +1,4 @@
-import { Suspense, useEffect } from 'react';
+import { Suspense, useEffect, useRef } from 'react';
 import {
   Link,
   Navigate,
@@ -22,7 +22,10 @@ export function AppShell() {
   const session = useMaybeSession();
   const location = useLocation();
   const moving = useNavigation().state !== 'idle';
+  const firstPath = useRef(location.pathname);
   useEffect(() => {
+    if (firstPath.current === location.pathname) return;
+    firstPath.current = '';
     // Where the pressed link left with its screen, the keyboard goes on in the new one.
     if (document.activeElement === document.body)
       document.getElementById('main')?.focus({ preventScroll: true });
@@ -83,7 +86,7 @@ export function AppShell() {
       <main
         id="main"
         tabIndex={-1}
-        className="mx-auto w-full max-w-[1440px] flex-1 px-4 pt-4 pb-24 md:px-7 md:pt-6 md:pb-12"
+        className="mx-auto w-full max-w-[1440px] flex-1 px-4 focus-visible:outline-none pt-4 pb-24 md:px-7 md:pt-6 md:pb-12"
       >
         <Suspense fallback={<Loading />}>
           <Outlet />

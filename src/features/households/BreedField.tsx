@@ -18,11 +18,13 @@ export function BreedField({
 }) {
   const chosen = breedId ? findBreed(breedId) : null;
   const [typed, setTyped] = useState<string | null>(null);
+  const [left, setLeft] = useState(false);
   const fuse = useMemo(
     () =>
       new Fuse(
         breeds.filter((breed) => breed.species === species),
-        { keys: ['name'], threshold: 0.35, ignoreLocation: true },
+        // Words in any order: "standard poodle" finds "Poodle, standard".
+        { keys: ['name'], threshold: 0.3, ignoreLocation: true, useExtendedSearch: true },
       ),
     [species],
   );
@@ -30,17 +32,22 @@ export function BreedField({
   const found =
     typed === null || typed.trim() === ''
       ? []
-      : fuse.search(typed, { limit: 8 }).map(({ item }) => item);
+      : fuse.search(typed.replace(/[^\p{L}\p{N} ]/gu, ' '), { limit: 8 }).map(({ item }) => item);
   return (
     <Combobox
       label="Breed"
       hint={
         chosen ? undefined : 'A cross that is not listed: leave it empty and give weight and coat.'
       }
-      error={error}
+      error={
+        left && typed?.trim()
+          ? 'Pick one from the list, or empty this and give weight and coat.'
+          : error
+      }
       text={text}
       onText={(next) => {
         setTyped(next);
+        setLeft(false);
         if (next.trim() === '') onPick(null);
       }}
       options={found.map((breed) => ({ key: breed.id, label: breed.name }))}
@@ -48,7 +55,12 @@ export function BreedField({
         onPick(findBreed(key));
         setTyped(null);
       }}
-      onBlur={() => setTyped(null)}
+      onBlur={() => {
+        const exact = found.find(({ name }) => name.toLowerCase() === typed?.trim().toLowerCase());
+        if (exact) onPick(exact);
+        if (exact || !typed?.trim()) setTyped(null);
+        setLeft(true);
+      }}
       emptyWords="No breed like this. Leave it empty and give weight and coat."
       placeholder="Type a few letters"
     />
