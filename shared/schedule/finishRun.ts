@@ -71,7 +71,14 @@ export function isMealDue(van: VanShift, finishSeconds: number): boolean {
   );
 }
 
-const nothingInherited: InheritedAmounts = { overtimeBy: 0, driveBy: 0, mealBy: 0 };
+/** The facts have settled the meal: it has started, or its latest start is behind the van. */
+export function isMealPast(state: WalkState): boolean {
+  const began = state.afterStarted;
+  if (began === null || state.van.meal === null) return false;
+  return began.mealStopId !== null || began.freeSeconds > state.van.meal.latestStartSeconds;
+}
+
+const nothingInherited: InheritedAmounts = { overtimeBy: 0, driveBy: 0 };
 
 function judgeWhole(state: WalkState, finish: number): void {
   const over = amountsOver(state, finish);
@@ -82,10 +89,16 @@ function judgeWhole(state: WalkState, finish: number): void {
   if (over.driveBy > 0)
     breakRule(state, 'driveLimit', null, over.driveBy, over.driveBy <= known.driveBy);
   if (over.mealBy > 0)
-    breakRule(state, 'meal', state.mealStopId, over.mealBy, over.mealBy <= known.mealBy);
+    breakRule(
+      state,
+      'meal',
+      state.mealStopId,
+      over.mealBy,
+      isMealPast(state) || state.afterStarted?.stopsSeen === state.stopsSeen,
+    );
 }
 
-function amountsOver(state: WalkState, finish: number): InheritedAmounts {
+function amountsOver(state: WalkState, finish: number): InheritedAmounts & { mealBy: number } {
   const { van, mealStopId, mealLateBy, driveSeconds } = state;
   const overtime = finish - van.endSeconds - van.mostOvertimeSeconds;
   const drive = van.mostDriveSeconds === null ? 0 : driveSeconds - van.mostDriveSeconds;

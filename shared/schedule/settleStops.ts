@@ -1,5 +1,5 @@
 import type { ReadyDay, ReadyStop } from './compileDay.ts';
-import { finishRun, isMealDue, type RunEnd } from './finishRun.ts';
+import { finishRun, isMealDue, isMealPast, type RunEnd } from './finishRun.ts';
 import { stepRun } from './stepRun.ts';
 import type { RefillPlace, TankKind } from './types.ts';
 import { copyWalk, startWalk, type WalkState } from './walkState.ts';
@@ -49,7 +49,8 @@ export function settleStops(
   if (bare.mendable === 0) return bound && !beats(bare, bound) ? null : bare;
   // What neither meal nor refill mends only grows when they are put in.
   if (bound && bare.hard - bare.mendable > bound.hard) return null;
-  const mayEat = from.van.meal !== null && from.mealStopId === null && !hasMeal(fixed);
+  const mayEat =
+    from.van.meal !== null && from.mealStopId === null && !isMealPast(from) && !hasMeal(fixed);
   // Refills only lengthen a run: a meal due without them is due with them.
   const mustEat = mayEat && isMealDue(from.van, bare.finishSeconds);
   const places = usefulPlaces(day, from);

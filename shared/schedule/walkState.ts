@@ -61,7 +61,6 @@ export interface Begin {
 export interface InheritedAmounts {
   overtimeBy: number;
   driveBy: number;
-  mealBy: number;
 }
 
 /** Where a walk writes its details; the search walks without one. */

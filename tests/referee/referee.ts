@@ -74,7 +74,7 @@ export function judge(problem: DayProblem, plan: Plan): Verdict {
     verdict.finish.set(run.vanId, whole.finish);
     for (const { rule, stop, by, inherited } of whole.breaks) {
       const before =
-        stop === null || rule === 'meal'
+        rule === 'overtime' || rule === 'driveLimit'
           ? (alone?.breaks.find((each) => each.rule === rule)?.by ?? 0)
           : 0;
       if (!inherited && by > 0 && by <= before) continue;
@@ -126,7 +126,7 @@ function walk(problem: DayProblem, van: VanShift, run: Run): Walk {
   let site: string | null = null;
   let risk = { mean: time, variance: 0, third: 0 };
   const used = new Map(van.tanks.map((tank) => [tank.kind, tank.usedAtStartMl]));
-  let meal: { id: string; begin: number } | null = null;
+  let meal: { id: string; begin: number; started: boolean } | null = null;
   let visitsBefore = 0;
   let lastPinned: string | null = null;
   let ahead = false;
@@ -319,7 +319,8 @@ function walk(problem: DayProblem, van: VanShift, run: Run): Walk {
         for (const kind of refill?.kinds ?? []) if (used.has(kind)) used.set(kind, 0);
         if (refill && time > refill.closesSeconds)
           broke('refillHours', stop.id, time - refill.closesSeconds, inherited);
-        if (stop.kind === 'meal' && meal === null) meal = { id: stop.id, begin };
+        if (stop.kind === 'meal' && meal === null)
+          meal = { id: stop.id, begin, started: mine !== null };
       }
       if (stop.kind === 'refill' || stop.kind === 'errand') site = null;
     }
@@ -358,7 +359,7 @@ function walk(problem: DayProblem, van: VanShift, run: Run): Walk {
     if (visit.promise) out.late += Math.round(skewedLoss(risk, visit.promise.endSeconds));
   }
 
-  function judgeMeal(rule: MealRule | null, eaten: { id: string; begin: number } | null): void {
+  function judgeMeal(rule: MealRule | null, eaten: typeof meal): void {
     if (!rule) return;
     const span = out.finish - van.startSeconds;
     if (
@@ -367,9 +368,14 @@ function walk(problem: DayProblem, van: VanShift, run: Run): Walk {
       van.startSeconds > rule.latestStartSeconds
     )
       return;
-    if (!eaten) broke('meal', null, span - rule.dueAfterSeconds, false);
+    const past =
+      out.pushedFrom !== null &&
+      (eaten?.started === true ||
+        out.pushedFrom.time > rule.latestStartSeconds ||
+        leadingStarted(problem, run).length === run.stops.length);
+    if (!eaten) broke('meal', null, span - rule.dueAfterSeconds, past);
     else if (eaten.begin > rule.latestStartSeconds)
-      broke('meal', eaten.id, eaten.begin - rule.latestStartSeconds, false);
+      broke('meal', eaten.id, eaten.begin - rule.latestStartSeconds, past);
   }
 }
 
