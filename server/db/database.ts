@@ -20,18 +20,18 @@ export const database = new Sequelize(env.databaseUrl, {
 });
 
 /**
- * Opens the business's scope and a transaction around `fn`. Inside the same business it joins the
- * transaction already open; another business inside it is a programming error.
+ * Opens the business's scope and a transaction around `fn`, or joins the transaction already open;
+ * another business inside it is a programming error.
  */
 export async function inBusiness<Result>(
   businessId: string,
   fn: () => Promise<Result>,
 ): Promise<Result> {
   const scope = currentScope();
-  if (scope === businessId && hasTransaction()) return fn();
   if (scope !== null && scope !== 'across' && scope !== businessId)
     throw new Error('inBusiness: already inside another business');
-  return withScope(businessId, () => transact(fn));
+  // Joining also matters for rows just written: a second connection would wait for the first.
+  return withScope(businessId, () => (hasTransaction() ? fn() : transact(fn)));
 }
 
 /** A transaction over global tables only (users, sessions): scoped tables still refuse. */

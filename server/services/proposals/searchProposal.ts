@@ -44,7 +44,8 @@ export async function searchProposal(
       seed,
       seconds,
       signal: controller.signal,
-      onProgress: ({ permille }) => void write({ progressPermille: permille }),
+      onProgress: ({ fractionDone }) =>
+        void write({ progressPermille: Math.round(fractionDone * 1000) }),
       onBest: (best) => void write({ plan: best }),
     });
     await write({

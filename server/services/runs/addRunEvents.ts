@@ -54,18 +54,6 @@ export async function addRunEvents(
   return run;
 }
 
-/** A text still waiting when the van is already there would only confuse. */
-async function dropLateTexts(happened: RunHappened, now: Date): Promise<void> {
-  for (const stop of happened.stops.values())
-    if (stop.state !== 'driving' && stop.state !== 'ahead')
-      await dropTexts({
-        visitId: stop.stopId,
-        kinds: ['onTheWay'],
-        reason: 'The van had arrived before the text could go.',
-        now,
-      });
-}
-
 /** Every version ever sent counts: a phone may still be working an older one. */
 async function refuseUnknownStops(run: Run, events: PhoneEvent[]): Promise<void> {
   const versions = await RunVersion.findAll({
