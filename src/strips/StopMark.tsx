@@ -61,7 +61,7 @@ export const StopMark = memo(function StopMark(props: StopMarkProps) {
               faded={stop.state === 'done'}
               letters={axis.pxPerSecond * 3600 > 180}
             />
-            <StopLabel {...props} x={x} />
+            <StopLabel {...props} x={x} width={width} />
           </>
         ) : (
           <PauseMark stop={stop} row={row} axis={axis} />
@@ -109,9 +109,11 @@ function StopGround(props: StopMarkProps & { x: number; width: number }) {
   );
 }
 
-function StopLabel(props: StopMarkProps & { x: number }) {
+function StopLabel(props: StopMarkProps & { x: number; width: number }) {
   const { day, stop, row, axis, x } = props;
-  const room = Math.max(24, xOf(axis, props.roomToSeconds) - x - 10);
+  // Inside its dashed edge a moved stop keeps its words to itself.
+  const untilNext = xOf(axis, props.roomToSeconds) - x - 10;
+  const room = Math.max(24, props.moved ? Math.min(untilNext, props.width - 2) : untilNext);
   const mark =
     stop.state === 'done' ? '✓ ' : stop.state === 'failed' ? '✕ ' : stop.pinned ? '⚲ ' : '';
   const words = stopWords(day, stop, props.shiftSeconds);

@@ -83,7 +83,7 @@ function ShiftGround({ strip, row, axis }: { strip: Strip; row: StripRow; axis: 
       ))}
       {finish > end + 1 && (
         <g>
-          <rect x={end} y={y - 14} width={finish - end} height={14} fill={over} />
+          <rect x={end} y={y + 2} width={finish - end} height={5} fill={over} />
           <text
             x={finish + 4}
             y={y - 4}

@@ -3,6 +3,7 @@ import type { Day } from '#shared/api/days.ts';
 import { evaluateDay } from '#shared/schedule/evaluateDay.ts';
 import { useCan, useSession } from '#src/api/sessionStore.ts';
 import { Button } from '#src/components/Button.tsx';
+import { CatchBoundary } from '#src/components/CatchBoundary.tsx';
 import { Tabs } from '#src/components/Tabs.tsx';
 import { writeDistance } from '#src/lib/measures.ts';
 import { writeCount } from '#src/lib/words.ts';
@@ -117,17 +118,19 @@ export function DayBoard({
     />
   );
   const map = (
-    <Suspense fallback={<div className="card h-full animate-pulse bg-linen" />}>
-      <DayMap
-        day={day}
-        times={shown.times}
-        shapes={shown.marks}
-        nowSeconds={nowSeconds}
-        highlightedStopId={highlighted}
-        onHighlight={setHighlighted}
-        onOpenVisit={openVisit}
-      />
-    </Suspense>
+    <CatchBoundary instead={<MapMissing />}>
+      <Suspense fallback={<div className="card h-full animate-pulse bg-linen" />}>
+        <DayMap
+          day={day}
+          times={shown.times}
+          shapes={shown.marks}
+          nowSeconds={nowSeconds}
+          highlightedStopId={highlighted}
+          onHighlight={setHighlighted}
+          onOpenVisit={openVisit}
+        />
+      </Suspense>
+    </CatchBoundary>
   );
 
   return (
@@ -201,6 +204,14 @@ export function DayBoard({
         readAgain={readAgain}
       />
     </>
+  );
+}
+
+function MapMissing() {
+  return (
+    <div className="card grid h-full min-h-40 place-items-center p-6 text-center text-slate">
+      The map could not be loaded. The strips work without it; reload the page to try again.
+    </div>
   );
 }
 

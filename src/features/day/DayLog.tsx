@@ -1,7 +1,6 @@
 import type { Day } from '#shared/api/days.ts';
-import { formatWall } from '#shared/time/formatWall.ts';
-import { instantToSeconds } from '#shared/time/wallSeconds.ts';
 import { Card } from '#src/components/Card.tsx';
+import { momentWords } from './sentWords.ts';
 
 /** Who changed what, latest first. */
 export function DayLog({ day }: { day: Day }) {
@@ -12,12 +11,10 @@ export function DayLog({ day }: { day: Day }) {
         {day.log
           .toSorted((a, b) => b.at.localeCompare(a.at))
           .map((entry) => (
-            <li key={entry.id} className="flex gap-3 py-[7px]">
-              <span className="w-11 shrink-0 text-slate">
-                {formatWall(day.problem, instantToSeconds(day.problem.dayStartUtc, entry.at))}
-              </span>
-              <span>
-                {entry.words} <span className="text-slate">· {entry.who}</span>
+            <li key={entry.id} className="flex justify-between gap-4 py-[7px]">
+              <span>{entry.words}</span>
+              <span className="shrink-0 text-sm text-slate">
+                {entry.who} · {momentWords(day.problem, entry.at)}
               </span>
             </li>
           ))}

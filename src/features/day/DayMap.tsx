@@ -66,7 +66,7 @@ export function DayMap({
                 line={leg.line}
                 colour={paintOf(day, run).color}
                 dash={paintOf(day, run).dash}
-                faint={leg.rough || legIsDriven(run, at)}
+                faint={leg.rough || (nowSeconds !== null && legIsDriven(day, run, at))}
               />
             ))
           : points.length > 1 && (
@@ -86,6 +86,7 @@ export function DayMap({
           day={day}
           run={run}
           shape={shapes.get(run.vanId)?.shape ?? 'circle'}
+          underWay={nowSeconds !== null}
           highlightedStopId={highlightedStopId}
           onHighlight={onHighlight}
           onOpenVisit={onOpenVisit}
@@ -110,6 +111,7 @@ function RunStops({
   day,
   run,
   shape,
+  underWay,
   highlightedStopId,
   onHighlight,
   onOpenVisit,
@@ -117,6 +119,8 @@ function RunStops({
   day: Day;
   run: RunTimes;
   shape: string;
+  /** The day is today: what is behind is quieter. */
+  underWay: boolean;
   highlightedStopId: string | null;
   onHighlight: (stopId: string | null) => void;
   onOpenVisit: (visitId: string) => void;
@@ -137,7 +141,7 @@ function RunStops({
           lon={point.lon}
           label={`Stop ${index + 1} of ${van?.vanName ?? 'the van'}, ${label}`}
           selected={highlightedStopId === stop.stopId}
-          muted={stop.state === 'done' || stop.state === 'failed'}
+          muted={underWay && (stop.state === 'done' || stop.state === 'failed')}
           onSelect={() => onOpenVisit(stop.stopId)}
         />
       </Hover>
@@ -230,10 +234,15 @@ function paintOf(day: Day, run: RunTimes) {
   return vanPaint(day.problem.vans.findIndex((van) => van.vanId === run.vanId));
 }
 
-/** Legs and stops with a place of their own go in step; those whose stop is behind are faint. */
-function legIsDriven(run: RunTimes, leg: number): boolean {
-  const driven = run.stops.filter((stop) => stop.driveSeconds > 0)[leg];
-  return driven !== undefined && driven.state !== 'ahead' && driven.state !== 'driving';
+/** While the day runs, legs to stops that are behind are faint; the way home never is. */
+function legIsDriven(day: Day, run: RunTimes, leg: number): boolean {
+  let at = day.problem.vans.find((van) => van.vanId === run.vanId)?.startPoint;
+  const reached = run.stops.filter((stop) => {
+    const moves = stop.point !== at;
+    at = stop.point;
+    return moves;
+  })[leg];
+  return reached !== undefined && reached.state !== 'ahead' && reached.state !== 'driving';
 }
 
 function placesOf(day: Day): [number, number][] {

@@ -8,7 +8,12 @@ import { writeDate } from '#src/lib/words.ts';
 export function sentWords(day: DayClock & { date: string }, run: DayRun): string | null {
   if (run.sentAt === null) return null;
   if (run.changedSinceSent) return 'changed since sent';
-  const on = localDateAt(run.sentAt, day.timeZone);
-  const at = formatWall(day, instantToSeconds(day.dayStartUtc, run.sentAt));
-  return on === day.date ? `sent ${at}` : `sent ${writeDate(on, 'short')} ${at}`;
+  return `sent ${momentWords(day, run.sentAt)}`;
+}
+
+/** "7:12" of the day's own date, "Mon 13 Apr 18:40" of another. */
+export function momentWords(day: DayClock & { date: string }, instant: string): string {
+  const on = localDateAt(instant, day.timeZone);
+  const at = formatWall(day, instantToSeconds(day.dayStartUtc, instant));
+  return on === day.date ? at : `${writeDate(on, 'short')} ${at}`;
 }
