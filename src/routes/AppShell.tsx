@@ -15,7 +15,8 @@ import { OfflineBanner } from '#src/components/OfflineBanner.tsx';
 import { ToastRegion } from '#src/components/ToastRegion.tsx';
 import { AccountMenu } from './AccountMenu.tsx';
 import { navIcons } from './navIcons.tsx';
-import { navItems } from './navItems.ts';
+import { mayOpen, navItems } from './navItems.ts';
+import { NotAllowedScreen } from './NotAllowedScreen.tsx';
 
 /** Around every screen behind the sign-in: brand, navigation by abilities, account, messages. */
 export function AppShell() {
@@ -89,7 +90,7 @@ export function AppShell() {
         className="mx-auto w-full max-w-[1440px] flex-1 px-4 focus-visible:outline-none pt-4 pb-24 md:px-7 md:pt-6 md:pb-12"
       >
         <Suspense fallback={<Loading />}>
-          <Outlet />
+          {mayOpen(location.pathname, session.abilities) ? <Outlet /> : <NotAllowedScreen />}
         </Suspense>
       </main>
       {items.length > 1 && (

@@ -1,7 +1,7 @@
 import { expect, test } from 'vitest';
 import { abilitiesOf } from '#shared/api/abilities.ts';
 import type { Role } from '#shared/api/values.ts';
-import { navItems } from './navItems.ts';
+import { mayOpen, navItems } from './navItems.ts';
 
 const words = (roles: Role[], worksInVan: boolean) =>
   navItems(abilitiesOf(roles), worksInVan).map((item) => item.words);
@@ -21,4 +21,12 @@ test('a one-van owner has it all, the run included', () => {
     'Review',
     'Setup',
   ]);
+});
+
+test('an address opens only for those whose navigation could lead there', () => {
+  expect(mayOpen('/households/new', abilitiesOf(['groomer']))).toBe(false);
+  expect(mayOpen('/run/0190a000', abilitiesOf(['groomer']))).toBe(true);
+  expect(mayOpen('/review', abilitiesOf(['dispatcher']))).toBe(false);
+  expect(mayOpen('/', abilitiesOf(['groomer']))).toBe(true);
+  expect(mayOpen('/runner', abilitiesOf(['groomer']))).toBe(true);
 });

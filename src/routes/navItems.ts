@@ -27,3 +27,9 @@ export function navItems(abilities: readonly string[], worksInVan: boolean): Nav
     .filter((item) => item.to !== '/run' || worksInVan || !abilities.includes('days.read'))
     .map(({ to, words, icon }) => ({ to, words, icon }));
 }
+
+/** Whether these abilities open an address; addresses outside the navigation are open to all. */
+export function mayOpen(pathname: string, abilities: readonly string[]): boolean {
+  const item = all.find(({ to }) => pathname === to || pathname.startsWith(`${to}/`));
+  return !item || abilities.includes(item.ability);
+}

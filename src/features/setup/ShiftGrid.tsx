@@ -92,9 +92,7 @@ function ShiftCell({
       <span className="block text-sm">
         {writeTime(shift.startMinutes)}–{writeTime(shift.endMinutes)}
       </span>
-      {shift.meal && (
-        <span className="block text-[13px] text-slate">meal {shift.meal.lengthMinutes} min</span>
-      )}
+      {shift.meal && <span className="block text-[13px]">meal {shift.meal.lengthMinutes} min</span>}
     </>
   ) : (
     <span className="text-slate">free</span>
@@ -107,14 +105,13 @@ function ShiftCell({
     <button
       type="button"
       className={`${look} ${shift ? 'hover:bg-[#c6dcd5]' : 'hover:bg-linen'}`}
-      aria-label={`${van.name}, ${writeDate(date)}: ${
-        shift
-          ? `${groomer}, ${writeTime(shift.startMinutes)} to ${writeTime(shift.endMinutes)}. Change the shift`
-          : 'free. Add a shift'
-      }`}
       onClick={() => onOpen(date, van.id, shift)}
     >
+      <span className="sr-only">
+        {van.name}, {writeDate(date)}:{' '}
+      </span>
       {words}
+      <span className="sr-only">{shift ? '. Change the shift' : '. Add a shift'}</span>
     </button>
   );
 }
