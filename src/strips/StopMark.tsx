@@ -114,16 +114,26 @@ function StopLabel(props: StopMarkProps & { x: number; width: number }) {
   // Inside its dashed edge a moved stop keeps its words to itself.
   const untilNext = xOf(axis, props.roomToSeconds) - x - 10;
   const room = Math.max(24, props.moved ? Math.min(untilNext, props.width - 2) : untilNext);
-  const mark =
-    stop.state === 'done' ? '✓ ' : stop.state === 'failed' ? '✕ ' : stop.pinned ? '⚲ ' : '';
+  const mark = stop.state === 'done' ? '✓ ' : stop.state === 'failed' ? '✕ ' : '';
+  const pinned = stop.pinned && mark === '';
+  const y = row.baseline + (row.compact ? 15 : 17);
   const words = stopWords(day, stop, props.shiftSeconds);
   const color = stop.atRisk || stop.state === 'failed' ? 'var(--rosette)' : 'var(--slate)';
   const shifted = !stop.atRisk && Math.abs(props.shiftSeconds) >= 90 && stop.state === 'ahead';
   return (
     <g pointerEvents="none">
+      {pinned && (
+        <path
+          d={`M${x + 4.5} ${y - 10}a3.2 3.2 0 1 1 0 6.4a3.2 3.2 0 1 1 0 -6.4M${x + 4.5} ${y - 3.6}V${y + 1}`}
+          fill="var(--collar)"
+          stroke="var(--collar)"
+          strokeWidth={1.3}
+          strokeLinecap="round"
+        />
+      )}
       <text
-        x={x + 1}
-        y={row.baseline + (row.compact ? 15 : 17)}
+        x={x + (pinned ? 11 : 1)}
+        y={y}
         fontSize={row.compact ? 12 : 13.5}
         fontWeight={600}
         fill={row.compact && stop.atRisk ? 'var(--rosette)' : 'var(--ink)'}

@@ -10,7 +10,7 @@ import { knockOnRows } from './knockOnRows.ts';
 import { moveWords } from './moveWords.ts';
 import { NotPlacedCard } from './NotPlacedCard.tsx';
 import { ProposalCard, type ProposalView } from './ProposalCard.tsx';
-import { movedVisits, proposalRows } from './proposalRows.ts';
+import { movedVisits, placedAndTakenOff, proposalRows } from './proposalRows.ts';
 import type { useBoardMoves } from './useBoardMoves.ts';
 import type { DayChange } from './useDayChange.ts';
 import { useNotPlacedReasons } from './useNotPlacedReasons.ts';
@@ -76,6 +76,7 @@ export function DaySide({
               : []
           }
           movedCount={offered ? movedVisits(plan, offered.plan).size : 0}
+          {...(offered ? placedAndTakenOff(problem, plan, offered.plan) : noChange)}
           view={view}
           notice={proposal.notice}
           busy={proposal.busy}
@@ -111,3 +112,5 @@ export function DaySide({
     </div>
   );
 }
+
+const noChange = { takenOff: [], placed: [] };

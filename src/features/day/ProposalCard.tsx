@@ -1,6 +1,7 @@
 import { Button } from '#src/components/Button.tsx';
 import { Segmented } from '#src/components/Segmented.tsx';
 import type { Proposal } from '#shared/api/days.ts';
+import { writeList } from '#src/lib/words.ts';
 import { Notice } from './KnockOnCard.tsx';
 import type { ProposalRow } from './proposalRows.ts';
 
@@ -11,6 +12,8 @@ export function ProposalCard({
   proposal,
   rows,
   movedCount,
+  takenOff,
+  placed,
   view,
   notice,
   busy,
@@ -22,6 +25,9 @@ export function ProposalCard({
   proposal: Proposal;
   rows: readonly ProposalRow[];
   movedCount: number;
+  /** Visits in words that leave the vans, and that come onto one. */
+  takenOff: readonly string[];
+  placed: readonly string[];
   view: ProposalView;
   notice: string | null;
   busy: boolean;
@@ -54,6 +60,12 @@ export function ProposalCard({
         <>
           {working && <p className="mt-2 text-sm text-slate">Best so far</p>}
           <Numbers rows={rows} />
+          {takenOff.length > 0 && (
+            <p className="pt-2 font-semibold text-rosette">
+              ▲ Leaves the vans: {writeList(takenOff)}
+            </p>
+          )}
+          {placed.length > 0 && <p className="pt-1">Comes onto a van: {writeList(placed)}</p>}
           <p className="pt-2 text-sm text-slate">
             {movedCount === 0
               ? 'No visit moves.'

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { applyMove } from '#shared/schedule/applyMove.ts';
 import { evaluateDay } from '#shared/schedule/evaluateDay.ts';
-import { movedVisits, proposalRows } from './proposalRows.ts';
+import { movedVisits, placedAndTakenOff, proposalRows } from './proposalRows.ts';
 import { sampleDay, uuid } from './sampleDay.ts';
 
 const { problem, plan } = sampleDay();
@@ -37,5 +37,23 @@ describe('movedVisits', () => {
     }).plan;
     expect([...movedVisits(plan, moved)].sort()).toEqual([juniper, wren].sort());
     expect(movedVisits(plan, plan).size).toBe(0);
+  });
+});
+
+describe('placedAndTakenOff', () => {
+  it('names who leaves the vans, with the promise, and who joins', () => {
+    const juniper = problem.visits.find((visit) => visit.label === 'Juniper')!.id;
+    const biscuit = problem.visits.find((visit) => visit.label === 'Biscuit')!.id;
+    const off = applyMove(problem, plan, { kind: 'unplaceVisit', visitId: juniper }).plan;
+    const swapped = applyMove(problem, off, {
+      kind: 'placeVisit',
+      visitId: biscuit,
+      vanId: uuid(100),
+      index: 2,
+    }).plan;
+    expect(placedAndTakenOff(problem, plan, swapped)).toEqual({
+      takenOff: ['Juniper (promised 12:00–14:00)'],
+      placed: ['Biscuit'],
+    });
   });
 });

@@ -1,5 +1,5 @@
 import type { DayProblem, DayTimes, Plan } from '#shared/schedule/types.ts';
-import { formatWall } from '#shared/time/formatWall.ts';
+import { formatWall, formatWallRange } from '#shared/time/formatWall.ts';
 import { writeDistance, type DistanceUnit } from '#src/lib/measures.ts';
 import { writeSpan } from '#src/lib/words.ts';
 
@@ -57,6 +57,26 @@ export function proposalRows(
     ),
     row('Last van finishes', last, (seconds) => formatWall(problem, seconds)),
   ];
+}
+
+/** Visits the offer takes off the vans, and those it puts on one, with what they were promised. */
+export function placedAndTakenOff(
+  problem: DayProblem,
+  now: Plan,
+  offered: Plan,
+): { takenOff: string[]; placed: string[] } {
+  const words = (visitId: string) => {
+    const visit = problem.visits.find((one) => one.id === visitId);
+    if (!visit?.promise) return visit?.label ?? '';
+    const { startSeconds, endSeconds } = visit.promise;
+    return `${visit.label} (promised ${formatWallRange(problem, startSeconds, endSeconds)})`;
+  };
+  const minus = (one: string[], other: string[]) =>
+    one.filter((visitId) => !other.includes(visitId)).map(words);
+  return {
+    takenOff: minus(offered.notPlaced, now.notPlaced),
+    placed: minus(now.notPlaced, offered.notPlaced),
+  };
 }
 
 /** Visits whose van or neighbours change, for drawing them as moved. */

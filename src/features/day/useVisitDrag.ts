@@ -72,6 +72,10 @@ export function useVisitDrag(
       const hold = (touch: TouchEvent) => {
         if (active) touch.preventDefault();
       };
+      // A finger that rests would otherwise open the browser's own menu over the visit in hand.
+      const menu = (asked: Event) => {
+        if (pointerType === 'touch') asked.preventDefault();
+      };
       const end = (dropped: boolean) => {
         clearTimeout(wait);
         window.removeEventListener('pointermove', move);
@@ -79,6 +83,7 @@ export function useVisitDrag(
         window.removeEventListener('pointercancel', up);
         window.removeEventListener('keydown', key, true);
         window.removeEventListener('touchmove', hold);
+        window.removeEventListener('contextmenu', menu);
         document.body.style.cursor = '';
         stop.current = null;
         if (active) endedAt.current = performance.now();
@@ -91,6 +96,7 @@ export function useVisitDrag(
       window.addEventListener('pointercancel', up);
       window.addEventListener('keydown', key, true);
       window.addEventListener('touchmove', hold, { passive: false });
+      window.addEventListener('contextmenu', menu);
     },
     [strips, onDrop],
   );
