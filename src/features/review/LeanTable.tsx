@@ -1,10 +1,15 @@
+import { useState } from 'react';
 import type { Review } from '#shared/api/review.ts';
+import { Button } from '#src/components/Button.tsx';
 import { leanWords } from './reviewWords.ts';
 
 /** A lean of this much or more is worth a look. */
 const notablePercent = 8;
+const shownAtFirst = 6;
 
+/** Largest leans first; the small ones wait behind a button. */
 export function LeanTable({ leans }: { leans: Review['leans'] }) {
+  const [all, setAll] = useState(false);
   if (leans.length === 0)
     return <p className="text-slate">Leans show once finished visits can be compared.</p>;
   const sorted = leans.toSorted(
@@ -24,7 +29,7 @@ export function LeanTable({ leans }: { leans: Review['leans'] }) {
           </tr>
         </thead>
         <tbody>
-          {sorted.map((lean) => {
+          {sorted.slice(0, all ? undefined : shownAtFirst).map((lean) => {
             const far =
               Math.abs(Math.round(lean.leanPermille / 10)) >= notablePercent && lean.visits >= 3;
             return (
@@ -44,6 +49,11 @@ export function LeanTable({ leans }: { leans: Review['leans'] }) {
           })}
         </tbody>
       </table>
+      {sorted.length > shownAtFirst && (
+        <Button kind="quiet" size="small" className="mt-1" onClick={() => setAll(!all)}>
+          {all ? 'Only the largest' : `All ${sorted.length}`}
+        </Button>
+      )}
     </div>
   );
 }

@@ -7,7 +7,7 @@ export function LinkedWords({ text }: { text: string }) {
       <a
         key={index}
         href={part.href}
-        className="font-semibold break-all text-inherit underline underline-offset-3"
+        className="font-semibold wrap-anywhere text-inherit underline underline-offset-3"
       >
         {part.words}
       </a>
