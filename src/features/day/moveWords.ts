@@ -15,9 +15,10 @@ export function moveWords(problem: DayProblem, plan: Plan, move: Move): string {
   if (move.kind === 'replacePlan' || move.kind === 'swapRuns') return 'Runs change places';
   const label = problem.visits.find((visit) => visit.id === move.visitId)?.label ?? 'The visit';
   const verb = label.includes(' & ') ? ['move', 'leave'] : ['moves', 'leaves'];
-  return move.kind === 'unplaceVisit'
-    ? `${label} ${verb[1]} the vans, not placed`
-    : `${label} ${verb[0]} to ${targetWords(problem, plan, move)}`;
+  if (move.kind === 'unplaceVisit') return `${label} ${verb[1]} the vans, not placed`;
+  const target = targetWords(problem, plan, move);
+  const stays = placeOf(plan, move.visitId)?.vanId === move.vanId;
+  return `${label} ${verb[0]} ${stays ? 'within' : 'to'} ${target}`;
 }
 
 /** Ids of a van's visits in order, without the one being moved: what a move's index counts. */

@@ -47,8 +47,7 @@ export function useVisitDrag(
           target = next;
           setDragging({ visitId, target });
         }
-        if (ghost.current)
-          ghost.current.style.transform = `translate(${last.x + 14}px, ${last.y + 12}px)`;
+        if (ghost.current) placeGhost(ghost.current, last.x, last.y);
       };
       const move = (moved: globalThis.PointerEvent) => {
         if (moved.pointerId !== pointerId) return;
@@ -102,6 +101,13 @@ export function useVisitDrag(
   );
   const endedJustNow = useCallback(() => performance.now() - endedAt.current < 80, []);
   return { dragging, ghost, start, endedJustNow };
+}
+
+/** Beside the pointer, and whole within the window. */
+function placeGhost(ghost: HTMLElement, x: number, y: number): void {
+  const left = Math.min(x + 14, window.innerWidth - ghost.offsetWidth - 8);
+  const top = Math.min(y + 14, window.innerHeight - ghost.offsetHeight - 8);
+  ghost.style.transform = `translate(${Math.max(8, left)}px, ${Math.max(8, top)}px)`;
 }
 
 function targetUnder(
