@@ -41,8 +41,8 @@ export function ArrivalMap({
       <figcaption className="px-4 py-2.5 text-[15px] leading-snug">
         <b>{arrival.vanName}</b>{' '}
         <span className="text-slate">
-          {expected ? '(dashed ring) ' : ''}
           {van.words}
+          {expected && ' (dashed ring)'}
         </span>
       </figcaption>
     </figure>
