@@ -11,7 +11,7 @@ export function ErrorNote({
 }: {
   error: unknown;
   title?: string;
-  onRetry?: () => void;
+  onRetry?: (() => void) | undefined;
   retry?: string;
   className?: string;
 }) {

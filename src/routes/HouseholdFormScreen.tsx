@@ -1,11 +1,11 @@
 import { useQuery } from '@tanstack/react-query';
 import { useNavigate, useParams } from 'react-router-dom';
 import { householdQueries, useCreateHousehold, useUpdateHousehold } from '#src/api/households.ts';
-import { ErrorNote } from '#src/components/ErrorNote.tsx';
 import { Loading } from '#src/components/Loading.tsx';
 import { PageHeader } from '#src/components/PageHeader.tsx';
 import { toast } from '#src/components/toast.ts';
 import { HouseholdForm } from '#src/features/households/HouseholdForm.tsx';
+import { FailedQuery } from './FailedQuery.tsx';
 
 /** A household to write: a new one, or the one in the address. */
 export function HouseholdFormScreen() {
@@ -37,7 +37,15 @@ function EditHousehold({ householdId }: { householdId: string }) {
   const update = useUpdateHousehold();
   const found = useQuery(householdQueries.one(householdId));
   if (found.isPending) return <Loading lines={8} />;
-  if (found.isError) return <ErrorNote error={found.error} onRetry={() => found.refetch()} />;
+  if (found.isError)
+    return (
+      <FailedQuery
+        title="This household does not open"
+        error={found.error}
+        back={{ to: '/households', words: 'Households' }}
+        onRetry={() => found.refetch()}
+      />
+    );
   const { household } = found.data;
   const back = `/households/${householdId}`;
   return (

@@ -6,7 +6,6 @@ import { useToday } from '#src/api/session.ts';
 import { useCan } from '#src/api/sessionStore.ts';
 import { Button } from '#src/components/Button.tsx';
 import { ButtonLink } from '#src/components/ButtonLink.tsx';
-import { ErrorNote } from '#src/components/ErrorNote.tsx';
 import { Loading } from '#src/components/Loading.tsx';
 import { PageHeader } from '#src/components/PageHeader.tsx';
 import { BookVisitDialog } from '#src/features/booking/BookVisitDialog.tsx';
@@ -14,6 +13,7 @@ import { CancelVisitDialog } from '#src/features/booking/CancelVisitDialog.tsx';
 import { DoorCard } from '#src/features/households/DoorCard.tsx';
 import { HouseholdVisits } from '#src/features/households/HouseholdVisits.tsx';
 import { PetCards } from '#src/features/households/PetCards.tsx';
+import { FailedQuery } from './FailedQuery.tsx';
 
 /** A household: door, people, pets, visits, and booking one. */
 export function HouseholdScreen() {
@@ -26,7 +26,15 @@ export function HouseholdScreen() {
   const [booking, setBooking] = useState(false);
   const [cancelling, setCancelling] = useState<{ id: string; date: string } | null>(null);
   if (found.isPending) return <Loading lines={8} />;
-  if (found.isError) return <ErrorNote error={found.error} onRetry={() => found.refetch()} />;
+  if (found.isError)
+    return (
+      <FailedQuery
+        title="This household does not open"
+        error={found.error}
+        back={{ to: '/households', words: 'Households' }}
+        onRetry={() => found.refetch()}
+      />
+    );
   const { household, pets, visits } = found.data;
   const site = sites.data?.find((one) => one.id === household.siteId) ?? null;
   const bookable = pets.filter((pet) => pet.active);

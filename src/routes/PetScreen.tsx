@@ -5,13 +5,13 @@ import { householdQueries } from '#src/api/households.ts';
 import { petQueries, useCreatePet, useUpdatePet } from '#src/api/pets.ts';
 import { useToday } from '#src/api/session.ts';
 import { Chip } from '#src/components/Chip.tsx';
-import { ErrorNote } from '#src/components/ErrorNote.tsx';
 import { Loading } from '#src/components/Loading.tsx';
 import { PageHeader } from '#src/components/PageHeader.tsx';
 import { toast } from '#src/components/toast.ts';
 import { PastVisits } from '#src/features/households/PastVisits.tsx';
 import { PetForm } from '#src/features/households/PetForm.tsx';
 import { RestPet } from '#src/features/households/RestPet.tsx';
+import { FailedQuery } from './FailedQuery.tsx';
 
 /** One pet: its facts, its style, what it takes. Without a pet in the address, a new one. */
 export function PetScreen() {
@@ -53,7 +53,15 @@ function KnownPet({ householdId, petId }: { householdId: string; petId: string }
   const update = useUpdatePet();
   const found = useQuery(petQueries.one(petId));
   if (found.isPending) return <Loading lines={8} />;
-  if (found.isError) return <ErrorNote error={found.error} onRetry={() => found.refetch()} />;
+  if (found.isError)
+    return (
+      <FailedQuery
+        title="This pet does not open"
+        error={found.error}
+        back={{ to: `/households/${householdId}`, words: 'Household' }}
+        onRetry={() => found.refetch()}
+      />
+    );
   const { pet, past, householdName } = found.data;
   const back = `/households/${householdId}`;
   return (

@@ -1,9 +1,9 @@
-import { useMemo } from 'react';
+import { useMemo, useState } from 'react';
 import { Controller } from 'react-hook-form';
 import { Link, Navigate, useNavigate } from 'react-router-dom';
 import { signUp } from '#shared/api/session.ts';
 import { useSignUp } from '#src/api/session.ts';
-import { useMaybeSession } from '#src/api/sessionStore.ts';
+import { readSession } from '#src/api/sessionStore.ts';
 import { Button } from '#src/components/Button.tsx';
 import { Card } from '#src/components/Card.tsx';
 import { FormErrors } from '#src/components/FormErrors.tsx';
@@ -17,7 +17,8 @@ import { useZodForm } from '#src/lib/useZodForm.ts';
 
 /** A new business and its operator. */
 export function SignUpScreen() {
-  const session = useMaybeSession();
+  // Only at the start: the sign-in this form brings goes on to the set-up.
+  const [cameSignedIn] = useState(readSession() !== null);
   const navigate = useNavigate();
   const create = useSignUp();
   const here = useMemo(() => detectPlace(), []);
@@ -35,7 +36,7 @@ export function SignUpScreen() {
     await create.mutateAsync({ body });
     navigate('/setup/business', { replace: true });
   });
-  if (session && !submit.busy) return <Navigate to="/" replace />;
+  if (cameSignedIn) return <Navigate to="/" replace />;
   const { errors } = form.formState;
   return (
     <>
