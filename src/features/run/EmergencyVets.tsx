@@ -11,9 +11,7 @@ export function EmergencyVets({ vets }: { vets: readonly EmergencyVet[] }) {
         <li key={vet.id} className="flex items-center justify-between gap-3 py-1.5 leading-snug">
           <span>
             {vet.name}
-            {vet.hoursWords && (
-              <span className="block text-[15px] text-slate">{vet.hoursWords}</span>
-            )}
+            {vet.hoursWords && <span className="block text-[15px]">{vet.hoursWords}</span>}
           </span>
           {vet.phone && (
             <a

@@ -68,6 +68,8 @@ function StopRow({ view, stop }: { view: RunView; stop: RunStop }) {
   const over = stop.state === 'done' || stop.state === 'failed';
   const failed = stop.happened?.fact.failedReason;
   const current = view.current === stop;
+  // Slate on the highlight would be 4.3 : 1, too pale in the sun.
+  const dim = current ? '' : 'text-slate';
   return (
     <li
       aria-current={current ? 'step' : undefined}
@@ -79,11 +81,11 @@ function StopRow({ view, stop }: { view: RunView; stop: RunStop }) {
       <span className="min-w-0 flex-1">
         <span className={over ? 'text-slate' : 'font-semibold'}>{stop.title}</span>
         {stop.addressLabel && (
-          <span className="block text-[15px] text-slate">{stop.addressLabel}</span>
+          <span className={`block text-[15px] ${dim}`}>{stop.addressLabel}</span>
         )}
         {stop.promise && (
           <span className="block text-[15px]">
-            <span className="text-slate">
+            <span className={dim}>
               promised{' '}
               {formatWallRange(
                 view.problem,
@@ -100,7 +102,7 @@ function StopRow({ view, stop }: { view: RunView; stop: RunStop }) {
           </span>
         )}
       </span>
-      <span className="shrink-0 text-[15px] text-slate">
+      <span className={`shrink-0 text-[15px] ${dim}`}>
         {stop.state === 'done'
           ? `✓ ${formatWall(view.problem, stop.times.endSeconds)}`
           : stop.state === 'failed'

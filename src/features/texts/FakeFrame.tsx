@@ -22,14 +22,16 @@ export function FakeFrame({
   const off = error instanceof ApiError && error.code === 'notFound';
   return (
     <>
-      <p
-        className="px-4 py-2 text-center text-[15px] font-semibold text-ink"
-        style={{
-          background: 'repeating-linear-gradient(-45deg, #fbf0d6 0 14px, #f3dfae 14px 28px)',
-        }}
-      >
-        Fake for development: {said}
-      </p>
+      <header>
+        <p
+          className="px-4 py-2 text-center text-[15px] font-semibold text-ink"
+          style={{
+            background: 'repeating-linear-gradient(-45deg, #fbf0d6 0 14px, #f3dfae 14px 28px)',
+          }}
+        >
+          Fake for development: {said}
+        </p>
+      </header>
       <main className="mx-auto max-w-[1440px] px-4 py-5 md:px-7">
         <div className="mb-4 flex flex-wrap items-center gap-x-5 gap-y-2">
           <CombMark />

@@ -64,7 +64,7 @@ function Phone({ phone }: { phone: FakePhone }) {
           >
             <LinkedWords text={text.body} />
             <span
-              className={`mt-1 block text-xs ${text.direction === 'out' ? 'text-slate' : 'text-white'}`}
+              className={`mt-1 block text-xs ${text.direction === 'out' ? 'text-ink' : 'text-white'}`}
             >
               {new Date(text.at).toLocaleTimeString('en-GB')} · {text.status}
             </span>

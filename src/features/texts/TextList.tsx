@@ -89,7 +89,7 @@ function TextRow({ text }: { text: TextLine }) {
           inbound ? 'mr-6 bg-linen' : 'ml-6 bg-collar-soft md:ml-0'
         }`}
       >
-        <span className="block text-[13px] text-slate">
+        <span className="block text-[13px]">
           {inbound ? `‹ from them` : `to them ›`} · {textKindWords(text.kind)}
         </span>
         {text.body ? <LinkedWords text={text.body} /> : <i>no words</i>}
