@@ -7,7 +7,8 @@ export function OfflineBanner() {
     <div role="status" aria-live="polite">
       {!online && (
         <p className="bg-ink px-4 py-2 text-center text-[15px] text-white">
-          No network. What is on the screen may be old; changes wait until it is back.
+          No network. What you see may be old, and nothing is saved until it is back; taps on a run
+          are kept.
         </p>
       )}
     </div>
