@@ -20,7 +20,8 @@ export default defineConfig({
   server: {
     host: '127.0.0.1',
     proxy: Object.fromEntries(
-      ['/api', '/tiles', '/a/', '/fake'].map((path) => [
+      // Tiles only below an area and version: /tiles/layers.ts is a module of the client.
+      ['/api', '^/tiles/[^/]+/[^/]+/', '/a/', '/hooks'].map((path) => [
         path,
         { target: process.env.FURLONG_DEV_SERVER ?? 'http://127.0.0.1:4173' },
       ]),

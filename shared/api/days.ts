@@ -43,7 +43,7 @@ export type Day = z.infer<typeof day>;
 export type DayRun = z.infer<typeof dayRun>;
 
 const onDate = z.object({ date: localDate });
-/** The versions of the runs a change touches, as the screen saw them. */
+/** By van id: the versions of the runs a change touches, as the screen saw them. */
 const runVersions = z.record(z.uuid(), z.int());
 
 export const getDay = endpoint({

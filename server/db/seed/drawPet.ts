@@ -5,10 +5,10 @@ import { pick } from './randomFor.ts';
 
 /** Everyday breeds come up more often than the rest of the table. */
 const everyday = [
-  'bichon-frise', 'poodle-toy', 'poodle-miniature', 'poodle-standard', 'shih-tzu', 'yorkshire-terrier', 'maltese',
-  'cocker-spaniel-english', 'cavalier-king-charles-spaniel', 'west-highland-white-terrier', 'schnauzer-miniature',
-  'golden-retriever', 'labrador-retriever', 'border-terrier', 'pug', 'french-bulldog', 'lhasa-apso', 'cockapoo',
-  'labradoodle', 'cavapoo', 'springer-spaniel-english', 'border-collie', 'german-shepherd',
+  'bichon-frise', 'poodle-toy', 'poodle-miniature', 'shih-tzu', 'yorkshire-terrier', 'maltese', 'english-cocker',
+  'cavalier', 'west-highland-terrier', 'miniature-schnauzer', 'golden-retriever', 'labrador', 'border-terrier', 'pug',
+  'french-bulldog', 'lhasa-apso', 'cockapoo', 'cavapoo', 'maltipoo', 'springer-spaniel', 'pomeranian', 'havanese',
+  'jack-russell-smooth', 'dachshund-smooth', 'shetland-sheepdog', 'chihuahua', 'cairn-terrier',
 ]; // prettier-ignore
 
 const tempers = ['calm', 'calm', 'calm', 'calm', 'restless', 'restless', 'anxious', 'nippy'];
@@ -18,9 +18,9 @@ export function drawPet(random: () => number, name: string, year: number): PetIn
   const isCat = random() < 0.12;
   const pool = breeds.filter((breed) => breed.species === (isCat ? 'cat' : 'dog'));
   const usual = pool.filter((breed) => everyday.includes(breed.id));
-  const breed = pick(random, !isCat && usual.length > 0 && random() < 0.7 ? usual : pool);
+  const breed = pick(random, !isCat && random() < 0.75 ? usual : pool);
   const age = 1 + Math.floor(random() * 13);
-  const matting = random() < 0.72 ? 0 : random() < 0.6 ? 1 : random() < 0.7 ? 2 : 3;
+  const matting = random() < 0.8 ? 0 : random() < 0.7 ? 1 : random() < 0.8 ? 2 : 3;
   return {
     name,
     species: breed.species,
@@ -40,7 +40,7 @@ export function drawPet(random: () => number, name: string, year: number): PetIn
       random() < 0.25
         ? pick(random, ['Tail left long.', 'Round face.', 'Ears short.', 'Feet tight.'])
         : '',
-    intervalWeeks: pick(random, [4, 5, 6, 6]),
+    intervalWeeks: pick(random, [4, 4, 5, 6]),
   };
 }
 

@@ -6,6 +6,8 @@ export interface Rhythm {
   household: Household;
   petIds: string[];
   intervalWeeks: number;
+  /** A usual stay there with the drive to it, so that a day is not booked beyond its hours. */
+  staySeconds: number;
 }
 
 const epoch = '2024-01-01';

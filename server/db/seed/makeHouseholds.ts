@@ -7,7 +7,7 @@ import { accessNotes, familyNames, firstNames, handoverNotes, petNames } from '.
 import { drawPet } from './drawPet.ts';
 import { pick, randomFor } from './randomFor.ts';
 
-export const householdCount = 480;
+export const householdCount = 440;
 const batch = 40;
 
 /** Households at real addresses of the area with their pets; some share a site with one gate. */
@@ -68,7 +68,7 @@ async function makeHousehold(
     },
     now,
   );
-  const pets = random() < 0.8 ? 1 : random() < 0.8 ? 2 : 3;
+  const pets = random() < 0.78 ? 1 : 2;
   const names = new Set<string>();
   while (names.size < pets) names.add(pick(random, petNames));
   for (const petName of names)

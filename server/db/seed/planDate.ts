@@ -15,7 +15,6 @@ import { addPromise, createVisit } from '#server/services/visits/createVisit.ts'
 import type { Rhythm } from './dueOn.ts';
 
 const iterations = 500;
-const promiseMinutes = 120;
 
 /** Shifts, visits, an order and promises for one date, through the services a dispatcher uses. */
 export async function planDate(
@@ -86,15 +85,20 @@ export async function planDate(
   for (const stop of times.runs.flatMap((run) => run.stops)) {
     if (stop.kind !== 'visit') continue;
     const visit = await Visit.findByPk(stop.stopId);
-    const arrival = secondsToWall(date, loaded.problem.timeZone, stop.arriveSeconds);
-    // Two hours around the arrival, on half hours, a little more after than before.
-    const startMinutes = Math.max(7 * 60 + 30, Math.floor((arrival - 50) / 30) * 30);
+    const wall = (seconds: number) => secondsToWall(date, loaded.problem.timeZone, seconds);
     await addPromise(
       visit!,
-      { startMinutes, endMinutes: startMinutes + promiseMinutes },
+      promiseAround(wall(stop.arriveEarlySeconds), wall(stop.arriveLateSeconds)),
       1,
       actor.userName,
       now,
     );
   }
+}
+
+/** Wall minutes around an arrival's 1-in-10 range, on half hours: at least two hours, at most three. */
+function promiseAround(early: number, late: number): { startMinutes: number; endMinutes: number } {
+  const startMinutes = Math.max(7 * 60 + 30, Math.floor((early - 10) / 30) * 30);
+  const wanted = Math.ceil((late + 10) / 30) * 30 - startMinutes;
+  return { startMinutes, endMinutes: startMinutes + Math.min(180, Math.max(120, wanted)) };
 }

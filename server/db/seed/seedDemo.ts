@@ -13,14 +13,16 @@ import { type DemoSignIn, demoSignIns } from './demoSignIns.ts';
 import { dueOn, type Rhythm } from './dueOn.ts';
 import { householdCount, makeHouseholds } from './makeHouseholds.ts';
 import { makeBusiness } from './makeBusiness.ts';
+import { forecastOf } from '#server/services/visits/forecastOf.ts';
 import { planDate } from './planDate.ts';
 import { seedActor } from './seedActor.ts';
 import { workDate } from './workDate.ts';
 
 const pastDays = 42;
 const futureDays = 14;
-/** Per date: what three vans can take, so that a busy day stays a day. */
-const mostVisits = 15;
+/** Per date: what three vans take without running late, and a usual drive to a stop. */
+const mostStaySeconds = 3 * 7.2 * 3600;
+const driveSeconds = 600;
 const demoArea = 'pellan-bay';
 
 export type OnStep = (step: string, done: number, of: number) => void;
@@ -48,7 +50,7 @@ async function seedDates(business: Business, now: Date, onStep: OnStep): Promise
   const today = localDateAt(now.getTime(), business.timeZone);
   const first = addDays(today, -pastDays);
   const total = pastDays + futureDays + 1;
-  const { rhythms, centre } = await inBusiness(business.id, loadRhythms);
+  const { rhythms, centre } = await inBusiness(business.id, () => loadRhythms(business.id, today));
   const dispatcher = await inBusiness(business.id, () =>
     seedActor(business.id, 'runa@saltmarsh.example'),
   );
@@ -60,8 +62,8 @@ async function seedDates(business: Business, now: Date, onStep: OnStep): Promise
         const bookedOn = new Date(
           Math.min(now.getTime(), Date.parse(date) - futureDays * 86_400_000),
         );
-        const due = dueOn(date, rhythms, centre).slice(0, mostVisits);
-        await planDate(dispatcher, date, due, bookedOn, { leaveOut: date >= today ? 1 : 0 });
+        const due = fitting(dueOn(date, rhythms, centre));
+        await planDate(dispatcher, date, due, bookedOn, { leaveOut: date === today ? 1 : 0 });
       }
       const open = await Run.findOne({ where: { date, sentVersion: null } });
       if (date < today && open)
@@ -71,8 +73,12 @@ async function seedDates(business: Business, now: Date, onStep: OnStep): Promise
   }
 }
 
-async function loadRhythms(): Promise<{ rhythms: Rhythm[]; centre: { lat: number; lon: number } }> {
-  const [households, pets, depot] = await Promise.all([
+async function loadRhythms(
+  businessId: string,
+  date: string,
+): Promise<{ rhythms: Rhythm[]; centre: { lat: number; lon: number } }> {
+  const [business, households, pets, depot] = await Promise.all([
+    Business.findByPk(businessId),
     Household.findAll({
       order: [
         ['name', 'ASC'],
@@ -84,11 +90,24 @@ async function loadRhythms(): Promise<{ rhythms: Rhythm[]; centre: { lat: number
   ]);
   const rhythms = households.map((household) => {
     const own = pets.filter((pet) => pet.householdId === household.id);
+    const { forecast } = forecastOf(own, business!, date, new Map());
+    const { work, setUpSeconds, cleanDownSeconds } = forecast;
     return {
       household,
       petIds: own.map((pet) => pet.id),
       intervalWeeks: Math.min(...own.map((pet) => pet.intervalWeeks)),
+      staySeconds: work.meanSeconds + setUpSeconds + cleanDownSeconds + driveSeconds,
     };
   });
-  return { rhythms: rhythms.filter((one) => one.petIds.length > 0), centre: depot! };
+  return { rhythms, centre: depot! };
+}
+
+/** As many of the due as the day's hours hold; the rest come another week. */
+function fitting(due: Rhythm[]): Rhythm[] {
+  let left = mostStaySeconds;
+  return due.filter((one) => {
+    if (one.staySeconds > left) return false;
+    left -= one.staySeconds;
+    return true;
+  });
 }

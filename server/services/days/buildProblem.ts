@@ -30,8 +30,12 @@ export interface ProblemParts {
   sent: Plan | null;
 }
 
-/** Placing a visit is worth this much driving: about as bad as being an hour late to a promise. */
-const visitValueSeconds = 20_000;
+/**
+ * Placing a visit is worth this much driving. With a promise it outweighs being four hours late to
+ * another one (at the starting weights): a promised visit comes off a van only when nothing else goes.
+ */
+const promisedValueSeconds = 100_000;
+const unpromisedValueSeconds = 20_000;
 /** Spread of a leg; a shared city day is wider, learned factors come with the traffic part. */
 const driveCvPermille = 200;
 const loadSeconds = 600;
@@ -112,7 +116,7 @@ function visitFact(facts: VisitFacts, points: PointList, at: (wall: number) => n
     heaviestGrams: forecast.heaviestGrams,
     preferredGroomerIds: visit.preferredGroomerId ? [visit.preferredGroomerId] : [],
     barredGroomerIds: [],
-    valueSeconds: visitValueSeconds,
+    valueSeconds: promise ? promisedValueSeconds : unpromisedValueSeconds,
     pin: visit.pin ?? null,
   };
 }
