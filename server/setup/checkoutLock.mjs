@@ -83,14 +83,17 @@ function readHolder(file = lockFile) {
 
 /**
  * When a process began, in clock ticks since boot. With the pid it names one process: pids are
- * given out again, this pair is not.
+ * given out again, this pair is not. Empty for a process that has ended.
  * @param {number} pid
  */
 function startTicksOf(pid) {
   try {
     const stat = fs.readFileSync(`/proc/${pid}/stat`, 'utf8');
-    // The program's name stands in brackets and may hold spaces; start time is field 22.
-    return stat.slice(stat.lastIndexOf(')') + 2).split(' ')[19] ?? '';
+    // The program's name stands in brackets and may hold spaces; after it come the state (field 3)
+    // and, as field 22, the start time.
+    const fields = stat.slice(stat.lastIndexOf(')') + 2).split(' ');
+    // A zombie is dead. In a container whose first process reaps nobody, it stays for ever.
+    return fields[0] === 'Z' ? '' : (fields[19] ?? '');
   } catch {
     return '';
   }
