@@ -77,7 +77,7 @@ function search(
   if (state.near.length < 2) return 0;
   let best = start;
   let told = start;
-  const hottest = typicalLeg(state);
+  const hottest = 1.5 * typicalLeg(state);
   const coldest = Math.max(1, hottest / 200);
   let roundStart = 0;
   let roundLength = 4096;

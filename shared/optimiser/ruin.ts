@@ -9,7 +9,8 @@ const splitGrowth = 0.01;
 /**
  * Cuts strings of neighbouring visits out of runs near a random visit and puts them into the bank
  * (Christiaens & Vanden Berghe, Slack Induction by String Removals, 2020).
- * Returns how many it cut.
+ * Half the time the visit is one of the bank, if there are any. Returns how many it cut; the seed
+ * from the bank then lies at the bank's end, among those cut.
  */
 export function ruin(state: SearchState): number {
   const { dice, near, vanOf, runs } = state;
@@ -23,14 +24,25 @@ export function ruin(state: SearchState): number {
   const mostStrings = (4 * removed) / (1 + longest) - 1;
   const strings = Math.max(1, Math.floor(1 + dice.next() * Math.max(0, mostStrings)));
   const touched = new Set<number>();
-  for (const visit of near[dice.below(count)]!) {
+  const seed = chooseSeed(state);
+  for (const visit of near[seed]!) {
     const van = vanOf[visit]!;
     if (van < 0 || touched.has(van)) continue;
     if (!cutString(state, van, visit, longest)) continue;
     touched.add(van);
     if (touched.size >= strings) break;
   }
-  return state.absent.length - (count - placed);
+  return state.absent.length - (count - placed) + (vanOf[seed] === -1 ? 1 : 0);
+}
+
+function chooseSeed(state: SearchState): number {
+  const { dice, absent, near } = state;
+  if (absent.length === 0 || dice.chance(0.5)) return dice.below(near.length);
+  const at = dice.below(absent.length);
+  const seed = absent[at]!;
+  absent.splice(at, 1);
+  absent.push(seed);
+  return seed;
 }
 
 function cutString(state: SearchState, van: number, seed: number, longest: number): boolean {
