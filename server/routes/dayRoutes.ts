@@ -7,7 +7,8 @@ import { getDaySurroundings } from '#server/services/days/getDay.ts';
 import { type LoadedDay, loadDay } from '#server/services/days/loadDay.ts';
 import { type Conflict, moveVisit } from '#server/services/days/moveVisit.ts';
 import { pinVisit } from '#server/services/days/pinVisit.ts';
-import { needsSending, sendRuns } from '#server/services/days/sendRuns.ts';
+import { needsSending } from '#server/services/days/needsSending.ts';
+import { sendRuns } from '#server/services/days/sendRuns.ts';
 import { redoMove, undoMove } from '#server/services/days/undoMove.ts';
 import {
   dropProposal,

@@ -1,6 +1,7 @@
 import { useState } from 'react';
 import { useQuery } from '@tanstack/react-query';
-import { useParams } from 'react-router-dom';
+import { useParams, useSearchParams } from 'react-router-dom';
+import { isLocalDate } from '#shared/time/localDate.ts';
 import { householdQueries } from '#src/api/households.ts';
 import { useToday } from '#src/api/session.ts';
 import { useCan } from '#src/api/sessionStore.ts';
@@ -23,7 +24,11 @@ export function HouseholdScreen() {
   const mayBook = useCan('visits.edit');
   const found = useQuery(householdQueries.one(householdId));
   const sites = useQuery(householdQueries.sites());
-  const [booking, setBooking] = useState(false);
+  // The day board sends people here to book on its date.
+  const [search, setSearch] = useSearchParams();
+  const wanted = search.get('book') ?? '';
+  const bookOn = isLocalDate(wanted) && wanted >= today ? wanted : null;
+  const [booking, setBooking] = useState(bookOn !== null);
   const [cancelling, setCancelling] = useState<{ id: string; date: string } | null>(null);
   if (found.isPending) return <Loading lines={8} />;
   if (found.isError)
@@ -66,12 +71,16 @@ export function HouseholdScreen() {
         </div>
         <DoorCard household={household} site={site} />
       </div>
-      {booking && (
+      {booking && mayBook && bookable.length > 0 && (
         <BookVisitDialog
           household={household}
           pets={bookable}
           today={today}
-          onClose={() => setBooking(false)}
+          date={bookOn}
+          onClose={() => {
+            setBooking(false);
+            if (wanted) setSearch({}, { replace: true });
+          }}
         />
       )}
       {cancelling && (

@@ -40,7 +40,7 @@ export function drawPet(random: () => number, name: string, year: number): PetIn
       random() < 0.25
         ? pick(random, ['Tail left long.', 'Round face.', 'Ears short.', 'Feet tight.'])
         : '',
-    intervalWeeks: pick(random, [4, 4, 5, 6]),
+    intervalWeeks: pick(random, [4, 4, 5]),
   };
 }
 

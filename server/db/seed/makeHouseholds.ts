@@ -7,7 +7,7 @@ import { accessNotes, familyNames, firstNames, handoverNotes, petNames } from '.
 import { drawPet } from './drawPet.ts';
 import { pick, randomFor } from './randomFor.ts';
 
-export const householdCount = 440;
+export const householdCount = 480;
 const batch = 40;
 
 /** Households at real addresses of the area with their pets; some share a site with one gate. */

@@ -6,7 +6,6 @@ import { env } from '#server/env.ts';
 import { Business } from '#server/models/Business.ts';
 import { Household } from '#server/models/Household.ts';
 import { Pet } from '#server/models/Pet.ts';
-import { Place } from '#server/models/Place.ts';
 import { Run } from '#server/models/Run.ts';
 import { Shift } from '#server/models/Shift.ts';
 import { type DemoSignIn, demoSignIns } from './demoSignIns.ts';
@@ -21,7 +20,7 @@ import { workDate } from './workDate.ts';
 const pastDays = 42;
 const futureDays = 14;
 /** Per date: what three vans take without running late, and a usual drive to a stop. */
-const mostStaySeconds = 3 * 7.2 * 3600;
+const mostStaySeconds = 3 * 8.5 * 3600;
 const driveSeconds = 600;
 const demoArea = 'pellan-bay';
 
@@ -50,7 +49,7 @@ async function seedDates(business: Business, now: Date, onStep: OnStep): Promise
   const today = localDateAt(now.getTime(), business.timeZone);
   const first = addDays(today, -pastDays);
   const total = pastDays + futureDays + 1;
-  const { rhythms, centre } = await inBusiness(business.id, () => loadRhythms(business.id, today));
+  const rhythms = await inBusiness(business.id, () => loadRhythms(business.id, today));
   const dispatcher = await inBusiness(business.id, () =>
     seedActor(business.id, 'runa@saltmarsh.example'),
   );
@@ -62,7 +61,7 @@ async function seedDates(business: Business, now: Date, onStep: OnStep): Promise
         const bookedOn = new Date(
           Math.min(now.getTime(), Date.parse(date) - futureDays * 86_400_000),
         );
-        const due = fitting(dueOn(date, rhythms, centre));
+        const due = fitting(dueOn(date, rhythms));
         await planDate(dispatcher, date, due, bookedOn, { leaveOut: date === today ? 1 : 0 });
       }
       const open = await Run.findOne({ where: { date, sentVersion: null } });
@@ -73,11 +72,8 @@ async function seedDates(business: Business, now: Date, onStep: OnStep): Promise
   }
 }
 
-async function loadRhythms(
-  businessId: string,
-  date: string,
-): Promise<{ rhythms: Rhythm[]; centre: { lat: number; lon: number } }> {
-  const [business, households, pets, depot] = await Promise.all([
+async function loadRhythms(businessId: string, date: string): Promise<Rhythm[]> {
+  const [business, households, pets] = await Promise.all([
     Business.findByPk(businessId),
     Household.findAll({
       order: [
@@ -86,9 +82,8 @@ async function loadRhythms(
       ],
     }),
     Pet.findAll({ where: { active: true }, order: [['name', 'ASC']] }),
-    Place.findOne({ where: { kind: 'depot' } }),
   ]);
-  const rhythms = households.map((household) => {
+  return households.map((household) => {
     const own = pets.filter((pet) => pet.householdId === household.id);
     const { forecast } = forecastOf(own, business!, date, new Map());
     const { work, setUpSeconds, cleanDownSeconds } = forecast;
@@ -99,7 +94,6 @@ async function loadRhythms(
       staySeconds: work.meanSeconds + setUpSeconds + cleanDownSeconds + driveSeconds,
     };
   });
-  return { rhythms, centre: depot! };
 }
 
 /** As many of the due as the day's hours hold; the rest come another week. */

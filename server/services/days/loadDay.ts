@@ -21,7 +21,7 @@ export interface LoadedRun {
   van: Van;
   shift: Shift;
   groomer: Groomer;
-  sentPlan: Plan | null;
+  sent: Pick<RunVersion, 'problem' | 'plan'> | null;
   happened: RunHappened;
 }
 
@@ -48,13 +48,13 @@ export async function loadDay(
     order: [['id', 'ASC']],
     lock: options.lock ?? false,
   });
-  const [shifts, vans, groomers, places, visitRows, sentPlans, happened] = await Promise.all([
+  const [shifts, vans, groomers, places, visitRows, sentVersions, happened] = await Promise.all([
     Shift.findAll({ where: { date } }),
     Van.findAll({ order: [['name', 'ASC']] }),
     Groomer.findAll(),
     Place.findAll({ order: [['id', 'ASC']] }),
     Visit.findAll({ where: { date, status: { [Op.ne]: 'cancelled' } }, order: [['id', 'ASC']] }),
-    loadSentPlans(rows),
+    loadSentVersions(rows),
     loadHappened(rows, business.timeZone),
   ]);
   const visits = await loadVisitFacts(visitRows);
@@ -71,7 +71,7 @@ export async function loadDay(
         van,
         shift,
         groomer,
-        sentPlan: sentPlans.get(run.id) ?? null,
+        sent: sentVersions.get(run.id) ?? null,
         happened: happened.get(run.id)!,
       },
     ];
@@ -79,7 +79,7 @@ export async function loadDay(
   const hasBegun =
     localDateOf(now, business.timeZone) === date &&
     runs.some((one) => one.happened.facts.length > 0);
-  const sentRuns = runs.flatMap((one) => one.sentPlan?.runs ?? []);
+  const sentRuns = runs.flatMap((one) => one.sent?.plan.runs ?? []);
   const problem = await buildProblem({
     business,
     date,
@@ -90,7 +90,13 @@ export async function loadDay(
     now: hasBegun ? now : null,
     sent: sentRuns.length > 0 ? { runs: sentRuns, notPlaced: [] } : null,
   });
-  return { business, date, runs, visits, ...withFacts(problem, planOf(runs, visits), runs) };
+  return {
+    business,
+    date,
+    runs,
+    visits,
+    ...withFacts(problem, planOf(runs, visits, problem), runs),
+  };
 }
 
 /** Lays every run's facts in: started stops come first, as they were touched. */
@@ -106,12 +112,14 @@ function withFacts(
   return state;
 }
 
-function planOf(runs: LoadedRun[], visits: VisitFacts[]): Plan {
+/** The runs' stored orders, without what the day no longer holds: visits cancelled, places removed. */
+function planOf(runs: LoadedRun[], visits: VisitFacts[], { refills }: DayProblem): Plan {
   const known = new Set(visits.map(({ visit }) => visit.id));
   const placed = new Set<string>();
   const planRuns = runs.map(({ run }) => ({
     vanId: run.vanId,
     stops: run.stops.filter((stop) => {
+      if (stop.kind === 'refill') return refills.some((place) => place.id === stop.placeId);
       if (stop.kind !== 'visit') return true;
       if (!known.has(stop.visitId) || placed.has(stop.visitId)) return false;
       placed.add(stop.visitId);
@@ -121,12 +129,12 @@ function planOf(runs: LoadedRun[], visits: VisitFacts[]): Plan {
   return { runs: planRuns, notPlaced: [...known].filter((id) => !placed.has(id)) };
 }
 
-async function loadSentPlans(runs: Run[]): Promise<Map<string, Plan>> {
+async function loadSentVersions(runs: Run[]): Promise<Map<string, RunVersion>> {
   const sent = runs.filter((run) => run.sentVersion != null);
   if (sent.length === 0) return new Map();
   const versions = await RunVersion.findAll({
     where: { [Op.or]: sent.map((run) => ({ runId: run.id, version: run.sentVersion! })) },
-    attributes: ['id', 'runId', 'version', 'plan'],
+    attributes: ['id', 'runId', 'version', 'problem', 'plan'],
   });
-  return new Map(versions.map((version) => [version.runId, version.plan]));
+  return new Map(versions.map((version) => [version.runId, version]));
 }

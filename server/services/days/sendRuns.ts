@@ -9,6 +9,7 @@ import { type LoadedDay, type LoadedRun, loadDay } from './loadDay.ts';
 import { lockDay } from './lockDay.ts';
 import { logChange } from './logChange.ts';
 import { type Conflict, isStale } from './moveVisit.ts';
+import { needsSending } from './needsSending.ts';
 
 /** Rules a person may never send a van out with: they are about animals and hands, not minutes. */
 const neverSent: RuleName[] = ['skill', 'tableLimit', 'barredGroomer'];
@@ -51,24 +52,9 @@ export async function sendRuns(
   return loadDay(actor.businessId, date, now);
 }
 
-/** True when the phone has no version yet or another order than the draft. */
-export function needsSending(
-  loaded: Pick<LoadedDay, 'plan'>,
-  { run, van, sentPlan }: LoadedRun,
-): boolean {
-  if (run.sentVersion == null || !sentPlan) return draftStops(loaded, van.id).length > 0;
-  return (
-    JSON.stringify(draftStops(loaded, van.id)) !== JSON.stringify(sentPlan.runs[0]?.stops ?? [])
-  );
-}
-
-function draftStops(loaded: Pick<LoadedDay, 'plan'>, vanId: string) {
-  return loaded.plan.runs.find((run) => run.vanId === vanId)?.stops ?? [];
-}
-
 function chooseRuns(loaded: LoadedDay, vanIds: string[] | undefined): LoadedRun[] {
   if (!vanIds) return loaded.runs;
-  return vanIds.map((vanId) => {
+  return [...new Set(vanIds)].map((vanId) => {
     const found = loaded.runs.find(({ van }) => van.id === vanId);
     if (!found) throw badField('vanIds', 'must be vans with a shift that day');
     return found;

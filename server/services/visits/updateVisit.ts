@@ -1,12 +1,15 @@
 import { AppError, badField, notFound } from '#server/errors.ts';
 import { Groomer } from '#server/models/Groomer.ts';
 import { Promise as PromiseRow } from '#server/models/Promise.ts';
-import { Run } from '#server/models/Run.ts';
 import { RunEvent } from '#server/models/RunEvent.ts';
 import { type AllowedWall, Visit } from '#server/models/Visit.ts';
 import type { Actor } from '#server/services/accounts/Actor.ts';
+import { loadDay } from '#server/services/days/loadDay.ts';
 import { lockDay } from '#server/services/days/lockDay.ts';
 import { logChange } from '#server/services/days/logChange.ts';
+import { makeMove } from '#server/services/days/moveVisit.ts';
+import { savePlan } from '#server/services/days/savePlan.ts';
+import { forgetMoves } from '#server/services/days/undoMove.ts';
 import { addPromise } from './createVisit.ts';
 import { labelOf, loadVisitFacts } from './visitFacts.ts';
 
@@ -62,14 +65,9 @@ export async function cancelVisit(
       'refusedMove',
       'The van has already set out for this visit. Use “Can’t do it” on the run.',
     );
-  for (const run of await Run.findAll({
-    where: { date: visit.date },
-    order: [['id', 'ASC']],
-    lock: true,
-  })) {
-    const stops = run.stops.filter((stop) => stop.kind !== 'visit' || stop.visitId !== visitId);
-    if (stops.length !== run.stops.length) await run.update({ stops, version: run.version + 1 });
-  }
+  const loaded = await loadDay(actor.businessId, visit.date, now, { lock: true });
+  await savePlan(loaded, makeMove(loaded, { kind: 'unplaceVisit', visitId }));
+  await forgetMoves(day, visitId, now);
   await visit.update({ status: 'cancelled', cancelReason: reason });
   const [facts] = await loadVisitFacts([visit]);
   await logChange(day, {

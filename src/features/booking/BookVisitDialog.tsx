@@ -30,11 +30,14 @@ export function BookVisitDialog({
   household,
   pets,
   today,
+  date: askedDate,
   onClose,
 }: {
   household: Household;
   pets: readonly Pet[];
   today: string;
+  /** The day asked for; null: when the pets are due. */
+  date: string | null;
   onClose: () => void;
 }) {
   const navigate = useNavigate();
@@ -43,7 +46,7 @@ export function BookVisitDialog({
   const [openDay, setOpenDay] = useState(true);
   const form = useZodForm(createVisit.body, {
     householdId: household.id,
-    date: dueDate(pets, today),
+    date: askedDate ?? dueDate(pets, today),
     petIds: pets.map((pet) => pet.id),
     promise: { startMinutes: 9 * 60, endMinutes: 11 * 60 },
     allowed: [],
@@ -54,7 +57,7 @@ export function BookVisitDialog({
     await create.mutateAsync({ body });
     toast(`Booked for ${writeDate(body.date)}; it waits under not placed.`);
     onClose();
-    if (openDay) navigate(`/day/${body.date}`);
+    if (openDay) void navigate(`/day/${body.date}`);
   });
   const { errors } = form.formState;
   const [promise, allowed = [], date] = form.watch(['promise', 'allowed', 'date']);

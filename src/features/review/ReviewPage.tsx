@@ -103,7 +103,7 @@ function Numbers({ review }: { review: Review }) {
       <Figures review={review} />
       {/* Two stacks, not rows: a long table must not leave a hole beside it. */}
       <div className="mt-5 grid items-start gap-4.5 lg:grid-cols-[1.25fr_1fr]">
-        <div className="grid min-w-0 gap-4.5">
+        <div className="grid min-w-0 grid-cols-[minmax(0,1fr)] gap-4.5">
           <Card title="Where each day went" dim="hours, all vans">
             <DayBars days={review.days} />
           </Card>
@@ -111,7 +111,7 @@ function Numbers({ review }: { review: Review }) {
             <VanTable vans={review.vans} />
           </Card>
         </div>
-        <div className="grid min-w-0 gap-4.5">
+        <div className="grid min-w-0 grid-cols-[minmax(0,1fr)] gap-4.5">
           <Card title="Forecast against the clock">
             {review.visits.length > 0 ? (
               <ForecastScatter visits={review.visits} />
