@@ -8,7 +8,8 @@ export const localDate = z
   .refine((text) => {
     const date = new Date(`${text}T00:00:00Z`);
     return !Number.isNaN(date.getTime()) && date.toISOString().startsWith(text);
-  }, 'must be a day that exists');
+  }, 'must be a day that exists')
+  .refine((text) => text >= '2000-01-01' && text < '2100', 'must be a date from 2000 to 2099');
 export const wallMinutes = z
   .int('must be whole minutes after midnight')
   .min(0, 'must be 0:00 or later')
@@ -48,7 +49,13 @@ export const password = z
   .string()
   .min(10, 'must have 10 letters or more')
   .refine((text) => utf8Length(text) <= 72, 'must be 72 bytes or fewer');
-export const instant = z.iso.datetime({ offset: true });
+/** A phone with an empty clock counts from 1970; no calendar of ours goes past 2099. */
+export const instant = z.iso
+  .datetime({ offset: true })
+  .refine(
+    (text) => Date.parse(text) >= 0 && Date.parse(text) < Date.UTC(2100, 0),
+    'must be a time from 1970 to 2099',
+  );
 export const page = z.coerce.number().int().min(1).max(10_000).default(1);
 export const done = z.object({ done: z.literal(true) });
 

@@ -34,7 +34,7 @@ export async function undoState(day: Day): Promise<UndoState> {
     attributes: ['id', 'businessId', 'undoes'],
   });
   const redo = await DayChange.findOne({
-    where: { id: undos.map((one) => one.undoes), undoneAt: { [Op.ne]: null } } as never,
+    where: { id: undos.flatMap((one) => one.undoes ?? []), undoneAt: { [Op.ne]: null } },
     order: [['seq', 'ASC']],
   });
   return { undo, redo };
