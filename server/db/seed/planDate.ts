@@ -96,9 +96,9 @@ export async function planDate(
   }
 }
 
-/** Wall minutes around an arrival's 1-in-10 range, on half hours: at least two hours, at most three. */
+/** Wall minutes around an arrival's 1-in-10 range, on half hours: two hours to two and a half. */
 function promiseAround(early: number, late: number): { startMinutes: number; endMinutes: number } {
-  const startMinutes = Math.max(7 * 60 + 30, Math.floor((early - 10) / 30) * 30);
-  const wanted = Math.ceil((late + 10) / 30) * 30 - startMinutes;
-  return { startMinutes, endMinutes: startMinutes + Math.min(180, Math.max(120, wanted)) };
+  const startMinutes = Math.max(7 * 60 + 30, Math.floor(early / 30) * 30);
+  const wanted = Math.ceil(late / 30) * 30 - startMinutes;
+  return { startMinutes, endMinutes: startMinutes + Math.min(150, Math.max(120, wanted)) };
 }
