@@ -1,9 +1,10 @@
 // Runs inside the bare system of `npm run prove:fresh`, as its process number 1.
 import fs from 'node:fs';
 import { setTimeout as sleep } from 'node:timers/promises';
-import { findPeers } from './findPeers.mjs';
-import { npmStart } from './npmStart.mjs';
 import { startChild } from './childProcess.mjs';
+import { findPeers } from './findPeers.mjs';
+import { findProgram } from './findProgram.mjs';
+import { npmStart } from './npmStart.mjs';
 import { say } from './say.mjs';
 
 const [resultFile = 'result.json'] = process.argv.slice(2);
@@ -31,9 +32,7 @@ process.exit(problems.length === 0 ? 0 : 1);
 
 async function firstStart() {
   say('\n== npm start on a bare system');
-  result.packagesBefore = ['mariadbd', 'chromium'].filter((name) =>
-    fs.existsSync(`/usr/bin/${name}`),
-  );
+  result.alreadyThere = ['mariadbd', 'chromium', 'sudo', 'git'].filter((name) => findProgram(name));
   const run = await npmStart(20 * 60);
   result.firstStartSeconds = run.seconds;
   result.demoSignIns = run.lines.filter((line) => /^ {2}\S+ +\S+@\S+ +\S+$/.test(line)).length;
