@@ -5,6 +5,7 @@ import { database } from '#server/db/database.ts';
 import { env } from '#server/env.ts';
 import { startJobs } from '#server/jobs/startJobs.ts';
 import { log } from '#server/log.ts';
+import { closePlanner, warmPlanner } from '#server/optimiser/planInWorker.ts';
 import { openCarriers } from '#server/services/texts/openCarriers.ts';
 
 await database.authenticate();
@@ -20,8 +21,10 @@ async function ready(): Promise<void> {
   const origin = env.publicUrl ?? `http://${host}:${port}`;
   const carriers = await openCarriers({ origin, now: () => clock.now() });
   const jobs = startJobs(origin);
+  warmPlanner();
   closeAll = async () => {
     await jobs.stop();
+    await closePlanner();
     await carriers.close();
   };
   process.stdout.write(`furlong ready ${origin}\n`);

@@ -221,7 +221,7 @@ export function findCircles(root: string, folders: string[]): string[][] {
 }
 
 function judgePackage(path: string, wanted: string): string | null {
-  const pure = path.startsWith('shared/') && !/\.test\.ts$/.test(path);
+  const pure = path.startsWith('shared/') && !path.endsWith('.test.ts');
   if (pure && /^node:|^(express|sequelize|mariadb|react|leaflet|twilio)\b/.test(wanted))
     return 'shared is pure: no I/O, no Node, no DOM';
   if (path.startsWith('src/') && !/\.test\.tsx?$/.test(path) && wanted.startsWith('node:'))
