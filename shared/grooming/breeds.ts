@@ -1,4 +1,4 @@
-import type { BreedFacts, CoatType, Region } from './types.ts';
+import type { BreedFacts, CoatType, HeadShape, Region } from './types.ts';
 
 // Styles and body extras that many rows share. Above the table because it is built at once.
 const curly = ['teddy', 'short-all-over', 'scissored-curly', 'clean-face-and-feet'];
@@ -290,6 +290,7 @@ export function middleGrams(breed: Pick<BreedFacts, 'minGrams' | 'maxGrams'>): n
 interface Extras {
   undercoat?: boolean;
   shortNosed?: boolean;
+  headShape?: HeadShape;
   regionPermille?: Partial<Record<Region, number>>;
 }
 
@@ -312,6 +313,7 @@ function dog(
     maxGrams: Math.round(maxKg * 1000),
     coatType,
     undercoat: extras.undercoat ?? (coatType === 'double' || coatType === 'wire'),
+    headShape: extras.shortNosed ? 'short' : (extras.headShape ?? 'medium'),
     shortNosed: extras.shortNosed ?? false,
     regionPermille: extras.regionPermille ?? {},
     usualStyleIds,

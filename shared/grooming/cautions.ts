@@ -30,7 +30,17 @@ export interface Caution {
   decides: Decider;
 }
 
-const handsOn: readonly StepKey[] = ['nails', 'ears', 'tidy', 'mats', 'strip', 'clip', 'scissor'];
+const handsOn: readonly StepKey[] = [
+  'nails',
+  'ears',
+  'tidy',
+  'mats',
+  'strip',
+  'clip',
+  'comb',
+  'scissor',
+  'head',
+];
 const atTheSkin: readonly StepKey[] = ['mats', 'clipOff', 'clip'];
 const everyStep: readonly StepKey[] = [
   'checkIn',
@@ -45,8 +55,11 @@ const everyStep: readonly StepKey[] = [
   'dry',
   'brush',
   'clip',
+  'comb',
   'scissor',
+  'head',
   'blend',
+  'rest',
   'wrap',
 ];
 
@@ -75,7 +88,7 @@ export const cautions: readonly Caution[] = [
     'heart',
     'Heart condition. Unheated air, rests, short stay; call the vet if it tires or coughs.',
     {
-      slower: [{ steps: ['dry', 'scissor'], permille: 1150, because: 'rests for the heart' }],
+      slower: [{ steps: ['dry'], permille: 1150, because: 'unheated air' }],
       decides: 'vet',
     },
   ),
@@ -102,7 +115,7 @@ export const cautions: readonly Caution[] = [
     decides: 'vet',
   }),
   noted('weakJoints', 'Weak joints. Low lift, soft mat, let it lie; no leg held high.', {
-    slower: [{ steps: handsOn, permille: 1100, because: 'rests for the joints' }],
+    slower: [{ steps: handsOn, permille: 1080, because: 'no leg held high' }],
   }),
   noted('thinSkin', 'Thin or loose skin. Stretch by hand, finish blades only.', {
     slower: [{ steps: atTheSkin, permille: 1150, because: 'thin skin' }],
@@ -116,7 +129,9 @@ export const cautions: readonly Caution[] = [
     decides: 'household',
   }),
   noted('deafOrBlind', 'Deaf or blind. Hand on the body before every move.', {
-    slower: [{ steps: ['checkIn', 'nails', 'scissor'], permille: 1080, because: 'hand first' }],
+    slower: [
+      { steps: ['checkIn', 'nails', 'scissor', 'head'], permille: 1080, because: 'hand first' },
+    ],
   }),
   noted('fleas', 'Fleas. Flea bath; treat tub, table and tools before the next pet.', {
     slower: [{ steps: ['bath'], permille: 1200, because: 'flea bath' }],
@@ -140,7 +155,7 @@ export const cautions: readonly Caution[] = [
     },
   ),
   fact('senior', 'Old. Rests, soft mat, ten minutes of mat work at most.', {
-    slower: [{ steps: handsOn, permille: 1100, because: 'rests for an old pet' }],
+    slower: [{ steps: handsOn, permille: 1080, because: 'gently, an old pet' }],
   }),
   fact('young', 'Young. Short turns, praise, ten minutes of mat work at most.', {
     slower: [{ steps: handsOn, permille: 1100, because: 'still learning' }],
@@ -188,7 +203,11 @@ export const cautions: readonly Caution[] = [
   ),
   always('dryerFace', ['dry'], 'No dryer at the face. Unheated for pets at risk.'),
   always('dryerNoise', ['dry'], 'Loud: cover the pet’s ears, wear ear protection.'),
-  always('hotBlade', atTheSkin, 'Feel the blade every few minutes. Hot: change or cool it.'),
+  always(
+    'hotBlade',
+    [...atTheSkin, 'comb'],
+    'Feel the blade every few minutes. Hot: change or cool it.',
+  ),
   always('skipTooth', atTheSkin, 'Skip-tooth blades stay off flank, groin, thin or loose skin.'),
   always('shortestBlade', atTheSkin, 'Nothing shorter than a #10 unless the style says so.'),
   always('earPlucking', ['ears'], 'Do not pluck healthy ears unless a vet asks for it.'),

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { durationWords, explain, reasonWords } from './explain.ts';
+import { durationWords } from './durationWords.ts';
+import { explain, reasonWords } from './explain.ts';
 import { forecastPet } from './forecastPet.ts';
 import { goodCoat, petLike } from './petLike.ts';
 import { regionWords } from './regionWords.ts';

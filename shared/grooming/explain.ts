@@ -1,3 +1,4 @@
+import { durationWords } from './durationWords.ts';
 import type { Distribution, PetForecast, Reason, StepForecast } from './types.ts';
 
 /** One step as people read it: its minutes and what made them. */
@@ -9,9 +10,18 @@ export interface StepWords {
   why: string[];
 }
 
-/** The whole pet in words for a card or a phone call. */
-export function explain(forecast: PetForecast): { summary: string; steps: StepWords[] } {
-  return { summary: summaryWords(forecast), steps: forecast.steps.map(stepWords) };
+/** The whole pet in words for a card or a phone call. `notes`: what the plan saves, changes or leaves. */
+export function explain(forecast: PetForecast): {
+  summary: string;
+  steps: StepWords[];
+  notes: string[];
+} {
+  const notes = [forecast.planChange?.words, forecast.overTable?.words, forecast.combPlan?.words];
+  return {
+    summary: summaryWords(forecast),
+    steps: forecast.steps.map(stepWords),
+    notes: notes.filter((note) => note !== undefined),
+  };
 }
 
 /** "2 h 14, 8 in 10 between 1 h 57 and 2 h 36" */
@@ -25,21 +35,9 @@ export function reasonWords({ text, deltaSeconds }: Reason): string {
   return `${sign}${Math.round(Math.abs(deltaSeconds) / 60)} min: ${text}`;
 }
 
-/** Whole minutes, hours from one on: "44 min", "2 h 14", "2 h". */
-export function durationWords(seconds: number): string {
-  const minutes = Math.round(seconds / 60);
-  if (minutes < 60) return `${minutes} min`;
-  const rest = minutes % 60;
-  return rest === 0 ? `${minutes / 60} h` : `${Math.floor(minutes / 60)} h ${pad(rest)}`;
-}
-
 function stepWords({ label, medianSeconds, reasons }: StepForecast): StepWords {
   const told = reasons
     .filter(({ deltaSeconds }) => Math.abs(deltaSeconds) >= 30)
     .sort((a, b) => Math.abs(b.deltaSeconds) - Math.abs(a.deltaSeconds));
   return { label, minutes: durationWords(medianSeconds), why: told.map(reasonWords) };
-}
-
-function pad(minutes: number): string {
-  return String(minutes).padStart(2, '0');
 }

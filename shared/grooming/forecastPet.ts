@@ -1,22 +1,23 @@
 import { momentsFromMedian, sumWithSharedFactor } from '#shared/stats/logNormal.ts';
 import { ageBand } from './age.ts';
 import { bodyOf, type Body } from './body.ts';
-import type { Caution } from './cautions.ts';
 import { cautionsFor } from './cautionsFor.ts';
 import { distribution } from './distribution.ts';
-import { draftSteps, scale, secondsOf, type StepDraft } from './draftSteps.ts';
+import { draftSteps } from './draftSteps.ts';
 import { groomModel, type GroomModel } from './groomModel.ts';
+import { addHandling, familyOfStep, restStep, tableSecondsOf } from './handling.ts';
 import { planCoat } from './planCoat.ts';
+import { secondsOf, type StepDraft } from './stepDraft.ts';
+import { overTable, tableLimitSeconds } from './tableLimit.ts';
 import type {
   PaceByFamily,
   PetFacts,
   PetForecast,
+  ScissorSection,
   Skill,
-  StepFamily,
   StepForecast,
   StepKey,
   Style,
-  Temperament,
 } from './types.ts';
 
 export interface ForecastOptions {
@@ -24,11 +25,14 @@ export interface ForecastOptions {
   paceByFamilyPermille?: PaceByFamily;
   /** Another model than the starting values, for example one fitted to a business's records. */
   model?: GroomModel;
+  /** Mat work already done on this pet today: the humane limit is one per pet and visit. */
+  matSecondsUsed?: number;
 }
 
 /**
  * Groom minutes of one pet in one style: steps with medians, spread and reasons, and their sum.
- * Steps are log-normal and share one pet-day effect; the sum is matched by moments.
+ * Steps are log-normal and share one pet-day effect; the sum is matched by moments. The forecast is
+ * of the style asked for; where that is more than the pet should bear, `overTable` has the plan B.
  * @throws RangeError naming the field that is missing or wrong, and what would be right.
  */
 export function forecastPet(
@@ -43,23 +47,25 @@ export function forecastPet(
     );
   }
   checkCoatState(pet);
-  const body = bodyOf(pet);
-  const age = ageBand(pet.ageYears, body);
-  const daySigma =
-    (pet.firstVisit ? model.spread.firstDayPermille : model.spread.dayPermille) / 1000;
-  const sigmaOf = (key: StepKey) => Math.hypot(model.spread.stepPermille[key] / 1000, daySigma);
-  const plan = planCoat(pet, style, body, age, model, Math.exp(sigmaOf('mats') ** 2 / 2));
-  const cautions = cautionsFor(pet, body, age, plan);
-  const barred = new Set(cautions.flatMap((caution) => caution.barred));
-
-  const drafts = draftSteps(pet, style, body, plan, model).filter(({ key }) => !barred.has(key));
-  for (const draft of drafts) addHandling(draft, pet, cautions, model, options);
-  const steps = drafts.map((draft) => finishStep(draft, sigmaOf(draft.key), model));
+  const work = draftWork(pet, style, model, options);
+  const { body, plan, cautions, drafts } = work;
+  const limit = tableLimitSeconds(pet, work.age, cautions, model);
+  const tableSeconds = tableSecondsOf(drafts);
+  const over = overTable(style, limit, tableSeconds, (less) =>
+    tableSecondsOf(draftWork(pet, less, model, options).drafts),
+  );
+  const steps = drafts.map((draft) => finishStep(draft, work.sigmaOf(draft.key), model));
 
   return {
-    ...distribution(sumWithSharedFactor(steps, daySigma)),
+    ...distribution(sumWithSharedFactor(steps, work.daySigma)),
     steps,
     planChange: plan.change,
+    combPlan: work.combPlan,
+    borders: work.borders,
+    coatTenthsMm: work.coatTenthsMm,
+    tableSeconds,
+    tableLimitSeconds: limit,
+    overTable: over,
     waterMl: drafts.some(({ key }) => key === 'bath') ? waterMl(pet, body, model) : 0,
     heaviestGrams: body.weightGrams,
     needs: skillsNeeded(body, drafts),
@@ -69,63 +75,34 @@ export function forecastPet(
   };
 }
 
-/** Which family each step belongs to. */
-export const familyOfStep: Record<StepKey, StepFamily> = {
-  checkIn: 'prep',
-  nails: 'prep',
-  ears: 'prep',
-  tidy: 'prep',
-  teeth: 'prep',
-  mats: 'prep',
-  clipOff: 'clip',
-  strip: 'clip',
-  bath: 'wash',
-  dry: 'dry',
-  brush: 'dry',
-  clip: 'clip',
-  scissor: 'scissor',
-  blend: 'scissor',
-  wrap: 'wrap',
-};
-
 /** From here on a pet needs someone sure with large dogs (70 lb, where salons' large prices begin). */
 const LARGE_GRAMS = 32_000;
 
-const temperamentWords: Record<Temperament, string> = {
-  calm: 'calm',
-  restless: 'restless',
-  anxious: 'anxious',
-  nippy: 'nippy',
-};
-
-function addHandling(
-  draft: StepDraft,
-  pet: PetFacts,
-  cautions: readonly Caution[],
-  model: GroomModel,
-  options: ForecastOptions,
-): void {
-  // Mat work is already bound by what the pet bears; slower hands do not lengthen the limit.
-  if (draft.key !== 'mats') {
-    const family = familyOfStep[draft.key];
-    const temper = model.temperamentPermille[pet.temperament][family] ?? 1000;
-    scale(draft, temper, temperamentWords[pet.temperament]);
-    for (const { slower } of cautions) {
-      for (const rule of slower) {
-        if (rule.steps.includes(draft.key)) scale(draft, rule.permille, rule.because);
-      }
-    }
-    if (pet.firstVisit && draft.key !== 'checkIn') {
-      scale(draft, model.firstVisit.permille, 'first visit');
-    }
-    const pace = options.paceByFamilyPermille?.[family] ?? 1000;
-    if (!Number.isInteger(pace) || pace <= 0) {
-      throw new RangeError(
-        `paceByFamilyPermille.${family} must be a whole number above 0, got ${pace}.`,
-      );
-    }
-    scale(draft, pace, 'groomer’s pace');
+/** Everything up to medians: the part plan B is tried on. */
+function draftWork(pet: PetFacts, style: Style, model: GroomModel, options: ForecastOptions) {
+  const body = bodyOf(pet);
+  const age = ageBand(pet.ageYears, body);
+  const { spread } = model;
+  const daySigma = (pet.firstVisit ? spread.firstDayPermille : spread.dayPermille) / 1000;
+  const sigmaOf = (key: StepKey) => Math.hypot(spread.stepPermille[key] / 1000, daySigma);
+  const matMeanPerMedian = Math.exp(sigmaOf('mats') ** 2 / 2);
+  const used = options.matSecondsUsed ?? 0;
+  if (!Number.isInteger(used) || used < 0) {
+    throw new RangeError(`matSecondsUsed must be whole seconds, 0 or more, got ${used}.`);
   }
+  const plan = planCoat(pet, style, body, age, model, matMeanPerMedian, used);
+  const cautions = cautionsFor(pet, body, age, plan);
+  const barred = new Set(cautions.flatMap((caution) => caution.barred));
+
+  const { steps, ...cut } = draftSteps(pet, style, body, plan, model);
+  const drafts = steps.filter(({ key }) => !barred.has(key));
+  for (const draft of drafts) {
+    addHandling(draft, pet, cautions, model, options.paceByFamilyPermille);
+  }
+  const rest = restStep(drafts, cautions, model);
+  // Rests are spread over the work; they are listed once, before the wrap-up.
+  if (rest) drafts.splice(-1, 0, rest);
+  return { body, age, daySigma, sigmaOf, plan, cautions, drafts, ...cut };
 }
 
 function finishStep(draft: StepDraft, sigma: number, model: GroomModel): StepForecast {
@@ -141,13 +118,29 @@ function finishStep(draft: StepDraft, sigma: number, model: GroomModel): StepFor
     varianceSeconds2: Math.round(moments.varianceSeconds2),
     attentionPermille: model.attentionPermille[draft.key],
     reasons: draft.reasons,
+    ...(draft.sections && { sections: sectionsOf(draft.sections, medianSeconds) }),
   };
+}
+
+/** Sections in whole seconds that add to the step; the last takes what rounding leaves. */
+function sectionsOf(sections: readonly ScissorSection[], total: number): ScissorSection[] {
+  const whole = sections.reduce((sum, { medianSeconds }) => sum + medianSeconds, 0);
+  let left = total;
+  return sections.map(({ region, medianSeconds }, index) => {
+    const last = index === sections.length - 1;
+    const seconds = last ? left : Math.round((total * medianSeconds) / whole);
+    left -= seconds;
+    return { region, medianSeconds: seconds };
+  });
 }
 
 function waterMl(pet: PetFacts, body: Body, model: GroomModel): number {
   const { fixedMl, perM2Ml, coatPermille, soilPermille } = model.water;
+  // The dirtiest part decides how often the whole pet is rinsed.
+  const { soil, soilByRegion } = pet.coatState;
+  const dirt = soilPermille[Math.max(soil, ...Object.values(soilByRegion ?? {}))]!;
   const plain = fixedMl + (perM2Ml * body.surfaceCm2) / 10_000;
-  const factor = (coatPermille[body.coatType] * soilPermille[pet.coatState.soil]!) / 1_000_000;
+  const factor = (coatPermille[body.coatType] * dirt) / 1_000_000;
   return Math.round(plain * factor);
 }
 
@@ -170,6 +163,19 @@ function checkCoatState({ coatState, weeksSinceLast }: PetFacts): void {
   within('coatState.soil', coatState.soil, 2);
   for (const [region, level] of Object.entries(coatState.mattingByRegion ?? {})) {
     within(`coatState.mattingByRegion.${region}`, level, 4);
+  }
+  for (const [region, load] of Object.entries(coatState.undercoatLoadByRegion ?? {})) {
+    within(`coatState.undercoatLoadByRegion.${region}`, load, 2);
+  }
+  for (const [region, soil] of Object.entries(coatState.soilByRegion ?? {})) {
+    within(`coatState.soilByRegion.${region}`, soil, 2);
+  }
+  const longest = 10_000;
+  if (coatState.lengthTenthsMm !== null) {
+    within('coatState.lengthTenthsMm', coatState.lengthTenthsMm, longest);
+  }
+  for (const [region, length] of Object.entries(coatState.lengthByRegionTenthsMm ?? {})) {
+    within(`coatState.lengthByRegionTenthsMm.${region}`, length, longest);
   }
   if (weeksSinceLast !== null) within('weeksSinceLast', weeksSinceLast, 2_000);
 }

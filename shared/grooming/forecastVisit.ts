@@ -1,4 +1,5 @@
 import { distribution } from './distribution.ts';
+import { dryingOverlap } from './dryingOverlap.ts';
 import { forecastPet, type ForecastOptions } from './forecastPet.ts';
 import type { Distribution, PetFacts, PetForecast, Skill, Style } from './types.ts';
 
@@ -14,8 +15,24 @@ export interface VisitOptions extends ForecastOptions {
   setUpSeconds?: number;
   /** Hand back, payment, wash down, pack up. */
   cleanDownSeconds?: number;
+  /** How much of `cleanDownSeconds` is hand-back and payment. */
+  handBackSeconds?: number;
+  /** Learned of the household: its door, gate, stairs and talk against the usual, 1000 = usual. */
+  doorPermille?: number;
   /** Table, tub and tools between two pets at one stop. */
   betweenPetsSeconds?: number;
+  /**
+   * The business lets a pet finish drying in sight while the next one is prepared. Off by default;
+   * allowed only where `dryingOverlap` allows it.
+   */
+  overlapDrying?: boolean;
+}
+
+/** Minutes around the pets, in order: what the household's door minutes are made of. */
+export interface AroundStep {
+  key: 'hookUp' | 'disinfect' | 'handBack' | 'cleanDown';
+  label: string;
+  seconds: number;
 }
 
 /** One stop's forecast. `work` is what the schedule spreads; `stop` adds set-up and clean-down. */
@@ -30,6 +47,11 @@ export interface VisitForecast {
   cleanDownSeconds: number;
   /** Cleaning between pets, all of it. */
   disinfectSeconds: number;
+  /** Of the clean-down: contact time of the disinfectant, which may pass while driving. */
+  contactSeconds: number;
+  /** Saved by preparing a pet while the one before finishes drying in sight; 0 unless allowed. */
+  overlapSeconds: number;
+  around: AroundStep[];
   /** Fresh water used, which becomes as much grey water. */
   waterMl: number;
   /** The same, in the shape a schedule's visit takes. */
@@ -48,12 +70,13 @@ export interface VisitForecast {
 export const visitDefaults = {
   setUpSeconds: 420,
   cleanDownSeconds: 480,
+  handBackSeconds: 180,
   betweenPetsSeconds: 240,
 } as const;
 
 /**
  * Forecasts one stop: pets in the order given, worked one after the other (a drying pet is never
- * left alone), disinfecting between them, set-up paid once. Pets' day effects are taken as
+ * left alone), disinfecting between them, set-up paid once, door minutes as learned. Pets' day effects are taken as
  * independent.
  * @throws RangeError when there is no pet, a duration is negative, or a pet's field is wrong; a
  * pet's error starts with its name.
@@ -64,8 +87,14 @@ export function forecastVisit(
 ): VisitForecast {
   if (visitPets.length === 0)
     throw new RangeError('pets is empty: a visit needs at least one pet.');
-  const setUpSeconds = whole('setUpSeconds', options);
-  const cleanDown = whole('cleanDownSeconds', options);
+  const door = options.doorPermille ?? 1000;
+  if (!Number.isInteger(door) || door <= 0) {
+    throw new RangeError(`doorPermille must be a whole number above 0, got ${door}.`);
+  }
+  const atDoor = (seconds: number) => Math.round((seconds * door) / 1000);
+  const setUpSeconds = atDoor(whole('setUpSeconds', options));
+  const cleanDown = atDoor(whole('cleanDownSeconds', options));
+  const handBackSeconds = Math.min(cleanDown, atDoor(whole('handBackSeconds', options)));
   const between = whole('betweenPetsSeconds', options);
 
   const pets = visitPets.map(({ petId, name, pet, style }) => ({
@@ -77,7 +106,14 @@ export function forecastVisit(
   const disinfectSeconds = forecasts
     .slice(0, -1)
     .reduce((sum, { extraCleanSeconds }) => sum + between + extraCleanSeconds, 0);
-  const cleanDownSeconds = cleanDown + forecasts.at(-1)!.extraCleanSeconds;
+  const contactSeconds = forecasts.at(-1)!.extraCleanSeconds;
+  const cleanDownSeconds = cleanDown + contactSeconds;
+  const overlapSeconds = options.overlapDrying
+    ? pets.slice(1).reduce((total, { forecast }, index) => {
+        const { pet } = visitPets[index]!;
+        return total + dryingOverlap(pet, forecasts[index]!, forecast).seconds;
+      }, 0)
+    : 0;
   const moments = {
     meanSeconds: sum(forecasts, 'meanSeconds'),
     varianceSeconds2: sum(forecasts, 'varianceSeconds2'),
@@ -86,11 +122,17 @@ export function forecastVisit(
 
   return {
     pets,
-    work: distribution(moments, disinfectSeconds),
-    stop: distribution(moments, disinfectSeconds + setUpSeconds + cleanDownSeconds),
+    work: distribution(moments, disinfectSeconds - overlapSeconds),
+    stop: distribution(
+      moments,
+      disinfectSeconds - overlapSeconds + setUpSeconds + cleanDownSeconds,
+    ),
     setUpSeconds,
     cleanDownSeconds,
     disinfectSeconds,
+    contactSeconds,
+    overlapSeconds,
+    around: around(setUpSeconds, disinfectSeconds, handBackSeconds, cleanDownSeconds),
     waterMl,
     tankUse: [
       { kind: 'fresh', ml: waterMl },
@@ -101,6 +143,21 @@ export function forecastVisit(
     stopped: forecasts.some(({ cautions }) => cautions.some(({ stop }) => stop)),
     modelVersion: forecasts[0]!.modelVersion,
   };
+}
+
+function around(
+  hookUp: number,
+  disinfect: number,
+  handBack: number,
+  cleanDown: number,
+): AroundStep[] {
+  const steps: AroundStep[] = [
+    { key: 'hookUp', label: 'arrive, power and water, to the door', seconds: hookUp },
+    { key: 'disinfect', label: 'disinfect between pets', seconds: disinfect },
+    { key: 'handBack', label: 'hand back and payment', seconds: handBack },
+    { key: 'cleanDown', label: 'wash down and pack up', seconds: cleanDown - handBack },
+  ];
+  return steps.filter(({ seconds }) => seconds > 0);
 }
 
 function whole(field: keyof typeof visitDefaults, options: VisitOptions): number {

@@ -20,6 +20,7 @@ export interface CoatPlan {
  * regions are never dematted; when lighter mats would go past the limit, the worst of them are
  * clipped short as well, until the rest fits. Clipping short always needs the household's consent.
  * `meanPerMedian` (≥ 1) turns the step's median into its mean, which is what the limit binds.
+ * `usedSeconds` is mat work already done today: the limit is summed over regions and taps.
  */
 export function planCoat(
   pet: PetFacts,
@@ -28,10 +29,12 @@ export function planCoat(
   age: AgeBand,
   model: GroomModel,
   meanPerMedian: number,
+  usedSeconds = 0,
 ): CoatPlan {
   const levels = matLevels(pet, body);
   const whole = pet.coatState.mattingByRegion === undefined;
-  const limit = age === 'grown' ? model.mats.limitSeconds : model.mats.gentleLimitSeconds;
+  const perVisit = age === 'grown' ? model.mats.limitSeconds : model.mats.gentleLimitSeconds;
+  const limit = Math.max(0, perVisit - usedSeconds);
   const short = regions.filter((region) => levels[region] >= 3);
   let worst = 2;
   let work = matWork(levels, short, body, model, whole);
@@ -65,7 +68,10 @@ export function planCoat(
     clippedShare,
     change: {
       kind: 'clipShort',
-      words: `Clip short with consent: mats need more than ${limit / 60} min of brushing out.`,
+      words:
+        usedSeconds > 0
+          ? `Clip short with consent: the ${perVisit / 60} min of mat work a visit are used up.`
+          : `Clip short with consent: mats need more than ${limit / 60} min of brushing out.`,
       regions: clipped,
       needsConsent: true,
     },

@@ -1,5 +1,5 @@
-import { familyOfStep } from './forecastPet.ts';
 import { forecastVisit, type VisitOptions, type VisitPet } from './forecastVisit.ts';
+import { familyOfStep, pacelessSteps } from './handling.ts';
 import { normalDraw } from './normalDraw.ts';
 import { simulationSettings, type SimulationSettings } from './simulationSettings.ts';
 import type { StepFamily, StepKey } from './types.ts';
@@ -65,14 +65,15 @@ export interface SimulatedVisit {
  */
 export function simulateVisit(input: SimulateVisitInput): SimulatedVisit {
   const { random, groomer, settings = simulationSettings } = input;
-  const forecast = forecastVisit(input.pets, input.options);
+  // The household's door is drawn here, never learned and drawn as well.
+  const forecast = forecastVisit(input.pets, { ...input.options, doorPermille: 1000 });
   const drift = (groomer.weeklyDriftPermille / 1000) ** (input.weeksSinceStart ?? 0);
   const steps = input.pets.flatMap((pet, index): SimulatedStep[] => {
     const day = draw(random, settings.dayPermille);
     return forecast.pets[index]!.forecast.steps.map(({ key, medianSeconds }) => {
       const family = familyOfStep[key];
       const hidden = [
-        groomer.byFamilyPermille[family],
+        pacelessSteps.includes(key) ? 1000 : groomer.byFamilyPermille[family],
         pet.hidden.permille,
         pet.hidden.byFamilyPermille[family],
         pet.coatStylePermille ?? 1000,

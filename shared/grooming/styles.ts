@@ -1,4 +1,5 @@
-import type { CoatType, RegionCut, Style } from './types.ts';
+import { planBOf } from './planB.ts';
+import type { CoatType, PlanB, RegionCut, Style } from './types.ts';
 
 // Cut shorthands. A blade's number names no fixed length, so styles carry millimetres; the numbers
 // in the comments are the usual labels. Above the table because it is built at once.
@@ -10,6 +11,9 @@ const blade5 = blade(63, 'with'); // #5F
 const blade10Against = blade(15, 'against');
 const comb13 = comb(130); // half an inch
 const comb16 = comb(160); // five eighths
+const comb22 = comb(220); // seven eighths
+const leave: RegionCut = { tool: 'leave' };
+const longKept = { neck: leave, back: leave, belly: leave, foreLegs: leave, hindLegs: leave };
 
 const scissoredLegs = { foreLegs: scissor, hindLegs: scissor, feet: scissor };
 const scissoredHead = { head: scissor, ears: scissor };
@@ -49,6 +53,11 @@ export const styles: readonly Style[] = [
     'tidy',
     { head: scissor, feet: scissor },
     full(),
+    // The first visit teaches; nothing on it is worth a fright.
+    {
+      services: { nails: 'ifAllowed', sanitary: 'ifAllowed', pads: 'leave', ears: 'leave' },
+      regions: { head: 'ifAllowed', feet: 'ifAllowed' },
+    },
   ),
   dogStyle(
     'short-all-over',
@@ -180,6 +189,8 @@ export const styles: readonly Style[] = [
       feet: scissor,
     },
     full(),
+    // A jacket may be rolled in two sittings; the back first.
+    { services: {}, regions: { back: 'must', neck: 'ifAllowed', belly: 'leave', tail: 'leave' } },
   ),
   dogStyle(
     'bearded-outline',
@@ -247,12 +258,61 @@ export const styles: readonly Style[] = [
     ['drop', 'combination'],
     'tidy',
     {
+      ...longKept,
       head: scissor,
       feet: scissor,
       tail: scissor,
     },
     full(),
   ),
+  dogStyle(
+    'longer-all-over',
+    'Longer all over, combed',
+    ['curly', 'drop', 'combination'],
+    'pet',
+    {
+      neck: comb22,
+      back: comb22,
+      belly: comb22,
+      foreLegs: comb22,
+      hindLegs: comb22,
+      ...scissoredHead,
+      feet: scissor,
+      tail: scissor,
+    },
+    full(),
+  ),
+  dogStyle(
+    'between-visits',
+    'Face, feet and sanitary between grooms',
+    growing,
+    'tidy',
+    { head: scissor, feet: scissor },
+    ['nails', 'ears', 'sanitary', 'pads'],
+  ),
+  dogStyle(
+    'outline-tidied',
+    'Undercoat out, outline tidied',
+    ['double'],
+    'tidy',
+    { hindLegs: { tool: 'scissor', lengthTenthsMm: 400 }, feet: scissor, tail: scissor },
+    ['bath', 'deshed', 'nails', 'ears', 'sanitary', 'pads'],
+  ),
+  dogStyle(
+    'jacket-rolled',
+    'Jacket rolled, furnishings combed',
+    ['wire'],
+    'tidy',
+    { neck: strip, back: strip },
+    ['nails', 'ears', 'pads'],
+    { services: {}, regions: { neck: 'ifAllowed', back: 'must' } },
+  ),
+  dogStyle('bath-brush-and-teeth', 'Bath, brush and teeth', brushed, 'tidy', {}, [
+    'bath',
+    'nails',
+    'ears',
+    'teeth',
+  ]),
   dogStyle('corded-bath', 'Cords washed and parted', ['corded'], 'tidy', {}, full()),
   dogStyle('skin-bath', 'Skin bath', ['hairless'], 'tidy', {}, ['bath', 'nails', 'ears']),
   catStyle('cat-nails', 'Cat nails', [...cats, 'hairless'], {}, ['nails']),
@@ -277,6 +337,13 @@ export const styles: readonly Style[] = [
       belly: blade10,
       hindLegs: blade10,
     },
+    ['bath', 'nails', 'ears', 'sanitary'],
+  ),
+  catStyle(
+    'cat-combed-short',
+    'Cat combed short, half an inch',
+    ['catLong'],
+    { neck: comb13, back: comb13, belly: comb13, hindLegs: comb13 },
     ['bath', 'nails', 'ears', 'sanitary'],
   ),
   catStyle('cat-skin-bath', 'Cat skin bath', ['hairless'], {}, ['bath', 'nails', 'ears']),
@@ -317,8 +384,9 @@ function dogStyle(
   finish: Style['finish'],
   cuts: Style['cuts'],
   services: Style['services'],
+  planB?: PlanB,
 ): Style {
-  return { id, name, species: 'dog', coats, cuts, finish, services };
+  return complete({ id, name, species: 'dog', coats, cuts, finish, services, planB });
 }
 
 function catStyle(
@@ -328,5 +396,15 @@ function catStyle(
   cuts: Style['cuts'],
   services: Style['services'],
 ): Style {
-  return { id, name, species: 'cat', coats, cuts, finish: 'tidy', services };
+  // A cat that has had enough has had enough: the bath goes before the coat is cared for.
+  const planB: PlanB = {
+    services: { bath: 'leave', ears: 'ifAllowed', deshed: 'must' },
+    regions: {},
+  };
+  return complete({ id, name, species: 'cat', coats, cuts, finish: 'tidy', services, planB });
+}
+
+/** Every starting style carries its whole plan B, so that a business sees what it edits. */
+function complete(style: Style): Style {
+  return { ...style, planB: planBOf(style) };
 }

@@ -33,7 +33,7 @@ export type Region =
   | 'tail'
   | 'sanitary';
 
-/** `with` growth leaves about twice what the same blade leaves `against` it. */
+/** `with` growth a blade leaves about twice what it leaves `against` it, a guide comb a little more. */
 export type Direction = 'with' | 'against';
 
 /**
@@ -51,6 +51,18 @@ export type Service = 'bath' | 'deshed' | 'nails' | 'ears' | 'sanitary' | 'pads'
 /** `tidy`: neat, quick · `pet`: the usual good finish · `full`: every surface finished by hand. */
 export type FinishLevel = 'tidy' | 'pet' | 'full';
 
+/**
+ * What stays of a style when the pet has had enough: `must` is done in any case, `ifAllowed` while
+ * the pet bears it, `leave` goes first.
+ */
+export type PlanBWord = 'must' | 'ifAllowed' | 'leave';
+
+/** A style's plan B. Services and regions not named are `ifAllowed`. */
+export interface PlanB {
+  services: Partial<Record<Service, PlanBWord>>;
+  regions: Partial<Record<Region, PlanBWord>>;
+}
+
 /** How a pet is groomed: a cut plan by region, a finish and services. Names are our own. */
 export interface Style {
   id: string;
@@ -58,11 +70,16 @@ export interface Style {
   species: Species;
   /** Coats it suits; others may be asked for, and may raise a caution. */
   coats: readonly CoatType[];
-  /** Regions not named are left as they are. */
+  /** Regions not named are not touched; `leave` says that the region is kept long on purpose. */
   cuts: Partial<Record<Region, RegionCut>>;
   finish: FinishLevel;
   services: readonly Service[];
+  /** What to keep when the pet's time on the table runs out; left out = the usual order, `planBOf`. */
+  planB?: PlanB;
 }
+
+/** `short` is short-nosed (brachycephalic): heat and dryers are a danger. */
+export type HeadShape = 'short' | 'medium' | 'long';
 
 /** A breed or variety. Facts only; sources in `breeds.ts`. */
 export interface BreedFacts {
@@ -76,7 +93,8 @@ export interface BreedFacts {
   maxGrams: number;
   coatType: CoatType;
   undercoat: boolean;
-  /** Short-nosed (brachycephalic): heat and dryers are a danger. */
+  headShape: HeadShape;
+  /** The same as `headShape` being `short`. */
   shortNosed: boolean;
   /** Regions with more (or less) coat-bearing surface than the plain body; 1000 = plain. */
   regionPermille: Partial<Record<Region, number>>;
@@ -95,9 +113,14 @@ export interface CoatState {
   mattingByRegion?: Partial<Record<Region, MattingLevel>>;
   /** Loose undercoat: 0 usual · 1 shedding · 2 blowing coat. */
   undercoatLoad: 0 | 1 | 2;
+  /** Where it differs; regions not named are as the whole pet. The same for soil and length. */
+  undercoatLoadByRegion?: Partial<Record<Region, 0 | 1 | 2>>;
   /** 0 usual · 1 dirty · 2 greasy, muddy or skunked. */
   soil: 0 | 1 | 2;
+  soilByRegion?: Partial<Record<Region, 0 | 1 | 2>>;
+  /** As measured; null = grown from the last style (see `coatLengths`). */
   lengthTenthsMm: number | null;
+  lengthByRegionTenthsMm?: Partial<Record<Region, number>>;
 }
 
 export type Temperament = 'calm' | 'restless' | 'anxious' | 'nippy';
@@ -167,6 +190,10 @@ export interface PetFacts {
   firstVisit: boolean;
   /** Whole weeks since the last groom; null = not known. */
   weeksSinceLast: number | null;
+  /** Cut plan of the last groom, which the coat has grown from; left out = the style asked for. */
+  lastCuts?: Style['cuts'] | null;
+  /** Most seconds this pet bears on the table; null or left out = by age and health. */
+  tableLimitSeconds?: number | null;
 }
 
 /** Groups of steps: what a groomer has a pace for, and what a tower on the day strip is filled with. */
@@ -186,8 +213,11 @@ export type StepKey =
   | 'dry'
   | 'brush'
   | 'clip'
+  | 'comb'
   | 'scissor'
+  | 'head'
   | 'blend'
+  | 'rest'
   | 'wrap';
 
 /** Why a step takes longer or shorter than usual for that size: short words, signed seconds. */
@@ -210,6 +240,48 @@ export interface StepForecast {
   /** Height of the tower on the day strip: how much attention it takes. Scissor work is 1000. */
   attentionPermille: number;
   reasons: Reason[];
+  /** Scissor work region by region, in order: one is finished before the next is begun. */
+  sections?: ScissorSection[];
+}
+
+/** One region's part of the scissor step. The sections' medians add to the step's. */
+export interface ScissorSection {
+  region: Region;
+  medianSeconds: number;
+}
+
+/** Guide-comb passes ahead of the scissors, each leaving less for them with falling returns. */
+export interface CombPlan {
+  /** The most passes over any region. */
+  passes: number;
+  /** Regions worth a pass, and how many; the others are scissored straight away. */
+  byRegion: { region: Region; passes: number }[];
+  /** Usual seconds saved against scissors alone, the passes paid: before handling and pace. */
+  savedSeconds: number;
+  /** "2 guide-comb passes over legs save 6 min" */
+  words: string;
+}
+
+/** A border between two lengths that must be melted into each other. */
+export interface BlendBorder {
+  between: [Region, Region];
+  lengthMm: number;
+  /** Blade steps between the two lengths. */
+  steps: number;
+  seconds: number;
+}
+
+/** The style asks for more time on the table than the pet should bear. */
+export interface OverTable {
+  overSeconds: number;
+  /** What is left out, in words, and for the screens. */
+  words: string;
+  leftServices: Service[];
+  leftRegions: Region[];
+  /** Time on the table under plan B. */
+  tableSeconds: number;
+  /** Plan B keeps within the limit; if not, split the work over two visits. */
+  fits: boolean;
 }
 
 /** A log-normal by its moments and usual quantiles. `p50Seconds` equals `medianSeconds`. */
@@ -245,6 +317,16 @@ export interface PlanChange {
 export interface PetForecast extends Distribution {
   steps: StepForecast[];
   planChange: PlanChange | null;
+  /** null: nothing for a guide comb to take before the scissors. */
+  combPlan: CombPlan | null;
+  /** Borders that need blending, longest work first. */
+  borders: BlendBorder[];
+  /** Coat on arrival by region, measured or grown, in tenths of a millimetre. */
+  coatTenthsMm: Record<Region, number>;
+  /** Usual seconds in tub and on table, without check-in, rests and wrap-up. */
+  tableSeconds: number;
+  tableLimitSeconds: number;
+  overTable: OverTable | null;
   waterMl: number;
   heaviestGrams: number;
   needs: Skill[];
@@ -254,5 +336,9 @@ export interface PetForecast extends Distribution {
   modelVersion: string;
 }
 
-/** 1000 = usual pace, 900 = a tenth faster. Families not named are at 1000. */
+/**
+ * A groomer's pace: 1000 = usual, 900 = a tenth faster. Families not named are at 1000. Pace is about
+ * hands, never about the pet: rests, mat work (bound by what the pet bears), refused dematting and
+ * visits ended for the pet are never scaled by it and never count against it (`pacelessSteps`).
+ */
 export type PaceByFamily = Partial<Record<StepFamily, number>>;
