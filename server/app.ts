@@ -3,6 +3,7 @@ import cookieParser from 'cookie-parser';
 import express, { type Express } from 'express';
 import helmet from 'helmet';
 import { pinoHttp } from 'pino-http';
+import { QueryTypes } from 'sequelize';
 import { tileRouter } from '#server/area/tileRouter.ts';
 import { clock } from '#server/clock.ts';
 import { database } from '#server/db/database.ts';
@@ -45,7 +46,7 @@ export function buildApp(): Express {
   app.use(cookieParser());
   app.use('/api', refuseOtherOrigins, express.json({ limit: '1mb' }), readActor);
   app.get('/api/health', async (_req, res) => {
-    await database.query('SELECT 1');
+    await database.query('SELECT 1', { type: QueryTypes.SELECT });
     res.json({ ready: true, now: clock.now().toISOString() });
   });
   app.get('/api/docs', (_req, res) => void res.json(openApiPage()));
