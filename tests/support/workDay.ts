@@ -1,4 +1,6 @@
 import type { Express } from 'express';
+import type { z } from 'zod';
+import { updateBusiness } from '#shared/api/business.ts';
 import { getDay, moveVisit, sendRuns } from '#shared/api/days.ts';
 import { addRunEvents, type RunEvent } from '#shared/api/runs.ts';
 import { inBusiness } from '#server/db/database.ts';
@@ -27,10 +29,16 @@ interface Booking {
  * A day sent to van Otter at 6:00 with the bookings in order, ready to be worked. The server's
  * clock stands on that day; `at` moves it and signs the dispatcher in again.
  */
-export async function workDay(app: Express, bookings: Booking[], date = tomorrow()) {
+export async function workDay(
+  app: Express,
+  bookings: Booking[],
+  business: z.input<(typeof updateBusiness)['body']> = {},
+) {
+  const date = tomorrow();
   setClock(date, '6:00');
   const built = await buildBusiness(app, date);
   const { client, vans, groomers } = built;
+  if (Object.keys(business).length > 0) await client.must(updateBusiness, { body: business });
   const email = client.session!.user.email;
   const businessId = client.session!.business.id;
   const otter = vans[0]!.id;
