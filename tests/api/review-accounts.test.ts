@@ -135,7 +135,7 @@ describe('sign-ins', () => {
     const broken = `${text('{"alg":"HS256","typ":"JWT"}')}.${text('no json')}.c2ln`;
     for (const token of [broken, 'a.b.c', 'x', `${text('{"alg":"none","kid":"k1"}')}.e30.`]) {
       const call = request(app).get(getSession.path).set('Cookie', `furlong_access=${token}`);
-      expect((await call).status, token).toBe(401);
+      expect((await call).status, `${token}`).toBe(401);
       const refresh = request(app).post(refreshSession.path);
       expect((await refresh.set('Cookie', `furlong_refresh=${token}`)).status).toBe(401);
     }
