@@ -14,7 +14,7 @@ import { openApiPage } from '#server/http/openApiPage.ts';
 import { refuseOtherHosts } from '#server/http/refuseOtherHosts.ts';
 import { serveClient } from '#server/http/serveClient.ts';
 import { readActor } from '#server/http/sessionCookies.ts';
-import { log } from '#server/log.ts';
+import { log, logSerializers } from '#server/log.ts';
 import { areaRoutes } from '#server/routes/areaRoutes.ts';
 import { arrivalRoutes } from '#server/routes/arrivalRoutes.ts';
 import { dayRoutes } from '#server/routes/dayRoutes.ts';
@@ -38,7 +38,14 @@ export function buildApp(): Express {
     req.id = newId();
     next();
   });
-  app.use(pinoHttp({ logger: log, genReqId: (req) => req.id, autoLogging: !env.isTest }));
+  app.use(
+    pinoHttp({
+      logger: log,
+      genReqId: (req) => req.id,
+      autoLogging: !env.isTest,
+      serializers: logSerializers,
+    }),
+  );
   app.use(helmet(headers));
   app.use(refuseOtherHosts);
   app.use(tileRouter());
