@@ -35,7 +35,7 @@ function fromParser(error: unknown): AppError | null {
   if (error instanceof URIError)
     return new AppError('badInput', 'The call could not be read: its address is not well formed.');
   const { status, expose } = (error ?? {}) as { status?: number; expose?: boolean };
-  if (!expose || status === undefined || status >= 500) return null;
+  if (expose === undefined || status === undefined || status >= 500) return null;
   if (status === 413) return new AppError('tooLarge', 'This is more than one call may carry.');
   if (status === 403 || status === 404 || status === 405)
     return new AppError('notFound', 'There is no such page or thing here.');

@@ -17,15 +17,12 @@ beforeAll(async () => {
   client = await new ApiClient(app).signUp();
 });
 
-/** Every refusal has one shape and is never kept by a cache. */
-function expectError(answer: request.Response, status: number, code: string) {
-  expect([answer.status, (answer.body as { error?: { code: string } }).error?.code]).toEqual([
-    status,
-    code,
-  ]);
-  expect(errorBody.strict().safeParse(answer.body).success).toBe(true);
-  expect(answer.headers['content-type']).toContain('application/json');
-  expect(answer.headers['cache-control']).toBe('no-store');
+/** "400 badInput" of a refusal in the one shape all have, which no cache keeps; else what is wrong. */
+function refusalOf({ status, body, headers }: request.Response): string {
+  const parsed = errorBody.strict().safeParse(body);
+  if (!parsed.success) return `${status}, not in the shape: ${parsed.error.message}`;
+  if (headers['cache-control'] !== 'no-store') return `${status}, may be cached`;
+  return `${status} ${parsed.data.error.code}`;
 }
 
 const post = () =>
@@ -34,52 +31,48 @@ const post = () =>
 describe('calls nobody can read', () => {
   it('bad JSON, JSON that is no object, and bodies of other kinds are 400', async () => {
     for (const body of ['{', '{"a":}', '"text"', '7', 'null', '\u0000'])
-      expectError(await post().type('json').send(body), 400, 'badInput');
+      expect(refusalOf(await post().type('json').send(body))).toBe('400 badInput');
     for (const body of ['[]', '{}'])
-      expectError(await post().type('json').send(body), 400, 'badInput');
-    expectError(await post().type('text/plain').send('kind=depot'), 400, 'badInput');
-    expectError(await post().type('form').send('kind=depot'), 400, 'badInput');
-    expectError(
-      await post().set('Content-Type', 'application/json; charset=klingon').send('{}'),
-      400,
-      'badInput',
-    );
-    expectError(
-      await post().type('json').set('Content-Encoding', 'snappy').send('{}'),
-      400,
-      'badInput',
+      expect(refusalOf(await post().type('json').send(body))).toBe('400 badInput');
+    expect(refusalOf(await post().type('text/plain').send('kind=depot'))).toBe('400 badInput');
+    expect(refusalOf(await post().type('form').send('kind=depot'))).toBe('400 badInput');
+    expect(
+      refusalOf(await post().set('Content-Type', 'application/json; charset=klingon').send('{}')),
+    ).toBe('400 badInput');
+    expect(refusalOf(await post().type('json').set('Content-Encoding', 'snappy').send('{}'))).toBe(
+      '400 badInput',
     );
   });
 
   it('2 MB are 413, signed in or not', async () => {
     const body = JSON.stringify({ name: 'x'.repeat(2 * 1024 * 1024) });
-    expectError(await post().type('json').send(body), 413, 'tooLarge');
-    expectError(await request(app).post(signIn.path).type('json').send(body), 413, 'tooLarge');
+    expect(refusalOf(await post().type('json').send(body))).toBe('413 tooLarge');
+    expect(refusalOf(await request(app).post(signIn.path).type('json').send(body))).toBe(
+      '413 tooLarge',
+    );
   });
 
   it('odd escapes, doubled queries and broken cookies are refused, never a fault of ours', async () => {
-    expectError(await client.agent.get('/api/days/%E0%A4%A'), 400, 'badInput');
-    expectError(await request(app).get('/a/%E0%A4%A'), 400, 'badInput');
-    expectError(await client.agent.get('/api/households?page=abc'), 400, 'badInput');
-    expectError(await client.agent.get('/api/households?page=1&page=2'), 400, 'badInput');
-    expectError(await client.agent.get('/api/households?page=0'), 400, 'badInput');
+    expect(refusalOf(await client.agent.get('/api/days/%E0%A4%A'))).toBe('400 badInput');
+    expect(refusalOf(await request(app).get('/a/%E0%A4%A'))).toBe('400 badInput');
+    expect(refusalOf(await client.agent.get('/api/households?page=abc'))).toBe('400 badInput');
+    expect(refusalOf(await client.agent.get('/api/households?page=1&page=2'))).toBe('400 badInput');
+    expect(refusalOf(await client.agent.get('/api/households?page=0'))).toBe('400 badInput');
     for (const cookie of [
       'furlong_access=j:{"a":1}',
       'furlong_access=%E0%A4%A',
       'furlong_access=a.b.c',
     ])
-      expectError(
-        await request(app).get('/api/session').set('Cookie', cookie),
-        401,
-        'signInNeeded',
+      expect(refusalOf(await request(app).get('/api/session').set('Cookie', cookie))).toBe(
+        '401 signInNeeded',
       );
     const deep = `${'{"a":'.repeat(5000)}1${'}'.repeat(5000)}`;
-    expectError(await post().type('json').send(deep), 400, 'badInput');
+    expect(refusalOf(await post().type('json').send(deep))).toBe('400 badInput');
   });
 
   it('names every wrong field, and no prototype can be slipped in', async () => {
     const answer = await post().type('json').send('{"__proto__":{"kind":"depot"},"lat":91}');
-    expectError(answer, 400, 'badInput');
+    expect(refusalOf(answer)).toBe('400 badInput');
     expect(Object.keys((answer.body as { error: { fields: object } }).error.fields).sort()).toEqual(
       ['kind', 'lat', 'lon', 'name'],
     );
@@ -89,10 +82,10 @@ describe('calls nobody can read', () => {
 describe('paths', () => {
   it('unknown ones under /api are JSON 404 for every method, HEAD has no body', async () => {
     for (const method of ['get', 'post', 'put', 'patch', 'delete'] as const)
-      expectError(await client.agent[method]('/api/nothing'), 404, 'notFound');
-    expectError(await client.agent.get('/api'), 404, 'notFound');
+      expect(refusalOf(await client.agent[method]('/api/nothing'))).toBe('404 notFound');
+    expect(refusalOf(await client.agent.get('/api'))).toBe('404 notFound');
     // The path exists, the method does not.
-    expectError(await client.agent.delete('/api/health'), 404, 'notFound');
+    expect(refusalOf(await client.agent.delete('/api/health'))).toBe('404 notFound');
     const head = await request(app).head('/api/health');
     expect([head.status, head.text]).toEqual([200, undefined]);
     expect((await request(app).head('/api/session')).status).toBe(401);
@@ -113,11 +106,13 @@ describe('paths', () => {
       expect(page.status).toBe(200);
       expect(page.headers['content-type']).toContain('text/html');
       expect(page.headers['cache-control']).toBe('no-cache');
-    } else expectError(page, 503, 'notReady');
-    expectError(await request(app).get('/assets/nothing-1a2b.js'), 404, 'notFound');
-    expectError(await request(app).get('/assets/..%2f..%2fpackage.json'), 404, 'notFound');
+    } else expect(refusalOf(page)).toBe('503 notReady');
+    expect(refusalOf(await request(app).get('/assets/nothing-1a2b.js'))).toBe('404 notFound');
+    expect(refusalOf(await request(app).get('/assets/..%2f..%2fpackage.json'))).toBe(
+      '404 notFound',
+    );
     expect((await request(app).post('/assets/x.js')).status).toBe(405);
-    expectError(await request(app).get('/src/arrival.html'), 404, 'notFound');
+    expect(refusalOf(await request(app).get('/src/arrival.html'))).toBe('404 notFound');
     const outside = await request(app).get('/..%2fpackage.json');
     expect(outside.text).not.toContain('"dependencies"');
   });
@@ -155,7 +150,7 @@ describe('a fault of ours', () => {
       new Error('ER_SECRET: password of root is hunter2 at /srv/furlong/server/x.ts'),
     );
     const answer = await post().send({ kind: 'depot', name: 'Yard', lat: 41, lon: -36 });
-    expectError(answer, 500, 'broken');
+    expect(refusalOf(answer)).toBe('500 broken');
     expect(answer.text).not.toMatch(/SECRET|hunter2|\/srv|stack|at /);
     const { requestId } = (answer.body as { error: { requestId: string } }).error;
     expect(requestId).toMatch(/^[0-9a-f-]{36}$/);
@@ -167,15 +162,18 @@ describe('a fault of ours', () => {
 describe('the fakes', () => {
   it('are active only when wanted, on loopback and not in production', () => {
     const active = (source: Record<string, string>) =>
-      fakesActive(readEnv({ PUBLIC_URL: 'https://vans.example.org', ...source } as never));
-    expect(active({ FURLONG_FAKES: '1' })).toBe(true);
-    expect(active({ FURLONG_FAKES: '1', HOST: 'localhost' })).toBe(true);
-    expect(active({ FURLONG_FAKES: '1', HOST: '::1' })).toBe(true);
-    expect(active({})).toBe(false);
+      fakesActive(readEnv({ FURLONG_FAKES: '1', ...source } as never));
+    const PUBLIC_URL = 'https://vans.example.org';
+    expect(active({})).toBe(true);
+    expect(active({ HOST: 'localhost' })).toBe(true);
+    expect(active({ HOST: '::1' })).toBe(true);
     expect(active({ FURLONG_FAKES: '0' })).toBe(false);
-    expect(active({ FURLONG_FAKES: '1', HOST: '0.0.0.0' })).toBe(false);
-    expect(active({ FURLONG_FAKES: '1', HOST: '192.168.1.9' })).toBe(false);
-    expect(active({ FURLONG_FAKES: '1', NODE_ENV: 'production' })).toBe(false);
+    expect(active({ HOST: '0.0.0.0', PUBLIC_URL })).toBe(false);
+    expect(active({ HOST: '192.168.1.9', PUBLIC_URL })).toBe(false);
+    // On loopback behind a proxy: the whole world reaches it.
+    expect(active({ PUBLIC_URL })).toBe(false);
+    expect(active({ NODE_ENV: 'production' })).toBe(false);
+    expect(fakesActive(readEnv({}))).toBe(false);
   });
 
   it('are 404 like any unknown page when they are not', async () => {
@@ -185,12 +183,10 @@ describe('the fakes', () => {
       try {
         Object.assign(mutable, change);
         for (const path of ['/api/fake/phones', '/api/fake/letters'])
-          expectError(await request(app).get(path), 404, 'notFound');
-        expectError(
-          await request(app).post('/api/fake/phones/reply').send({ nonsense: true }),
-          404,
-          'notFound',
-        );
+          expect(refusalOf(await request(app).get(path))).toBe('404 notFound');
+        expect(
+          refusalOf(await request(app).post('/api/fake/phones/reply').send({ nonsense: true })),
+        ).toBe('404 notFound');
         const session = await client.renew();
         expect(session.fakesActive).toBe(false);
       } finally {
