@@ -47,7 +47,7 @@ export function inTransaction<Result>(fn: () => Promise<Result>): Promise<Result
 
 /**
  * Unscoped reading and writing of business tables. Named unsafe on purpose: only for finding a
- * business by a secret (a link, a sign-in) and for the outbox's ticker.
+ * business by a secret (a link, a sign-in) and for the tickers (outbox, upkeep).
  */
 export function unsafeAcrossBusinesses<Result>(fn: () => Promise<Result>): Promise<Result> {
   return withScope('across', () => (hasTransaction() ? fn() : transact(fn)));
