@@ -11,9 +11,10 @@ import { env } from '#server/env.ts';
 import { answerErrors, answerUnknown } from '#server/http/answerErrors.ts';
 import { refuseOtherOrigins } from '#server/http/csrf.ts';
 import { openApiPage } from '#server/http/openApiPage.ts';
+import { refuseOtherHosts } from '#server/http/refuseOtherHosts.ts';
 import { serveClient } from '#server/http/serveClient.ts';
 import { readActor } from '#server/http/sessionCookies.ts';
-import { log } from '#server/log.ts';
+import { log, logSerializers } from '#server/log.ts';
 import { areaRoutes } from '#server/routes/areaRoutes.ts';
 import { arrivalRoutes } from '#server/routes/arrivalRoutes.ts';
 import { dayRoutes } from '#server/routes/dayRoutes.ts';
@@ -37,15 +38,23 @@ export function buildApp(): Express {
     req.id = newId();
     next();
   });
-  app.use(pinoHttp({ logger: log, genReqId: (req) => req.id, autoLogging: !env.isTest }));
+  app.use(
+    pinoHttp({
+      logger: log,
+      genReqId: (req) => req.id,
+      autoLogging: !env.isTest,
+      serializers: logSerializers,
+    }),
+  );
   app.use(helmet(headers));
+  app.use(refuseOtherHosts);
   app.use(tileRouter());
   app.use(compression());
   app.use(webhookRoutes);
   app.use(cookieParser());
   app.use('/api', refuseOtherOrigins, express.json({ limit: '1mb' }), readActor);
   app.get('/api/health', async (_req, res) => {
-    await database.query('SELECT 1');
+    await database.authenticate();
     res.json({ ready: true, now: clock.now().toISOString() });
   });
   app.get('/api/docs', (_req, res) => void res.json(openApiPage()));

@@ -4,7 +4,7 @@ import { join, resolve } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { z } from 'zod';
 
-const loopback = ['127.0.0.1', '::1', 'localhost'];
+const loopback = ['127.0.0.1', '::1', '[::1]', 'localhost'];
 
 const schema = z.object({
   DATABASE_URL: z
@@ -13,7 +13,10 @@ const schema = z.object({
     .default('mariadb://root@127.0.0.1:3306/furlong'),
   PORT: z.coerce.number().int().min(0).max(65535).default(4173),
   HOST: z.string().default('127.0.0.1'),
-  PUBLIC_URL: z.url('must be an address like https://vans.example.org').optional(),
+  PUBLIC_URL: z
+    .string()
+    .regex(/^https?:\/\/[^/?#\s]+\/?$/, 'must be an address like https://vans.example.org')
+    .optional(),
   FURLONG_DATA: z.string().optional(),
   FURLONG_FAKES: z.enum(['0', '1']).default('0'),
   FURLONG_KEYS: z.string().optional(),
@@ -40,6 +43,10 @@ export function readEnv(source: NodeJS.ProcessEnv) {
   const isProduction = value.NODE_ENV === 'production';
   if (isProduction && value.FURLONG_CLOCK_OFFSET_MS !== 0)
     throw new Error('FURLONG_CLOCK_OFFSET_MS must stay unset in production.');
+  if (!isLoopbackHost(value.HOST) && !value.PUBLIC_URL)
+    throw new Error(
+      `PUBLIC_URL must be set when HOST is ${value.HOST}: links in letters and texts begin with it, like https://vans.example.org.`,
+    );
   const rootFolder = fileURLToPath(new URL('..', import.meta.url));
   return {
     databaseUrl: value.DATABASE_URL,
@@ -49,12 +56,20 @@ export function readEnv(source: NodeJS.ProcessEnv) {
     rootFolder,
     dataFolder: resolve(rootFolder, value.FURLONG_DATA ?? '.data'),
     fakesWanted: value.FURLONG_FAKES === '1',
-    isLoopback: loopback.includes(value.HOST),
+    // Behind a proxy, what listens on loopback is open to whoever reaches the public address.
+    isLoopback:
+      isLoopbackHost(value.HOST) &&
+      (value.PUBLIC_URL === undefined || isLoopbackHost(new URL(value.PUBLIC_URL).hostname)),
     isProduction,
     isTest: value.NODE_ENV === 'test',
     clockOffsetMs: value.FURLONG_CLOCK_OFFSET_MS,
     keysText: value.FURLONG_KEYS ?? null,
   };
+}
+
+/** True for this machine's own names: others cannot reach a server that is known by no other. */
+export function isLoopbackHost(host: string): boolean {
+  return loopback.includes(host);
 }
 
 /** Demo and fake pages exist only with fakes wanted, on loopback, and never in production. */
@@ -80,11 +95,16 @@ export function parseKeys(text: string): KeyRing {
     .map((part) => {
       const [id, encoded] = part.split(':');
       const secret = Buffer.from(encoded ?? '', 'base64');
-      if (!id || secret.length !== 32)
-        throw new Error('FURLONG_KEYS must be id:key pairs, each key 32 bytes in base64.');
+      // A sealed text begins with its key's id and a dot.
+      if (!id || !/^[\w-]{1,20}$/.test(id) || secret.length !== 32)
+        throw new Error(
+          'FURLONG_KEYS must be id:key pairs, each id letters and digits, each key 32 bytes in base64.',
+        );
       return { id, secret };
     });
   if (keys.length === 0) throw new Error('FURLONG_KEYS must hold at least one id:key pair.');
+  if (new Set(keys.map(({ id }) => id)).size < keys.length)
+    throw new Error('FURLONG_KEYS must hold each id once.');
   return { keys };
 }
 

@@ -1,5 +1,5 @@
 import { AsyncLocalStorage } from 'node:async_hooks';
-import { Sequelize } from 'sequelize';
+import { Sequelize, Transaction } from 'sequelize';
 import { env } from '#server/env.ts';
 import { log } from '#server/log.ts';
 import { currentScope, hasTransaction, withScope } from './scope.ts';
@@ -19,19 +19,25 @@ export const database = new Sequelize(env.databaseUrl, {
   dialectOptions: { connectTimeout: 5000, bigIntAsNumber: true, insertIdAsNumber: true },
 });
 
+const { READ_COMMITTED, REPEATABLE_READ } = Transaction.ISOLATION_LEVELS;
+
 /**
  * Opens the business's scope and a transaction around `fn`, or joins the transaction already open;
- * another business inside it is a programming error.
+ * another business inside it is a programming error. A use-case that only reads sees everything as
+ * of one moment. One that writes sees what is committed: after waiting for a lock it must find what
+ * the holder wrote, which a picture taken before the wait would hide.
  */
 export async function inBusiness<Result>(
   businessId: string,
   fn: () => Promise<Result>,
+  options: { onlyReads?: boolean } = {},
 ): Promise<Result> {
   const scope = currentScope();
   if (scope !== null && scope !== 'across' && scope !== businessId)
     throw new Error('inBusiness: already inside another business');
   // Joining also matters for rows just written: a second connection would wait for the first.
-  return withScope(businessId, () => (hasTransaction() ? fn() : transact(fn)));
+  const isolation = options.onlyReads ? REPEATABLE_READ : READ_COMMITTED;
+  return withScope(businessId, () => (hasTransaction() ? fn() : transact(fn, isolation)));
 }
 
 /** A transaction over global tables only (users, sessions): scoped tables still refuse. */
@@ -41,7 +47,7 @@ export function inTransaction<Result>(fn: () => Promise<Result>): Promise<Result
 
 /**
  * Unscoped reading and writing of business tables. Named unsafe on purpose: only for finding a
- * business by a secret (a link, a sign-in) and for the outbox's ticker.
+ * business by a secret (a link, a sign-in) and for the tickers (outbox, upkeep).
  */
 export function unsafeAcrossBusinesses<Result>(fn: () => Promise<Result>): Promise<Result> {
   return withScope('across', () => (hasTransaction() ? fn() : transact(fn)));
@@ -56,9 +62,12 @@ export function afterCommit(fn: () => void): void {
   else fn();
 }
 
-async function transact<Result>(fn: () => Promise<Result>): Promise<Result> {
+async function transact<Result>(
+  fn: () => Promise<Result>,
+  isolationLevel = READ_COMMITTED,
+): Promise<Result> {
   const list: (() => void)[] = [];
-  const result = await afterCommits.run(list, () => withDeadlockRetry(list, fn));
+  const result = await afterCommits.run(list, () => withDeadlockRetry(list, fn, isolationLevel));
   for (const run of list) run();
   return result;
 }
@@ -67,11 +76,12 @@ async function transact<Result>(fn: () => Promise<Result>): Promise<Result> {
 async function withDeadlockRetry<Result>(
   list: (() => void)[],
   fn: () => Promise<Result>,
+  isolationLevel: Transaction.ISOLATION_LEVELS,
 ): Promise<Result> {
   for (let attempt = 1; ; attempt++) {
     try {
       list.length = 0;
-      return await database.transaction(() => fn());
+      return await database.transaction({ isolationLevel }, () => fn());
     } catch (error) {
       if (attempt >= 4 || !isDeadlock(error)) throw error;
     }

@@ -8,8 +8,14 @@ import type { Migration } from './table.ts';
 
 const folder = fileURLToPath(new URL('./migrations', import.meta.url));
 
-/** Brings the schema up to date; safe to run again, and by two processes (an advisory lock). */
-export async function migrate(onStep: (name: string) => void = () => {}): Promise<number> {
+/**
+ * Brings the schema up to date, or with 'down' takes it all back; answers the number of steps. Safe
+ * to run again, and by two processes (an advisory lock).
+ */
+export async function migrate(
+  onStep: (name: string) => void = () => {},
+  direction: 'up' | 'down' = 'up',
+): Promise<number> {
   const files = (await readdir(folder)).filter((file) => file.endsWith('.ts')).sort();
   const umzug = new Umzug({
     migrations: files.map((file) => ({
@@ -21,6 +27,7 @@ export async function migrate(onStep: (name: string) => void = () => {}): Promis
     logger: undefined,
   });
   umzug.on('migrated', ({ name }) => onStep(name));
+  umzug.on('reverted', ({ name }) => onStep(name));
   return database.transaction(async (lock) => {
     const rows = await database.query<{ got: number }>(
       "SELECT GET_LOCK('furlong-migrate', 60) AS got",
@@ -32,7 +39,7 @@ export async function migrate(onStep: (name: string) => void = () => {}): Promis
     if (Number(rows[0]?.got) !== 1)
       throw new Error('Another process is still migrating the database.');
     try {
-      return (await umzug.up()).length;
+      return (await (direction === 'up' ? umzug.up() : umzug.down({ to: 0 }))).length;
     } finally {
       await database.query("DO RELEASE_LOCK('furlong-migrate')", { transaction: lock });
     }

@@ -30,7 +30,16 @@ export function scopeModel<M extends Model>(model: ModelStatic<M>): void {
   model.addHook('beforeSave', own);
   model.addHook('beforeDestroy', own);
   model.addHook('beforeBulkCreate', (rows: Model[]) => rows.forEach(own));
+  for (const method of unhooked)
+    Object.defineProperty(model, method, {
+      value: () => {
+        throw new Error(`${name}.${method} would escape the business: find and save rows instead`);
+      },
+    });
 }
+
+/** Sequelize runs no hook of ours before these. */
+const unhooked = ['increment', 'decrement', 'upsert', 'max', 'min', 'sum', 'truncate'];
 
 function needScope(name: string): string {
   const scope = currentScope();

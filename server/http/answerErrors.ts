@@ -27,17 +27,17 @@ export const answerErrors: ErrorRequestHandler = (error: unknown, req, res, next
     });
 };
 
-/** Express's body parser and router throw their own errors for bad JSON, size and odd escapes. */
+/**
+ * Express's body parser, router and file server throw their own errors for bad JSON, size, odd
+ * escapes and files that are not there. Whatever they blame on the caller is no fault of ours.
+ */
 function fromParser(error: unknown): AppError | null {
-  const { type, status } = (error ?? {}) as { type?: string; status?: number };
-  if (type === 'entity.too.large')
-    return new AppError('tooLarge', 'This is more than one call may carry.');
-  if (
-    type?.startsWith('entity.') ||
-    type?.startsWith('encoding.') ||
-    error instanceof URIError ||
-    status === 400
-  )
-    return new AppError('badInput', 'The call could not be read: the body must be JSON.');
-  return null;
+  if (error instanceof URIError)
+    return new AppError('badInput', 'The call could not be read: its address is not well formed.');
+  const { status, expose } = (error ?? {}) as { status?: number; expose?: boolean };
+  if (expose === undefined || status === undefined || status >= 500) return null;
+  if (status === 413) return new AppError('tooLarge', 'This is more than one call may carry.');
+  if (status === 403 || status === 404 || status === 405)
+    return new AppError('notFound', 'There is no such page or thing here.');
+  return new AppError('badInput', 'The call could not be read: the body must be JSON.');
 }

@@ -37,7 +37,7 @@ export function handle<E extends Endpoint>(
     const actor = needActor(req, ability);
     needCsrf(req, actor.sessionId);
     const call = { ...readInput(endpoint, req), now: clock.now(), req, res, actor };
-    return actAs(actor, () => fn(call));
+    return actAs(actor, () => fn(call), { onlyReads: endpoint.method === 'GET' });
   });
 }
 

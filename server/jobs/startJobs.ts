@@ -1,26 +1,45 @@
 import { schedule } from 'node-cron';
 import { clock } from '#server/clock.ts';
 import { log } from '#server/log.ts';
+import { resealGateCodes } from '#server/services/households/resealGateCodes.ts';
 import { sendDueTexts } from '#server/services/texts/sendDueTexts.ts';
+import { removeExpired } from '#server/services/upkeep/removeExpired.ts';
 
 /**
- * Starts the tickers: every two seconds the texts that are due. A tick never overlaps the one
- * before. `stop` ends them and waits for the tick under way.
+ * Starts the tickers: every two seconds the texts that are due; at start and every hour the upkeep. A
+ * tick never overlaps the one before. `stop` ends them and waits for the ticks under way.
  */
 export function startJobs(origin: string): { stop(): Promise<void> } {
+  const tickers = [
+    startTicker('texts', '*/2 * * * * *', () => sendAll(origin)),
+    startTicker('upkeep', '17 * * * *', keepUp),
+  ];
+  // A key taken to the front of the ring counts from this start on.
+  void tickers[1]!.tick();
+  return {
+    async stop() {
+      await Promise.all(tickers.map((ticker) => ticker.stop()));
+    },
+  };
+}
+
+function startTicker(name: string, pattern: string, work: () => Promise<void>) {
   let running: Promise<void> | null = null;
   const tick = async () => {
     if (running) return;
-    running = sendAll(origin).finally(() => (running = null));
+    running = work()
+      .catch((error: unknown) => log.error({ err: error, name }, 'a ticker failed; it tries again'))
+      .finally(() => (running = null));
     await running;
   };
-  const task = schedule('*/2 * * * * *', tick, {
-    name: 'texts',
+  const task = schedule(pattern, tick, {
+    name,
     noOverlap: true,
     // A busy machine may miss a second; the next tick finds everything that is due.
     suppressMissedWarning: true,
   });
   return {
+    tick,
     async stop() {
       await task.destroy();
       await running;
@@ -29,10 +48,11 @@ export function startJobs(origin: string): { stop(): Promise<void> } {
 }
 
 async function sendAll(origin: string): Promise<void> {
-  try {
-    // More may be waiting than one batch holds; rows just handled are held back by their lease.
-    while ((await sendDueTexts({ now: clock.now(), dice: Math.random, origin })) > 0);
-  } catch (error) {
-    log.error({ err: error }, 'the texts ticker failed; it tries again');
-  }
+  // More may be waiting than one batch holds; rows just handled are held back by their lease.
+  while ((await sendDueTexts({ now: clock.now(), dice: Math.random, origin })) > 0);
+}
+
+async function keepUp(): Promise<void> {
+  await removeExpired(clock.now());
+  await resealGateCodes();
 }

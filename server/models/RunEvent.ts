@@ -36,7 +36,7 @@ RunEvent.init(
     deviceId: DataTypes.STRING,
     deviceSeq: DataTypes.INTEGER,
     deviceAt: DataTypes.DATE(3),
-    offsetMs: DataTypes.INTEGER,
+    offsetMs: DataTypes.BIGINT,
     happenedAt: DataTypes.DATE(3),
     receivedAt: DataTypes.DATE(3),
     runVersion: DataTypes.INTEGER,

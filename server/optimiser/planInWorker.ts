@@ -1,3 +1,4 @@
+import { AsyncResource } from 'node:async_hooks';
 import { Worker } from 'node:worker_threads';
 import type { OptimiseProgress, OptimiseResult } from '#shared/optimiser/optimise.ts';
 import type { DayProblem, DayTimes, Plan } from '#shared/schedule/types.ts';
@@ -42,7 +43,14 @@ export function planInWorker(
   return new Promise((resolve, reject) => {
     if (options.signal?.aborted) return reject(new PlanCancelled());
     jobs += 1;
-    const waiting: Waiting = { job: jobs, problem, plan, options, resolve, reject };
+    const waiting: Waiting = {
+      job: jobs,
+      problem,
+      plan,
+      options: inCallersContext(options),
+      resolve,
+      reject,
+    };
     options.signal?.addEventListener('abort', () => giveUp(waiting), { once: true });
     queue.push(waiting);
     next();
@@ -70,6 +78,19 @@ export class PlanCancelled extends Error {
   constructor() {
     super('Planning was cancelled.');
   }
+}
+
+/**
+ * The thread's messages come in the async context of whoever woke it, another business maybe; each
+ * job's callbacks belong in the context of its own caller.
+ */
+function inCallersContext(options: PlanInWorkerOptions): PlanInWorkerOptions {
+  const { onProgress, onBest } = options;
+  return {
+    ...options,
+    ...(onProgress && { onProgress: AsyncResource.bind(onProgress) }),
+    ...(onBest && { onBest: AsyncResource.bind(onBest) }),
+  };
 }
 
 function next(): void {

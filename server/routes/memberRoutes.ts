@@ -2,7 +2,7 @@ import { Router } from 'express';
 import * as api from '#shared/api/members.ts';
 import { ownOrigin } from '#server/http/csrf.ts';
 import { handle, handlePublic } from '#server/http/handle.ts';
-import { limitLinks } from '#server/http/limits.ts';
+import { limitFailures, limitLinks } from '#server/http/limits.ts';
 import { presentMember, presentMembers } from '#server/presenters/members.ts';
 import {
   acceptInvitation,
@@ -15,7 +15,9 @@ import { enter } from './sessionRoutes.ts';
 export const memberRoutes = Router();
 const done = { done: true } as const;
 
-memberRoutes.use(['/api/invitations/:token/open', '/api/invitations/:token/accept'], limitLinks);
+memberRoutes.use(api.getInvitation.path, limitLinks);
+// A known person's password is checked here as well.
+memberRoutes.use(api.acceptInvitation.path, limitFailures);
 
 handle(memberRoutes, api.listMembers, 'members.edit', async ({ now }) =>
   presentMembers(await listMembers(now)),

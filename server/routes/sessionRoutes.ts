@@ -2,9 +2,9 @@ import { type Request, type Response, Router } from 'express';
 import * as api from '#shared/api/session.ts';
 import { clock } from '#server/clock.ts';
 import { AppError } from '#server/errors.ts';
-import { ownOrigin } from '#server/http/csrf.ts';
+import { needCsrf, ownOrigin } from '#server/http/csrf.ts';
 import { handle, handlePublic } from '#server/http/handle.ts';
-import { limitLinks, limitSignIn } from '#server/http/limits.ts';
+import { limitFailures, limitLetters, limitMaking, limitSignIn } from '#server/http/limits.ts';
 import {
   clearSessionCookies,
   refreshTokenOf,
@@ -22,9 +22,11 @@ import { signUp } from '#server/services/accounts/signUp.ts';
 export const sessionRoutes = Router();
 const done = { done: true } as const;
 
-sessionRoutes.post([api.signUp.path, api.requestPasswordReset.path], limitLinks);
-sessionRoutes.post(api.resetPassword.path, limitLinks);
-sessionRoutes.post(api.signIn.path, limitSignIn);
+// Signing up checks the password of an address that is known, so it is a way to guess one too.
+sessionRoutes.post([api.signIn.path, api.signUp.path], limitFailures, limitSignIn);
+sessionRoutes.post(api.signUp.path, limitMaking);
+sessionRoutes.post(api.requestPasswordReset.path, limitMaking, limitLetters);
+sessionRoutes.post(api.resetPassword.path, limitFailures);
 
 handlePublic(sessionRoutes, api.signUp, async ({ body, now, req, res }) =>
   enter(req, res, await signUp(body, now)),
@@ -55,6 +57,7 @@ handle(sessionRoutes, api.signOut, 'signedIn', async ({ actor, now, req, res }) 
 });
 handlePublic(sessionRoutes, api.switchBusiness, async ({ body, now, req, res }) => {
   if (!req.actor) throw new AppError('signInNeeded', 'Please sign in.');
+  needCsrf(req, req.actor.sessionId);
   return enter(req, res, await switchBusiness(req.actor, body.businessId, now));
 });
 

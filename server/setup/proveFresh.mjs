@@ -11,6 +11,7 @@ import { projectRoot } from './projectRoot.mjs';
 import { atEnd, runSetup } from './runSetup.mjs';
 import { say } from './say.mjs';
 import { SetupError } from './setupError.mjs';
+import { binary } from './staticChecks.mjs';
 
 const resultFile = path.join(projectRoot, 'tests/proofs/fresh.json');
 
@@ -42,6 +43,11 @@ async function proveFresh() {
   const { passed, ...rest } = result;
   const proof = { proof: 'fresh', passed, commit, at: new Date().toISOString(), ...rest };
   fs.writeFileSync(resultFile, `${JSON.stringify(proof, null, 2)}\n`);
+  // It is committed, so it must stand the format check (prettier joins short lists).
+  const prettier = binary('prettier');
+  if (fs.existsSync(prettier)) {
+    await runToEnd('prettier', process.execPath, [prettier, '--write', resultFile]);
+  }
   say(`\n${passed ? 'Proved' : 'NOT proved'} at ${commit}; see tests/proofs/fresh.json`);
   for (const problem of result.problems) say(`  ${problem}`);
   return passed ? 0 : 1;

@@ -25,6 +25,7 @@ test('asking for fakes does not bring the demo to a database of yours', () => {
 test.each([
   [{ NODE_ENV: 'production' }, 'NODE_ENV is production'],
   [{ HOST: '0.0.0.0' }, 'HOST 0.0.0.0 can be reached from other machines'],
+  [{ PUBLIC_URL: 'https://vans.example.org' }, 'PUBLIC_URL https://vans.example.org can be'],
   [{ HOST: '127.0.0.1.example.org' }, 'HOST 127.0.0.1.example.org can be reached'],
 ])('no demo with %o', (env, reason) => {
   const mode = startMode(env);
@@ -38,6 +39,11 @@ test.each(['127.0.0.1', '::1', 'localhost'])('%s is loopback', (HOST) => {
 
 test.each(['abc', '-1', '70000', '80.5'])('PORT=%s is refused by name', (PORT) => {
   expect(() => startMode({ PORT })).toThrow('PORT must be a whole number');
+});
+
+test('a PUBLIC_URL on this machine keeps the demo, one that is no address is refused by name', () => {
+  expect(startMode({ PUBLIC_URL: 'http://127.0.0.1:5173' }).demo).toBe(true);
+  expect(() => startMode({ PUBLIC_URL: 'vans' })).toThrow('PUBLIC_URL must be an address');
 });
 
 test('a DATABASE_URL without a database is refused by name', () => {

@@ -19,16 +19,22 @@ export const cannotReason = z.enum([
 ]);
 export type CannotReason = z.infer<typeof cannotReason>;
 
+const mostCounted = 2 ** 31 - 1;
+const mostOffsetMs = Date.UTC(2100, 0);
+
 const common = {
   /** UUIDv7 made on the phone: the event's key, so sending twice applies once. */
   id: z.uuid(),
   v: z.literal(1),
   deviceId: z.uuid(),
-  deviceSeq: z.int().min(0),
-  /** The phone's own clock at the tap, and how far the server was ahead of it then. */
+  deviceSeq: z.int().min(0).max(mostCounted),
+  /**
+   * The phone's own clock at the tap, and how far the server was ahead of it then: decades, when
+   * its clock was never set.
+   */
   deviceAt: instant,
-  offsetMs: z.int(),
-  runVersion: z.int().min(0),
+  offsetMs: z.int().min(-mostOffsetMs).max(mostOffsetMs),
+  runVersion: z.int().min(0).max(mostCounted),
   stopId: z.string().min(1).max(64),
 };
 

@@ -1,4 +1,5 @@
 const key = 'furlong.clockOffsetMs';
+const listeners = new Set<() => void>();
 
 /** Milliseconds the server's clock is ahead of this phone's, as last measured (0 when never). */
 export function clockOffsetMs(): number {
@@ -19,4 +20,11 @@ export function noteServerNow(serverNow: string, heardAtMs: number): void {
   } catch {
     // Private windows may refuse storage; taps then carry the phone's own clock.
   }
+  for (const listener of listeners) listener();
+}
+
+/** Calls back whenever the server's clock was heard: what shows the time must not wait for its next tick. */
+export function onClockHeard(listener: () => void): () => void {
+  listeners.add(listener);
+  return () => void listeners.delete(listener);
 }

@@ -33,7 +33,11 @@ export function stopSentence(day: DayClock, stop: StripStop, vanName: string): s
   if (stop.onTimePermille !== null && stop.state === 'ahead')
     parts.push(`${percentWords(stop.onTimePermille)} on time`);
   if (stop.pinned) parts.push('pinned to this van');
-  if (stop.state !== 'ahead') parts.push(stopWords(day, stop) || stop.state);
+  if (stop.state !== 'ahead') {
+    const now = stopWords(day, stop);
+    // What is done without more to say shows its pets again, which were said already.
+    parts.push(now === '' || now === stop.words ? stop.state : now);
+  }
   return parts.join(', ');
 }
 

@@ -47,7 +47,7 @@ describe('getDay', () => {
   it('answers 404 for what is no date, and for dates no calendar of ours holds', async () => {
     const { client } = await boardDay(app, []);
     for (const date of ['2026-02-30', '2026-2-3', 'today', '9999-12-31', '0001-01-01', "1' OR 1"])
-      expect((await client.call(getDay, { params: { date } })).status, date).toBe(404);
+      expect((await client.call(getDay, { params: { date } })).status, `${date}`).toBe(404);
   });
 });
 
@@ -116,7 +116,7 @@ describe('moveVisit', () => {
       [{ kind: 'placeVisit', visitId, vanId: otter, index: 1e12 }, 400],
       [{ kind: 'replacePlan', plan: { runs: [], notPlaced: [] } }, 400],
     ] as const)
-      expect((await move(wanted as never)).status, JSON.stringify(wanted)).toBe(status);
+      expect((await move(wanted as never)).status, `${JSON.stringify(wanted)}`).toBe(status);
     expect(await read()).toEqual(before);
   });
 

@@ -23,6 +23,13 @@ export function chromiumArguments(): string[] {
   return [
     ...asRoot,
     '--disable-dev-shm-usage',
+    '--disable-gpu',
+    // Tests talk to our own server only: no start page, no updates, no guesses at other hosts.
+    '--disable-quic',
+    '--no-first-run',
+    '--disable-background-networking',
+    '--disable-component-update',
+    '--disable-sync',
     // The same pixels whatever the machine: for screens that are looked at.
     '--force-color-profile=srgb',
     '--font-render-hinting=none',

@@ -10,7 +10,7 @@ export const { up, down } = table(
   distanceUnit VARCHAR(2) NOT NULL,
   weightUnit VARCHAR(2) NOT NULL,
   areaName VARCHAR(60) NOT NULL DEFAULT '',
-  senderPhone VARCHAR(16) NULL,
+  senderPhone VARCHAR(16) NULL UNIQUE,
   deskPhone VARCHAR(16) NULL,
   setUpMinutes INT NOT NULL DEFAULT 6,
   cleanDownMinutes INT NOT NULL DEFAULT 6,

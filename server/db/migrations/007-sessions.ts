@@ -14,7 +14,6 @@ export const { up, down } = table(
   expiresAt DATETIME(3) NOT NULL,
   revokedAt DATETIME(3) NULL,
   createdAt DATETIME(3) NOT NULL,
-  KEY byPrevious (previousHash),
   KEY byUser (userId),
   FOREIGN KEY (userId) REFERENCES users (id) ON DELETE CASCADE,
   ${ofBusiness}

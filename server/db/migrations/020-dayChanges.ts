@@ -17,6 +17,7 @@ export const { up, down } = table(
   undoneAt DATETIME(3) NULL,
   undoes UUID NULL,
   UNIQUE KEY oneSeq (businessId, dayId, seq),
+  KEY byTime (at),
   ${ofBusiness},
   ${owns('dayId', 'days')}
 `,

@@ -10,7 +10,7 @@ export const { up, down } = table(
   deviceId UUID NOT NULL,
   deviceSeq INT NOT NULL,
   deviceAt DATETIME(3) NOT NULL,
-  offsetMs INT NOT NULL,
+  offsetMs BIGINT NOT NULL,
   happenedAt DATETIME(3) NOT NULL,
   receivedAt DATETIME(3) NOT NULL,
   runVersion INT NOT NULL,

@@ -10,6 +10,7 @@ export const { up, down } = table(
   at DATETIME(3) NOT NULL,
   accuracyMetres INT NOT NULL,
   KEY latest (businessId, runId, at),
+  KEY byTime (at),
   ${ofBusiness},
   ${owns('runId', 'runs')}
 `,

@@ -10,6 +10,7 @@ export const { up, down } = table(
   expiresAt DATETIME(3) NOT NULL,
   createdAt DATETIME(3) NOT NULL,
   ${ofBusiness},
-  ${owns('visitId', 'visits', 'CASCADE')}
+  ${owns('visitId', 'visits', 'CASCADE')},
+  ${owns('runId', 'runs')}
 `,
 );

@@ -14,6 +14,10 @@ export interface Actor {
 }
 
 /** Runs a use-case in the actor's business: its scope and one transaction. */
-export function actAs<Result>(actor: Actor, fn: () => Promise<Result>): Promise<Result> {
-  return inBusiness(actor.businessId, fn);
+export function actAs<Result>(
+  actor: Actor,
+  fn: () => Promise<Result>,
+  options: { onlyReads?: boolean } = {},
+): Promise<Result> {
+  return inBusiness(actor.businessId, fn, options);
 }

@@ -4,6 +4,7 @@ import { Business } from '#server/models/Business.ts';
 import { Groomer } from '#server/models/Groomer.ts';
 import { Membership } from '#server/models/Membership.ts';
 import { User } from '#server/models/User.ts';
+import { createUser } from './createUser.ts';
 import { findInvitation, needFreeGroomer } from './inviteMember.ts';
 import { openSession, type SessionTokens } from './openSession.ts';
 import { hashPassword, passwordFits } from './passwords.ts';
@@ -44,8 +45,7 @@ export async function acceptInvitation(
     // Looked up again under a lock: a double click must not join twice.
     const open = await findInvitation(token, now, true);
     const user =
-      known ??
-      (await User.create({ name: input.name!, email: open.email, passwordHash, createdAt: now }));
+      known ?? (await createUser({ name: input.name!, email: open.email, passwordHash }, now));
     await inBusiness(open.businessId, () => join(open, user, now));
     return openSession(user.id, open.businessId, now);
   });

@@ -2,6 +2,7 @@ import { afterCommit, unsafeAcrossBusinesses } from '#server/db/database.ts';
 import { AppError, notFound } from '#server/errors.ts';
 import { log } from '#server/log.ts';
 import { invitationLetter } from '#server/mail/invitationLetter.ts';
+import { currentMailer } from '#server/mail/openMail.ts';
 import { sendLetter } from '#server/mail/sendLetter.ts';
 import { Business } from '#server/models/Business.ts';
 import { Groomer } from '#server/models/Groomer.ts';
@@ -20,6 +21,8 @@ export async function inviteMember(
   origin: string,
   now: Date,
 ): Promise<void> {
+  // A server without mail must say so now: the letter itself leaves after the answer.
+  currentMailer();
   const user = await User.findOne({ where: { email: input.email } });
   if (user && (await Membership.findOne({ where: { userId: user.id } })))
     throw new AppError('alreadyThere', `${input.email} is already in this business.`, {
@@ -45,7 +48,7 @@ export async function inviteMember(
   // Only after commit: a letter must not point to an invitation that was rolled back.
   afterCommit(() => {
     sendLetter(letter).catch((error: unknown) =>
-      log.error({ error }, 'an invitation letter did not go out'),
+      log.error({ err: error }, 'an invitation letter did not go out'),
     );
   });
 }

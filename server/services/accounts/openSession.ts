@@ -1,4 +1,5 @@
 import jwt from 'jsonwebtoken';
+import { newId } from '#server/db/newId.ts';
 import { keyRing } from '#server/env.ts';
 import { Session } from '#server/models/Session.ts';
 import { hashToken, makeToken } from '#server/services/secrets/tokens.ts';
@@ -26,8 +27,10 @@ export async function openSession(
   businessId: string,
   now: Date,
 ): Promise<SessionTokens> {
-  const refresh = makeToken();
+  const id = newId();
+  const refresh = makeRefreshToken(id);
   const session = await Session.create({
+    id,
     userId,
     businessId,
     refreshHash: hashToken(refresh),
@@ -36,6 +39,11 @@ export async function openSession(
     createdAt: now,
   });
   return { ...signAccess({ sessionId: session.id, generation: 1 }, now), refresh };
+}
+
+/** It names its sign-in, so that any token of it that was ever rotated away is known as such. */
+export function makeRefreshToken(sessionId: string): string {
+  return `${sessionId}.${makeToken()}`;
 }
 
 export function signAccess(
@@ -58,10 +66,10 @@ export function readAccess(
   now: Date,
 ): (AccessClaims & { endsAt: Date }) | null {
   if (!token) return null;
-  const header = jwt.decode(token, { complete: true })?.header;
-  const key = keyRing().keys.find((one) => one.id === header?.kid);
-  if (!key) return null;
   try {
+    const header = jwt.decode(token, { complete: true })?.header;
+    const key = keyRing().keys.find((one) => one.id === header?.kid);
+    if (!key) return null;
     const claims = jwt.verify(token, key.secret, {
       algorithms: ['HS256'],
       clockTimestamp: Math.floor(now.getTime() / 1000),

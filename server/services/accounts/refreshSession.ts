@@ -1,11 +1,12 @@
+import { validate } from 'uuid';
 import { unsafeAcrossBusinesses } from '#server/db/database.ts';
 import { log } from '#server/log.ts';
 import { Session } from '#server/models/Session.ts';
 import { AppError } from '#server/errors.ts';
-import { hashToken, makeToken } from '#server/services/secrets/tokens.ts';
+import { hashToken } from '#server/services/secrets/tokens.ts';
 import type { Actor } from './Actor.ts';
 import { findActor } from './authenticate.ts';
-import { refreshSeconds, type SessionTokens, signAccess } from './openSession.ts';
+import { makeRefreshToken, refreshSeconds, type SessionTokens, signAccess } from './openSession.ts';
 
 const graceMs = 60_000;
 
@@ -18,13 +19,11 @@ export async function refreshSession(
   refresh: string | undefined,
   now: Date,
 ): Promise<{ actor: Actor; tokens: SessionTokens }> {
-  const hash = hashToken(refresh ?? '');
+  const [sessionId = ''] = (refresh ?? '').split('.');
   const outcome = await unsafeAcrossBusinesses(async () => {
-    const session =
-      (await Session.findOne({ where: { refreshHash: hash }, lock: true })) ??
-      (await Session.findOne({ where: { previousHash: hash }, lock: true }));
+    const session = validate(sessionId) ? await Session.findByPk(sessionId, { lock: true }) : null;
     if (!session || session.revokedAt || session.expiresAt <= now) return null;
-    const tokens = await rotate(session, hash, now);
+    const tokens = await rotate(session, hashToken(refresh!), now);
     if (!tokens) return null;
     const actor = await findActor(session, tokens.accessEndsAt);
     return actor && { actor, tokens };
@@ -34,9 +33,10 @@ export async function refreshSession(
 }
 
 async function rotate(session: Session, hash: string, now: Date): Promise<SessionTokens | null> {
-  const isPrevious = session.refreshHash !== hash;
-  if (isPrevious && session.successorUsedAt) {
-    if (now.getTime() - session.rotatedAt.getTime() <= graceMs)
+  const isPrevious = session.previousHash === hash;
+  const isOlder = !isPrevious && session.refreshHash !== hash;
+  if (isOlder || (isPrevious && session.successorUsedAt)) {
+    if (isPrevious && now.getTime() - session.rotatedAt.getTime() <= graceMs)
       return {
         ...signAccess({ sessionId: session.id, generation: session.generation }, now),
         refresh: null,
@@ -45,7 +45,7 @@ async function rotate(session: Session, hash: string, now: Date): Promise<Sessio
     await session.update({ revokedAt: now });
     return null;
   }
-  const refresh = makeToken();
+  const refresh = makeRefreshToken(session.id);
   const generation = session.generation + 1;
   await session.update({
     refreshHash: hashToken(refresh),

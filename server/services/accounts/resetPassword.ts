@@ -1,5 +1,7 @@
 import { inTransaction } from '#server/db/database.ts';
 import { AppError } from '#server/errors.ts';
+import { log } from '#server/log.ts';
+import { currentMailer } from '#server/mail/openMail.ts';
 import { passwordResetLetter } from '#server/mail/passwordResetLetter.ts';
 import { sendLetter } from '#server/mail/sendLetter.ts';
 import { PasswordReset } from '#server/models/PasswordReset.ts';
@@ -16,6 +18,8 @@ export async function requestPasswordReset(
   origin: string,
   now: Date,
 ): Promise<void> {
+  // Asked first, so that a server without mail says the same of every address.
+  currentMailer();
   const user = await User.findOne({ where: { email } });
   if (!user) return;
   const token = makeToken();
@@ -24,17 +28,18 @@ export async function requestPasswordReset(
     tokenHash: hashToken(token),
     expiresAt: new Date(now.getTime() + validMs),
   });
-  await sendLetter(
+  // Not waited for: the time a mail server takes would tell which addresses are known.
+  sendLetter(
     passwordResetLetter({
       to: user.email,
       name: user.name,
       url: `${origin}/reset/${token}`,
       validMinutes: validMs / 60_000,
     }),
-  );
+  ).catch((error: unknown) => log.error({ err: error }, 'a reset letter did not go out'));
 }
 
-/** A link works once and for an hour; every sign-in of the person ends. */
+/** A link works once and for an hour; the person's other links and every sign-in end. */
 export async function resetPassword(token: string, password: string, now: Date): Promise<void> {
   const passwordHash = await hashPassword(password);
   await inTransaction(async () => {
@@ -47,7 +52,8 @@ export async function resetPassword(token: string, password: string, now: Date):
         'linkUsedUp',
         'This link has been used or is over an hour old. Ask for a new one.',
       );
-    await reset.update({ usedAt: now });
+    // Every open link of the person, for older letters may lie in other hands.
+    await PasswordReset.update({ usedAt: now }, { where: { userId: reset.userId, usedAt: null } });
     await User.update({ passwordHash }, { where: { id: reset.userId } });
     await Session.update({ revokedAt: now }, { where: { userId: reset.userId, revokedAt: null } });
   });

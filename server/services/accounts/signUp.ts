@@ -1,9 +1,9 @@
 import { inBusiness, inTransaction } from '#server/db/database.ts';
 import { newId } from '#server/db/newId.ts';
-import { AppError } from '#server/errors.ts';
 import { Business } from '#server/models/Business.ts';
 import { Membership } from '#server/models/Membership.ts';
 import { User } from '#server/models/User.ts';
+import { createUser, knownEmail } from './createUser.ts';
 import { openSession, type SessionTokens } from './openSession.ts';
 import { hashPassword, passwordFits } from './passwords.ts';
 import { startingWeights } from './startingWeights.ts';
@@ -25,19 +25,11 @@ export async function signUp(
   now: Date,
 ): Promise<SessionTokens & { businessId: string }> {
   const known = await User.findOne({ where: { email: input.email } });
-  if (known && !(await passwordFits(input.password, known.passwordHash)))
-    throw new AppError(
-      'alreadyThere',
-      'This e-mail address already has a sign-in. Give its password, or reset it.',
-      {
-        fields: { email: 'already has a sign-in' },
-      },
-    );
+  if (known && !(await passwordFits(input.password, known.passwordHash))) throw knownEmail();
   const passwordHash = known ? known.passwordHash : await hashPassword(input.password);
   return inTransaction(async () => {
     const user =
-      known ??
-      (await User.create({ name: input.name, email: input.email, passwordHash, createdAt: now }));
+      known ?? (await createUser({ name: input.name, email: input.email, passwordHash }, now));
     const businessId = newId();
     await Business.create({
       id: businessId,

@@ -35,7 +35,7 @@ export async function getArrival(token: string, now: Date) {
     throw new AppError('notFound', 'This link is not one of ours. Look at the text again.');
   if (link.expiresAt <= now)
     throw new AppError('linkUsedUp', 'This link has expired. The visit is over.');
-  return inBusiness(link.businessId, () => describe(link, now));
+  return inBusiness(link.businessId, () => describe(link, now), { onlyReads: true });
 }
 
 async function describe(link: ArrivalLink, now: Date) {

@@ -29,15 +29,9 @@ export async function tellOnTheWay(input: {
   const times = runTimes(version, happened, now).stops.find((one) => one.stopId === visitId);
   if (!facts || !times || facts.visit.status === 'cancelled') return;
   const token = makeToken();
-  await ArrivalLink.create({
-    visitId: facts.visit.id,
-    runId: run.id,
-    tokenHash: hashToken(token),
-    expiresAt: new Date(now.getTime() + linkMs),
-    createdAt: now,
-  });
+  const link = `${origin}/a/${token}`;
   const groomer = await Groomer.findByPk(run.groomerId);
-  await queueText({
+  const text = await queueText({
     householdId: facts.household.id,
     visitId: facts.visit.id,
     kind: 'onTheWay',
@@ -46,10 +40,19 @@ export async function tellOnTheWay(input: {
       groomerName: groomer!.name,
       petNames: facts.pets.map(({ pet }) => pet.name),
       arrival: wallRange(version.problem, times.arriveEarlySeconds, times.arriveLateSeconds),
-      link: `${origin}/a/${token}`,
+      link,
     },
     now,
     // Its words stop being true once the van should have been there; a text after arrival helps nobody.
     until: new Date(secondsToInstant(version.problem.dayStartUtc, times.arriveLateSeconds)),
+  });
+  // Told before: the link the household already has stays the one.
+  if (!text.body.includes(link)) return;
+  await ArrivalLink.create({
+    visitId: facts.visit.id,
+    runId: run.id,
+    tokenHash: hashToken(token),
+    expiresAt: new Date(now.getTime() + linkMs),
+    createdAt: now,
   });
 }

@@ -112,14 +112,15 @@ function withFacts(
   return state;
 }
 
-/** The runs' stored orders, without what the day no longer holds: visits cancelled, places removed. */
+/** The runs' stored orders, without what the day no longer holds: visits, places or meals taken away. */
 function planOf(runs: LoadedRun[], visits: VisitFacts[], { refills }: DayProblem): Plan {
   const known = new Set(visits.map(({ visit }) => visit.id));
   const placed = new Set<string>();
-  const planRuns = runs.map(({ run }) => ({
+  const planRuns = runs.map(({ run, shift, happened }) => ({
     vanId: run.vanId,
     stops: run.stops.filter((stop) => {
       if (stop.kind === 'refill') return refills.some((place) => place.id === stop.placeId);
+      if (stop.kind === 'meal') return shift.meal != null || happened.stops.has(stop.id);
       if (stop.kind !== 'visit') return true;
       if (!known.has(stop.visitId) || placed.has(stop.visitId)) return false;
       placed.add(stop.visitId);

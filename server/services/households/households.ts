@@ -52,7 +52,8 @@ export async function listHouseholds(text: string, page: number, today: string) 
 
 async function matching(text: string) {
   const like = `%${text.replace(/[\\%_]/g, '\\$&')}%`;
-  const digits = text.replace(/[^\d]/g, '');
+  // A number typed as it is dialled at home, 07700…, is stored with its country code instead.
+  const digits = text.replace(/\D/g, '').replace(/^0+/, '');
   const pets = await Pet.findAll({
     where: { name: { [Op.like]: like } },
     attributes: ['householdId'],

@@ -16,7 +16,7 @@ export function petFactsOf(pet: Pet, on: Date, lastVisitDate: string | null): Pe
     species: pet.species,
     breedId: pet.breedId ?? null,
     weightGrams: pet.weightGrams ?? null,
-    ageYears: pet.birthYear == null ? null : Math.max(0, on.getUTCFullYear() - pet.birthYear),
+    ageYears: pet.birthYear == null ? null : ageOn(on, pet.birthYear),
     coatType: (pet.coatType ?? null) as CoatType | null,
     coatState: {
       matting: pet.matting as MattingLevel,
@@ -29,4 +29,9 @@ export function petFactsOf(pet: Pet, on: Date, lastVisitDate: string | null): Pe
     firstVisit: lastVisitDate === null,
     weeksSinceLast: weeks,
   };
+}
+
+/** The model knows ages from 0 to 40; a slip in the year must not stop a booking. */
+function ageOn(on: Date, birthYear: number): number {
+  return Math.min(40, Math.max(0, on.getUTCFullYear() - birthYear));
 }

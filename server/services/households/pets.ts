@@ -1,4 +1,4 @@
-import { badField, notFound } from '#server/errors.ts';
+import { type AppError, badField, notFound } from '#server/errors.ts';
 import { Pet } from '#server/models/Pet.ts';
 import { breeds } from '#shared/grooming/breeds.ts';
 import { cautions } from '#shared/grooming/cautions.ts';
@@ -75,7 +75,12 @@ function checkPet(pet: Pet, now: Date): void {
   try {
     forecastPet(petFactsOf(pet, now, null), findStyle(pet.styleId));
   } catch (error) {
-    if (error instanceof RangeError) throw badField('pet', error.message);
-    throw error;
+    throw error instanceof RangeError ? asBadField(pet, error) : error;
   }
+}
+
+/** The model's errors begin with the name of the field. */
+function asBadField(pet: Pet, { message }: RangeError): AppError {
+  const [, field = '', words = ''] = /^(\w+) (.+?)\.?$/.exec(message) ?? [];
+  return field in pet.dataValues ? badField(field, words) : badField('pet', message);
 }

@@ -52,7 +52,9 @@ export async function removeSite(siteId: string): Promise<void> {
   if (count > 0)
     throw new AppError(
       'alreadyThere',
-      `${count} households are at ${site.name}. Give them another site first.`,
+      count === 1
+        ? `1 household is at ${site.name}. Give it another site first.`
+        : `${count} households are at ${site.name}. Give them another site first.`,
     );
   await site.destroy();
 }

@@ -5,7 +5,7 @@ import type { Actor } from '#server/services/accounts/Actor.ts';
 import { type LoadedDay, loadDay } from '#server/services/days/loadDay.ts';
 import { lockDay } from '#server/services/days/lockDay.ts';
 import { logChange } from '#server/services/days/logChange.ts';
-import { type Conflict, isStale, makeMove } from '#server/services/days/moveVisit.ts';
+import { type Conflict, makeMove } from '#server/services/days/moveVisit.ts';
 import { savePlan } from '#server/services/days/savePlan.ts';
 import { stopSearch } from './searchProposal.ts';
 
@@ -41,14 +41,7 @@ export async function keepProposal(
         : 'This proposal is no longer on offer.',
     );
   const loaded = await loadDay(actor.businessId, date, now, { lock: true });
-  if (
-    isStale(
-      loaded,
-      loaded.problem.vans.map((van) => van.vanId),
-      proposal.runVersions,
-    )
-  )
-    return { conflict: true, day: loaded };
+  if (hasMovedOn(loaded, proposal)) return { conflict: true, day: loaded };
   const move = { kind: 'replacePlan' as const, plan: proposal.plan };
   const next = makeMove(loaded, move);
   await proposal.update({ state: 'kept' });
@@ -74,6 +67,19 @@ export async function dropProposal(
     await proposal.update({ state: 'dropped' });
   stopSearch(proposalId);
   return { proposal, date: (await Day.findByPk(proposal.dayId))!.date };
+}
+
+/** True when a run changed, came or went since the search began, or a visit it places is off. */
+function hasMovedOn(loaded: LoadedDay, { plan, runVersions }: Proposal): boolean {
+  const vanIds = new Set([...loaded.runs.map(({ van }) => van.id), ...Object.keys(runVersions)]);
+  const visitIds = new Set(loaded.problem.visits.map(({ id }) => id));
+  const runs = new Map(loaded.runs.map(({ van, run }) => [van.id, run.version]));
+  return (
+    [...vanIds].some((vanId) => runs.get(vanId) !== runVersions[vanId]) ||
+    plan!.runs.some(({ stops }) =>
+      stops.some((stop) => stop.kind === 'visit' && !visitIds.has(stop.visitId)),
+    )
+  );
 }
 
 async function needProposal(proposalId: string, lock = false): Promise<Proposal> {

@@ -4,6 +4,14 @@ import { log } from '#server/log.ts';
 import { Proposal } from '#server/models/Proposal.ts';
 import { planInWorker } from '#server/optimiser/planInWorker.ts';
 
+type SearchNews = Partial<
+  Pick<Proposal, 'progressPermille' | 'plan' | 'state' | 'message' | 'iterations' | 'leaseUntil'>
+>;
+
+/** Past it, unless renewed, the process that searched is gone. */
+export const leaseMs = 15_000;
+const renewMs = 5000;
+
 const searches = new Map<string, AbortController>();
 
 /** Stops a search of this process; another process notices by the row's state. */
@@ -11,23 +19,24 @@ export function stopSearch(proposalId: string): void {
   searches.get(proposalId)?.abort();
 }
 
-/** Runs the search outside any transaction and writes progress and result to the proposal's row. */
+/**
+ * Runs the search outside any transaction and writes progress and result to the proposal's row. The
+ * row's lease is renewed all the while, also while the search waits for others on the one thread.
+ */
 export async function searchProposal(
   businessId: string,
   proposalId: string,
   problem: DayProblem,
   plan: Plan,
   seconds: number,
+  startedAt: Date,
 ): Promise<void> {
   const controller = new AbortController();
+  const startedMs = performance.now();
   searches.set(proposalId, controller);
   // One write at a time, so that progress cannot overtake the result.
   let writes: Promise<unknown> = Promise.resolve();
-  const write = (
-    change: Partial<
-      Pick<Proposal, 'progressPermille' | 'plan' | 'state' | 'message' | 'iterations'>
-    >,
-  ) => {
+  const write = (change: SearchNews) => {
     writes = writes
       .then(() => save(businessId, proposalId, change, controller))
       .catch((error: unknown) => {
@@ -35,6 +44,11 @@ export async function searchProposal(
       });
     return writes;
   };
+  const renewal = setInterval(() => {
+    const sinceMs = performance.now() - startedMs;
+    void write({ leaseUntil: new Date(startedAt.getTime() + sinceMs + leaseMs) });
+  }, renewMs);
+  renewal.unref();
   try {
     const seed = await inBusiness(
       businessId,
@@ -63,6 +77,7 @@ export async function searchProposal(
       });
     }
   } finally {
+    clearInterval(renewal);
     searches.delete(proposalId);
   }
 }
@@ -70,7 +85,7 @@ export async function searchProposal(
 async function save(
   businessId: string,
   proposalId: string,
-  change: Partial<Pick<Proposal, 'progressPermille' | 'plan' | 'state' | 'message' | 'iterations'>>,
+  change: SearchNews,
   controller: AbortController,
 ): Promise<void> {
   const [count] = await inBusiness(businessId, () =>

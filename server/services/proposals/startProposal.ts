@@ -5,9 +5,7 @@ import { Proposal, type ProposalScope } from '#server/models/Proposal.ts';
 import type { Actor } from '#server/services/accounts/Actor.ts';
 import { loadDay } from '#server/services/days/loadDay.ts';
 import { lockDay } from '#server/services/days/lockDay.ts';
-import { searchProposal } from './searchProposal.ts';
-
-const leaseSlackMs = 15_000;
+import { leaseMs, searchProposal } from './searchProposal.ts';
 
 /**
  * Starts a search for a better day in the worker thread. One runs per day: a second click gets the
@@ -41,13 +39,13 @@ export async function startProposal(
     runVersions: Object.fromEntries(loaded.runs.map(({ run }) => [run.vanId, run.version])),
     plan: null,
     seed: day.version,
-    leaseUntil: new Date(now.getTime() + options.seconds * 1000 + leaseSlackMs),
+    leaseUntil: new Date(now.getTime() + leaseMs),
     createdAt: now,
     createdBy: actor.userName,
   });
   const { problem, plan } = narrow(loaded.problem, loaded.plan, options.scope);
   afterCommit(
-    () => void searchProposal(actor.businessId, proposal.id, problem, plan, options.seconds),
+    () => void searchProposal(actor.businessId, proposal.id, problem, plan, options.seconds, now),
   );
   return { proposal, date };
 }

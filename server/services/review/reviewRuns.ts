@@ -106,7 +106,11 @@ function reviewRun(
     const what = happened.stops.get(stop.stopId);
     const forecast = forecasts.get(stop.stopId);
     const clockSeconds = what && forecast && workSeconds(what, forecast);
-    const promiseKept = visit?.promise ? stop.arriveSeconds <= visit.promise.endSeconds : null;
+    // A stop given up on the way, or before, was never reached: its time says nothing.
+    const reached = what?.fact.arrivedSeconds != null;
+    const promiseKept = visit?.promise
+      ? reached && stop.arriveSeconds <= visit.promise.endSeconds
+      : null;
     if (promiseKept !== null) totals.promises += 1;
     if (promiseKept) totals.promisesKept += 1;
     if (!visit || !what || clockSeconds == null || !forecast) continue;

@@ -12,6 +12,8 @@ export async function addRunFix(
   now: Date,
 ): Promise<void> {
   const run = await needRun(actor, runId);
+  // Nobody looks for a van whose run was not sent, and such a run may still be taken away.
+  if (!run.sentAt) return;
   const at = new Date(Math.min(Date.parse(fix.at), now.getTime()));
   await RunFix.create({
     runId: run.id,

@@ -59,8 +59,10 @@ async function lastTimes(
     where: { visitId: visits.map((visit) => visit.id), position: 0 },
   });
   const others = await VisitPet.findAll({ where: { petId: own.map((one) => one.petId) } });
+  // Years of visits: their forecasts are read of the few that are shown only.
   const past = await Visit.findAll({
     where: { id: others.map((one) => one.visitId), status: 'done' },
+    attributes: ['id', 'businessId', 'date'],
     order: [['date', 'DESC']],
   });
   const wanted = new Map<string, Visit>();
@@ -73,7 +75,9 @@ async function lastTimes(
     );
     if (last) wanted.set(visit.id, last);
   }
-  const clocks = await clockOfVisits([...new Set(wanted.values())]);
+  const clocks = await clockOfVisits(
+    await Visit.findAll({ where: { id: [...wanted.values()].map((visit) => visit.id) } }),
+  );
   return new Map(
     [...wanted].flatMap(([visitId, last]) => {
       const clock = clocks.get(last.id);

@@ -4,11 +4,11 @@ import type { Actor } from '#server/services/accounts/Actor.ts';
 
 /** True for the run's own groomer; a dispatcher or operator may stand in for anyone. */
 export function mayWork(actor: Actor, run: Run): boolean {
-  return (
-    run.groomerId === actor.groomerId ||
-    actor.roles.includes('dispatcher') ||
-    actor.roles.includes('operator')
-  );
+  return run.groomerId === actor.groomerId || isDesk(actor);
+}
+
+export function isDesk(actor: Actor): boolean {
+  return actor.roles.includes('dispatcher') || actor.roles.includes('operator');
 }
 
 /** The run, when the actor may work it. */

@@ -16,6 +16,17 @@ it('opens what it sealed, in its own place only', () => {
   expect(seal('4711#', place)).not.toBe(sealed);
 });
 
+it('opens nothing by a tag cut short', () => {
+  const [key, nonce, tag, text] = seal('4711#', place).split('.') as [
+    string,
+    string,
+    string,
+    string,
+  ];
+  const cut = Buffer.from(tag, 'base64url').subarray(0, 4).toString('base64url');
+  expect(() => openSeal([key, nonce, cut, text].join('.'), place)).toThrow('tag');
+});
+
 it('makes 22-letter tokens and signs for one purpose', () => {
   expect(makeToken()).toMatch(/^[\w-]{22}$/);
   expect(hashToken('a')).toMatch(/^[0-9a-f]{64}$/);

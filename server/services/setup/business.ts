@@ -1,3 +1,4 @@
+import { UniqueConstraintError } from 'sequelize';
 import { areaFor, listAreas } from '#server/area/openAreas.ts';
 import { badField } from '#server/errors.ts';
 import { Business } from '#server/models/Business.ts';
@@ -34,11 +35,11 @@ export async function updateBusiness(
     throw badField('areaName', `must be an imported area (${names || 'none yet'})`);
   }
   // Inbound texts are routed by the number they were sent to, so it belongs to one business.
-  const holder = change.senderPhone
-    ? await Business.findOne({ where: { senderPhone: change.senderPhone } })
-    : null;
-  if (holder && holder.id !== businessId)
-    throw badField('senderPhone', 'is another business’s number');
   const business = await getBusiness(businessId);
-  return business.update(change);
+  try {
+    return await business.update(change);
+  } catch (error) {
+    if (!(error instanceof UniqueConstraintError)) throw error;
+    throw badField('senderPhone', 'is another business’s number');
+  }
 }

@@ -1,6 +1,5 @@
 import { Op } from 'sequelize';
 import { AppError, badField, notFound } from '#server/errors.ts';
-import { Day } from '#server/models/Day.ts';
 import { Groomer } from '#server/models/Groomer.ts';
 import { Run } from '#server/models/Run.ts';
 import { Shift } from '#server/models/Shift.ts';
@@ -67,13 +66,16 @@ export async function setShift(input: ShiftInput): Promise<Shift> {
 
 /** Its visits become not placed; refused once the run was sent. */
 export async function removeShift(shiftId: string): Promise<void> {
-  const shift = await Shift.findByPk(shiftId);
+  const found = await Shift.findByPk(shiftId);
+  if (!found) throw notFound('shift');
+  const day = await lockDay(found.date);
+  // Looked up again under the lock: a second click must not take the run of a shift set since.
+  const shift = await Shift.findByPk(shiftId, { lock: true });
   if (!shift) throw notFound('shift');
-  await lockDay(shift.date);
   const run = await Run.findOne({ where: { date: shift.date, vanId: shift.vanId }, lock: true });
   if (run?.sentAt)
     throw new AppError('alreadyThere', 'This run was already sent. Move its visits instead.');
   await run?.destroy();
   await shift.destroy();
-  await Day.increment('version', { where: { date: shift.date, businessId: shift.businessId } });
+  await day.update({ version: day.version + 1 });
 }

@@ -2,6 +2,7 @@ import { Op } from 'sequelize';
 import { AppError, badField, notFound } from '#server/errors.ts';
 import { Place } from '#server/models/Place.ts';
 import { Run } from '#server/models/Run.ts';
+import { Shift } from '#server/models/Shift.ts';
 import { Van } from '#server/models/Van.ts';
 
 type VanInput = Pick<
@@ -27,7 +28,10 @@ export async function updateVan(vanId: string, change: Partial<VanInput>): Promi
   return van.update(change);
 }
 
-/** Refused while runs with stops lie ahead: their households hold promises. */
+/**
+ * Refused while runs with visits lie ahead: their households hold promises. Its empty shifts go with
+ * it; a run already sent stays as its groomer has it.
+ */
 export async function retireVan(vanId: string, today: string): Promise<void> {
   const van = await needVan(vanId);
   const runs = await Run.findAll({ where: { vanId, date: { [Op.gte]: today } } });
@@ -37,6 +41,10 @@ export async function retireVan(vanId: string, today: string): Promise<void> {
       'alreadyThere',
       `${van.name} still has visits on ${busy[0]!.date}. Move them first.`,
     );
+  const sent = runs.filter((run) => run.sentAt).map((run) => run.date);
+  const ahead = { vanId, date: { [Op.gte]: today, [Op.notIn]: sent } };
+  await Run.destroy({ where: ahead });
+  await Shift.destroy({ where: ahead });
   await van.update({ active: false });
 }
 

@@ -1,4 +1,4 @@
-import { badField, notFound } from '#server/errors.ts';
+import { AppError, badField, notFound } from '#server/errors.ts';
 import { Business } from '#server/models/Business.ts';
 import { Groomer } from '#server/models/Groomer.ts';
 import { Household } from '#server/models/Household.ts';
@@ -38,6 +38,7 @@ export async function createVisit(actor: Actor, input: VisitInput, now: Date): P
   if (input.preferredGroomerId && !(await Groomer.findByPk(input.preferredGroomerId)))
     throw badField('preferredGroomerId', 'must be a groomer of this business');
   const day = await lockDay(input.date);
+  await refuseTwice(pets, input.date);
   const ordered = petIds.map((id) => pets.find((pet) => pet.id === id)!);
   const { forecast, modelVersion } = forecastOf(
     ordered,
@@ -67,6 +68,22 @@ export async function createVisit(actor: Actor, input: VisitInput, now: Date): P
     words: `${ordered.map((pet) => pet.name).join(' & ')} booked`,
   });
   return visit;
+}
+
+/** A pet has one open visit a day: a second one is the second click of a double click. */
+async function refuseTwice(pets: Pet[], date: string): Promise<void> {
+  const visits = await Visit.findAll({
+    where: { date, status: 'booked' },
+    attributes: ['id', 'businessId'],
+  });
+  const taken = await VisitPet.findOne({
+    where: { visitId: visits.map((visit) => visit.id), petId: pets.map((pet) => pet.id) },
+  });
+  if (!taken) return;
+  const { name } = pets.find((pet) => pet.id === taken.petId)!;
+  throw new AppError('alreadyThere', `${name} already has a visit on this day.`, {
+    fields: { petIds: `${name} already has a visit on this day` },
+  });
 }
 
 /** Promises are append-only: a new one is a new version, taking one back is a version without times. */

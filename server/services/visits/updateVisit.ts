@@ -1,4 +1,5 @@
 import { AppError, badField, notFound } from '#server/errors.ts';
+import type { Day } from '#server/models/Day.ts';
 import { Groomer } from '#server/models/Groomer.ts';
 import { Promise as PromiseRow } from '#server/models/Promise.ts';
 import { RunEvent } from '#server/models/RunEvent.ts';
@@ -27,10 +28,9 @@ export async function updateVisit(
   change: VisitChange,
   now: Date,
 ): Promise<Visit> {
-  const visit = await needBookedVisit(visitId);
+  const { day, visit } = await lockBookedVisit(visitId);
   if (change.preferredGroomerId && !(await Groomer.findByPk(change.preferredGroomerId)))
     throw badField('preferredGroomerId', 'must be a groomer of this business');
-  const day = await lockDay(visit.date);
   if (change.promise !== undefined) {
     const last = await PromiseRow.findOne({ where: { visitId }, order: [['version', 'DESC']] });
     const same =
@@ -58,8 +58,7 @@ export async function cancelVisit(
   reason: string,
   now: Date,
 ): Promise<void> {
-  const visit = await needBookedVisit(visitId);
-  const day = await lockDay(visit.date);
+  const { day, visit } = await lockBookedVisit(visitId);
   if (await RunEvent.findOne({ where: { stopId: visitId } }))
     throw new AppError(
       'refusedMove',
@@ -78,10 +77,13 @@ export async function cancelVisit(
   });
 }
 
-async function needBookedVisit(visitId: string): Promise<Visit> {
-  const visit = await Visit.findByPk(visitId, { lock: true });
-  if (!visit) throw notFound('visit');
+/** Locks the day, then the visit, in every writer's order; refused once the visit is over. */
+async function lockBookedVisit(visitId: string): Promise<{ day: Day; visit: Visit }> {
+  const found = await Visit.findByPk(visitId);
+  if (!found) throw notFound('visit');
+  const day = await lockDay(found.date);
+  const visit = (await Visit.findByPk(visitId, { lock: true }))!;
   if (visit.status !== 'booked')
     throw new AppError('refusedMove', `This visit is ${visit.status} and cannot change any more.`);
-  return visit;
+  return { day, visit };
 }

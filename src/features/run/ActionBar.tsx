@@ -47,12 +47,18 @@ export function ActionBar({
         )}
         <div className="grid grid-cols-2 gap-2.5">
           {finish ? (
-            <Button
-              className="min-h-12"
-              onClick={() => resting || onAct({ words: 'Done here', taps: [doneTap(stop.stopId)] })}
+            <button
+              type="button"
+              className={`${buttonLook()} min-h-12`}
+              aria-disabled={resting || undefined}
+              onClick={
+                resting
+                  ? undefined
+                  : () => onAct({ words: 'Done here', taps: [doneTap(stop.stopId)] })
+              }
             >
               Done here
-            </Button>
+            </button>
           ) : (
             <MapsLink stop={stop} />
           )}

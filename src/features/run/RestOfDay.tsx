@@ -1,3 +1,4 @@
+import { writeSpan } from '#src/lib/words.ts';
 import { formatWall, formatWallRange } from '#shared/time/formatWall.ts';
 import { StandingWords } from './StandingWords.tsx';
 import { stopStanding } from './stopStanding.ts';
@@ -20,7 +21,7 @@ export function RestOfDay({ view }: { view: RunView }) {
             {view.times.overtimeSeconds > 0 && (
               <span className="text-slate">
                 {' '}
-                · {Math.round(view.times.overtimeSeconds / 60)} min past the shift
+                · {writeSpan(view.times.overtimeSeconds)} past the shift
               </span>
             )}
           </span>
