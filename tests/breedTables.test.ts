@@ -39,7 +39,7 @@ describe('breed table against open tables', () => {
       })
       .map(({ breed }) => breed.id);
     if (rows.length > 0) {
-      expect(matched.length).toBeGreaterThan(80);
+      expect(matched.length).toBeGreaterThan(100);
       expect(outside.sort()).toEqual(exceptions);
     }
     expect(outside.length).toBeLessThanOrEqual(matched.length / 10);
@@ -47,19 +47,23 @@ describe('breed table against open tables', () => {
 });
 
 /**
- * Outside the band. That table's figures for both (16.7 and 21.7 kg) lie above what their breed
- * standards ask for, so ours stay.
+ * Outside the band. That table's figures for the French bulldog and the Staffordshire (16.7 and
+ * 21.7 kg) lie above what their breed standards ask for, and the American Staffordshire's 15.0 kg
+ * below the dog people keep, so ours stay.
  */
-const exceptions = ['french-bulldog', 'staffordshire-bull-terrier'];
+const exceptions = ['american-staffordshire', 'french-bulldog', 'staffordshire-bull-terrier'];
 
-/** Rows of that table known to be wrong. */
-const badJonesRows = ['italian-greyhound'];
+/** Rows of that table known to be wrong: 17.1 kg, 28.3 kg (the large breed's figure) and 4.1 kg. */
+const badJonesRows = ['italian-greyhound', 'miniature-bull-terrier', 'petit-basset-griffon'];
 
 /** Where the nomenclature speaks another name. */
 const otherFciName: Record<string, string> = {
   papillon: 'continental',
   pomeranian: 'spitz',
   keeshond: 'spitz',
+  eurasier: 'eurasian',
+  'finnish-lapphund': 'lapponian',
+  barbet: 'french',
 };
 
 /** The table's spelling where it is not ours. */
@@ -90,6 +94,15 @@ const jonesName: Record<string, string> = {
   'shar-pei': 'Chinese Shar-Pei',
   'german-shorthaired-pointer': 'German Shorthaired Pointer',
   'chinese-crested': 'Chinese Crested',
+  'petit-basset-griffon': 'Petit Basset Griffon Vendeen',
+  'korthals-griffon': 'Wirehaired Pointing Griffon',
+  'irish-red-white-setter': 'Irish Red and White Setter',
+  'belgian-malinois': 'Belgian Malinois',
+  'english-pointer': 'Pointer',
+  'american-staffordshire': 'American Staffordshire Terrier',
+  'ibizan-hound': 'Ibizan Hound',
+  'fox-terrier-smooth': 'Fox Terrier',
+  'wire-fox-terrier': 'Fox Terrier',
 };
 
 function read(file: string): string[][] {

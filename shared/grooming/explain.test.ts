@@ -36,7 +36,12 @@ describe('explain', () => {
     expect(told.summary).toMatch(/^\d h \d\d, 8 in 10 between \d h( \d\d)? and \d h \d\d$/);
     const step = (label: string) => told.steps.find((each) => each.label === label)!;
     expect(step('mats, before the bath').why).toEqual(['+12 min: matting']);
-    expect(step('scissor legs, feet, head, ears and tail').why).toEqual(['+6 min: restless']);
+    expect(step('scissor legs, feet and tail').why).toEqual([
+      '−5 min: one guide-comb pass first',
+      '+4 min: restless',
+    ]);
+    expect(step('scissor head and ears').why).toEqual(['+3 min: restless at the face']);
+    expect(told.notes).toEqual(['one guide-comb pass over legs saves 2 min']);
     expect(step('ears').why).toEqual([]);
   });
 });

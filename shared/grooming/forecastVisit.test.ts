@@ -50,6 +50,33 @@ describe('forecastVisit', () => {
     expect(forecastVisit([next, flea]).cleanDownSeconds).toBe(480 + 600);
   });
 
+  it('lists the minutes around the pets in order; hand-back is part of the clean-down', () => {
+    const visit = forecastVisit([visitPet('Rook'), visitPet('Wren')]);
+    expect(visit.around.map(({ key, seconds }) => [key, seconds])).toEqual([
+      ['hookUp', 420],
+      ['disinfect', 240],
+      ['handBack', 180],
+      ['cleanDown', 300],
+    ]);
+    const total = visit.around.reduce((sum, { seconds }) => sum + seconds, 0);
+    expect(visit.stop.meanSeconds - visit.work.meanSeconds + visit.disinfectSeconds).toBe(total);
+  });
+
+  it('door minutes of the household scale set-up and clean-down, never the pets', () => {
+    const usual = forecastVisit([visitPet('Rook')]);
+    const gated = forecastVisit([visitPet('Rook')], { doorPermille: 1500 });
+    expect(gated.setUpSeconds).toBe(630);
+    expect(gated.cleanDownSeconds).toBe(720);
+    expect(gated.work).toEqual(usual.work);
+    expect(() => forecastVisit([visitPet('Rook')], { doorPermille: 0 })).toThrow(/doorPermille/);
+  });
+
+  it('contact time of the disinfectant is told apart, for it may pass while driving', () => {
+    const flea = forecastVisit([visitPet('Flea', { cautions: ['fleas'] })], { doorPermille: 2000 });
+    expect(flea.contactSeconds).toBe(600);
+    expect(flea.cleanDownSeconds).toBe(2 * 480 + 600);
+  });
+
   it('carries a stop sign up to the visit', () => {
     expect(forecastVisit([visitPet('Rook')]).stopped).toBe(false);
     expect(forecastVisit([visitPet('Rook', { cautions: ['sedated'] })]).stopped).toBe(true);

@@ -68,6 +68,15 @@ describe('mats', () => {
     }
   });
 
+  it('mat work already done today counts: what is left of the limit binds', () => {
+    const pet = petLike({ coatState: { ...goodCoat, matting: 1 } });
+    expect(forecastPet(pet, teddy, { matSecondsUsed: 0 }).planChange).toBeNull();
+    const used = forecastPet(pet, teddy, { matSecondsUsed: 700 });
+    expect(used.planChange!.words).toMatch(/15 min of mat work a visit are used up/);
+    expect(used.steps.some(({ key }) => key === 'mats')).toBe(false);
+    expect(() => forecastPet(pet, teddy, { matSecondsUsed: -1 })).toThrow(/matSecondsUsed/);
+  });
+
   it('never plans past the humane limit, whatever the mats, size and age', () => {
     const level = fc.constantFrom<MattingLevel>(0, 1, 2, 3, 4);
     fc.assert(

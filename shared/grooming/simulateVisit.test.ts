@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest';
+import { breeds } from './breeds.ts';
 import { forecastVisit } from './forecastVisit.ts';
 import { normalDraw } from './normalDraw.ts';
 import { petLike } from './petLike.ts';
@@ -75,10 +76,10 @@ describe('simulateVisit', () => {
     ).flatMap((visit) => visit.steps);
     const wrong = steps.filter((step) => step.recordedSeconds !== step.actualSeconds);
     for (const step of wrong) expect([0, 32_400]).toContain(step.recordedSeconds);
-    // Binomial: n = 4,400 steps at 1 % has mean 44, SD 6.6; four SDs either way.
-    expect(steps.length).toBe(4_400);
-    expect(wrong.length).toBeGreaterThan(17);
-    expect(wrong.length).toBeLessThan(71);
+    // Binomial: n = 4,800 steps at 1 % has mean 48, SD 6.9; four SDs either way.
+    expect(steps.length).toBe(4_800);
+    expect(wrong.length).toBeGreaterThan(20);
+    expect(wrong.length).toBeLessThan(76);
     for (const step of steps) expect(Number.isInteger(step.actualSeconds)).toBe(true);
   });
 
@@ -108,6 +109,56 @@ describe('simulateVisit', () => {
     expect(inside).toBeLessThanOrEqual(335);
   });
 });
+
+describe('simulated businesses', () => {
+  it('80 % intervals cover inside the binomial band: middle of 20 businesses of 400 visits', () => {
+    const hits = Array.from({ length: 20 }, (_, index) => coveredOf400(100 + index));
+    hits.sort((a, b) => a - b);
+    const middle = (hits[9]! + hits[10]!) / 2;
+    expect(middle).toBeGreaterThanOrEqual(304);
+    expect(middle).toBeLessThanOrEqual(335);
+  });
+});
+
+/**
+ * A business of six groomers and 150 pets of the whole breed table, each with hidden effects, in
+ * usual styles; how many of 400 visits end inside the unlearned forecast's 10–90 % interval.
+ */
+function coveredOf400(seed: number): number {
+  const random = seeded(seed);
+  const pick = <T>(from: readonly T[]): T => from[Math.floor(random() * from.length)]!;
+  const groomers = Array.from({ length: 6 }, () => drawHiddenGroomer(random));
+  const coatStyles = new Map<string, number>();
+  const pets = Array.from({ length: 150 }, (_, index) => {
+    const breed = pick(breeds);
+    const styleId = pick(breed.usualStyleIds);
+    const group = `${breed.coatType} ${styleId}`;
+    if (!coatStyles.has(group)) coatStyles.set(group, drawCoatStylePermille(random));
+    return {
+      petId: String(index),
+      name: `Pet ${index}`,
+      pet: petLike({
+        species: breed.species,
+        breedId: breed.id,
+        weightGrams: null,
+        coatType: null,
+        ageYears: Math.floor(random() * 14),
+        temperament: pick(['calm', 'calm', 'restless', 'anxious'] as const),
+      }),
+      style: findStyle(styleId),
+      hidden: drawHiddenPet(random),
+      coatStylePermille: coatStyles.get(group)!,
+    };
+  });
+  let inside = 0;
+  for (let visit = 0; visit < 400; visit += 1) {
+    const pet = pick(pets);
+    const { work } = forecastVisit([pet]);
+    const drawn = simulateVisit({ pets: [pet], groomer: pick(groomers), random });
+    if (drawn.workSeconds >= work.p10Seconds && drawn.workSeconds <= work.p90Seconds) inside += 1;
+  }
+  return inside;
+}
 
 describe('draws', () => {
   it('normalDraw has mean 0 and SD 1', () => {
