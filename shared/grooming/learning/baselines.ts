@@ -13,13 +13,13 @@ export interface Baseline {
  */
 export function breedMean(past: readonly GroomRecord[]): Baseline {
   const good = past.filter(plausible);
-  const whole = mean(good.map((record) => record.actualSeconds));
+  const whole = mean(good.map(workOf));
   const byBreed = new Map<string | null, number[]>();
   for (const record of good)
-    byBreed.set(record.breedId, [...(byBreed.get(record.breedId) ?? []), record.actualSeconds]);
+    byBreed.set(record.breedId, [...(byBreed.get(record.breedId) ?? []), workOf(record)]);
   const means = new Map([...byBreed].map(([breedId, seconds]) => [breedId, mean(seconds)]));
   const centre = (record: GroomRecord) => means.get(record.breedId) ?? whole;
-  const ratios = quantiles(good.map((record) => record.actualSeconds / centre(record)));
+  const ratios = quantiles(good.map((record) => workOf(record) / centre(record)));
   return { tell: (record) => spread(centre(record), ratios) };
 }
 
@@ -35,9 +35,9 @@ export function lastVisit(past: readonly GroomRecord[]): Baseline {
     last.get(`${record.petId} ${record.styleId}`) ?? last.get(record.petId);
   for (const record of past.filter(plausible)) {
     const before = find(record);
-    if (before !== undefined) repeats.push(record.actualSeconds / before);
-    last.set(record.petId, record.actualSeconds);
-    last.set(`${record.petId} ${record.styleId}`, record.actualSeconds);
+    if (before !== undefined) repeats.push(workOf(record) / before);
+    last.set(record.petId, workOf(record));
+    last.set(`${record.petId} ${record.styleId}`, workOf(record));
   }
   const ratios = quantiles(repeats);
   return {
@@ -48,8 +48,12 @@ export function lastVisit(past: readonly GroomRecord[]): Baseline {
   };
 }
 
-function plausible({ actualSeconds }: GroomRecord): boolean {
-  return actualSeconds >= 300 && actualSeconds <= 18_000;
+function workOf({ actualSeconds, restSeconds }: GroomRecord): number {
+  return actualSeconds - restSeconds;
+}
+
+function plausible(record: GroomRecord): boolean {
+  return workOf(record) >= 300 && workOf(record) <= 18_000;
 }
 
 function mean(values: readonly number[]): number {

@@ -28,22 +28,18 @@ export function judgeBusiness(
 ): BusinessJudgement {
   const all = simulateBusiness(settings, random);
   const sums = { learned: 0, plain: 0, breed: 0, last: 0 };
+  const none = fitGroomModel([]);
   let covered = 0;
   for (let from = all.length - settings.heldOutVisits; from < all.length; from += block) {
     const past = all.slice(0, from).map(({ record }) => record);
     const fit = fitGroomModel(past);
     const breed = breedMean(past);
     const last = lastVisit(past);
-    for (const { record, forecast, trueSeconds } of all.slice(from, from + block)) {
+    for (const { record, trueSeconds } of all.slice(from, from + block)) {
       const loss = (told: ToldSeconds) => meanPinball(trueSeconds, told);
       const told = toldOf(predictMinutes(fit, record, record));
       sums.learned += loss(told);
-      sums.plain += loss([
-        forecast.p10Seconds,
-        forecast.p50Seconds,
-        forecast.p80Seconds,
-        forecast.p90Seconds,
-      ]);
+      sums.plain += loss(toldOf(predictMinutes(none, record, record)));
       sums.breed += loss(breed.tell(record));
       sums.last += loss(last.tell(record));
       if (trueSeconds >= told[0] && trueSeconds <= told[3]) covered += 1;

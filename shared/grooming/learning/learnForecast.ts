@@ -1,7 +1,9 @@
 import { distribution } from '../distribution.ts';
+import { pacelessSteps } from '../handling.ts';
 import type { Distribution, StepForecast } from '../types.ts';
 import { logVarianceOf } from './goodSeconds.ts';
 import type { GroomFit } from './groomFit.ts';
+import { groomWork } from './groomWork.ts';
 import { type LearnedNames, learnedWords } from './learnedWords.ts';
 import { predictMinutes, type PredictFor, stepLean } from './predictMinutes.ts';
 
@@ -29,7 +31,8 @@ export function learnForecast<T extends Distribution & { steps: StepForecast[] }
   who: PredictFor,
   names: LearnedNames = {},
 ): T & { learned: LearnedNote } {
-  const whole = predictMinutes(fit, who, { forecast, steps: forecast.steps });
+  const work = groomWork(forecast);
+  const whole = predictMinutes(fit, who, work);
   const visitsOf = (key: string) => fit.effects[key]?.records ?? 0;
   const learned: LearnedNote = {
     version: fit.version,
@@ -38,23 +41,29 @@ export function learnForecast<T extends Distribution & { steps: StepForecast[] }
     coatStyleVisits: visitsOf(`coatStyle ${who.coatStyle}`),
     learnedPermille: whole.learnedPermille,
     leanSePermille: Math.round(1000 * whole.leanSe),
-    words: learnedWords(fit, who, names, forecast.steps),
+    words: learnedWords(fit, who, names, work.steps),
   };
-  if (fit.records === 0) return { ...forecast, learned };
+  if (fit.records === 0 || work.steps.length === 0) return { ...forecast, learned };
 
-  const meanSeconds = whole.medianSeconds * Math.exp(whole.sigma ** 2 / 2);
-  const leaned = forecast.steps.map(
-    (step) => step.meanSeconds * Math.exp(stepLean(fit, who, step.family)),
+  const lean = ({ family, meanSeconds }: StepForecast) =>
+    meanSeconds * Math.exp(stepLean(fit, who, family));
+  const workMean = whole.medianSeconds * Math.exp(whole.sigma ** 2 / 2);
+  const scale = workMean / work.steps.reduce((sum, step) => sum + lean(step), 0);
+  const widen = whole.sigma ** 2 / logVarianceOf(work.forecast);
+  const steps = forecast.steps.map((step) =>
+    // What the pet bears stays what it bears, however slow the hands.
+    pacelessSteps.includes(step.key)
+      ? step
+      : leanStep(step, lean(step) * scale, widen, reasonText(learned)),
   );
-  const scale = meanSeconds / leaned.reduce((sum, seconds) => sum + seconds, 0);
-  const widen = whole.sigma ** 2 / logVarianceOf(forecast);
-  const steps = forecast.steps.map((step, index) =>
-    leanStep(step, leaned[index]! * scale, widen, reasonText(learned)),
+  const restVariance = forecast.varianceSeconds2 - work.forecast.varianceSeconds2;
+  const workSeconds = steps.reduce(
+    (sum, { key, meanSeconds }) => (key === 'rest' ? sum : sum + meanSeconds),
+    0,
   );
-  const stepsMean = steps.reduce((sum, step) => sum + step.meanSeconds, 0);
   const moments = {
-    meanSeconds: stepsMean,
-    varianceSeconds2: stepsMean ** 2 * Math.expm1(whole.sigma ** 2),
+    meanSeconds: steps.reduce((sum, step) => sum + step.meanSeconds, 0),
+    varianceSeconds2: workSeconds ** 2 * Math.expm1(whole.sigma ** 2) + restVariance,
   };
   return { ...forecast, ...distribution(moments), steps, learned };
 }

@@ -11,14 +11,14 @@ import {
   type HiddenPet,
 } from '../simulateVisit.ts';
 import { findStyle } from '../styles.ts';
-import type { MattingLevel, PetFacts, PetForecast, Style, Temperament } from '../types.ts';
+import type { MattingLevel, PetFacts, Style, Temperament } from '../types.ts';
 import type { BusinessSettings } from './businessSettings.ts';
 import type { GroomRecord } from './groomRecord.ts';
+import { groomWork } from './groomWork.ts';
 
-/** A visit with the forecast made for it and what it truly took, which no clock may have. */
+/** A visit and what its work truly took, rests apart, which no clock may have. */
 export interface SimulatedRecord {
   record: GroomRecord;
-  forecast: PetForecast;
   trueSeconds: number;
 }
 
@@ -99,7 +99,7 @@ interface DrawInput {
 
 function drawRecord(input: DrawInput): SimulatedRecord {
   const { petId, groomer, style, settings, random } = input;
-  const forecast = forecastPet(input.told, style);
+  const { forecast, steps } = groomWork(forecastPet(input.told, style));
   const visit = simulateVisit({
     pets: [
       {
@@ -115,13 +115,17 @@ function drawRecord(input: DrawInput): SimulatedRecord {
     weeksSinceStart: input.week,
     random,
   });
-  const trueSeconds = visit.steps.reduce((sum, step) => sum + step.actualSeconds, 0);
+  const sum = (isRest: boolean) =>
+    visit.steps
+      .filter(({ key }) => (key === 'rest') === isRest)
+      .reduce((total, step) => total + step.actualSeconds, 0);
+  const trueSeconds = sum(false);
+  const restSeconds = sum(true);
   const timed = chance(random, settings.stepsTimedPermille);
   const forgotten = chance(random, settings.petTimerForgottenPermille);
   const nineHours = random() < 0.5 ? 0 : 32_400;
   const clock = new Map(visit.steps.map((step) => [step.key, step.recordedSeconds]));
   return {
-    forecast,
     trueSeconds,
     record: {
       visitId: `visit-${input.index + 1}`,
@@ -131,23 +135,18 @@ function drawRecord(input: DrawInput): SimulatedRecord {
       coatStyle: input.coatStyle,
       styleId: style.id,
       day: Math.round(input.week * 7),
-      forecast: {
-        meanSeconds: forecast.meanSeconds,
-        varianceSeconds2: forecast.varianceSeconds2,
-      },
-      actualSeconds: forgotten ? nineHours : trueSeconds,
-      restSeconds: 0,
+      forecast,
+      actualSeconds: forgotten ? nineHours : trueSeconds + restSeconds,
+      restSeconds,
       ended: false,
       people: 1,
-      steps: forecast.steps.map(
-        ({ key, family, medianSeconds, meanSeconds, varianceSeconds2 }) => ({
-          family,
-          medianSeconds,
-          meanSeconds,
-          varianceSeconds2,
-          actualSeconds: timed ? (clock.get(key) ?? null) : null,
-        }),
-      ),
+      steps: steps.map(({ key, family, medianSeconds, meanSeconds, varianceSeconds2 }) => ({
+        family,
+        medianSeconds,
+        meanSeconds,
+        varianceSeconds2,
+        actualSeconds: timed ? (clock.get(key) ?? null) : null,
+      })),
     },
   };
 }
