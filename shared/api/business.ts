@@ -18,6 +18,8 @@ export const currency = z
 export const distanceUnit = z.enum(['km', 'mi'], 'must be km or mi');
 export const weightUnit = z.enum(['kg', 'lb'], 'must be kg or lb');
 
+const price = z.int().min(0, 'must not be negative').max(10_000_000, 'must be 100,000 or less');
+
 export const business = z.object({
   name: z.string(),
   timeZone: z.string(),
@@ -31,6 +33,9 @@ export const business = z.object({
   deskPhone: z.string().nullable(),
   setUpMinutes: z.int(),
   cleanDownMinutes: z.int(),
+  /** What a groomer's hour at the pet costs a household; 0 until it is set. In the currency's hundredths. */
+  priceCentsPerHour: z.int(),
+  calloutCents: z.int(),
 });
 export type Business = z.infer<typeof business>;
 
@@ -57,6 +62,8 @@ export const updateBusiness = endpoint({
       deskPhone: phone.nullable(),
       setUpMinutes: z.int().min(0).max(60, 'must be 60 minutes or fewer'),
       cleanDownMinutes: z.int().min(0).max(60, 'must be 60 minutes or fewer'),
+      priceCentsPerHour: price,
+      calloutCents: price,
     })
     .partial(),
   response: business,

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { endpoint } from './endpoint.ts';
 import { patchOf } from './patchOf.ts';
+import { styleShape } from './styles.ts';
 import { id, name, note, phone } from './values.ts';
 
 /** Keys of the tables in shared/grooming; a service refuses unknown ones by name. */
@@ -36,6 +37,8 @@ export const pet = petFields.extend({
   active: z.boolean(),
   breedName: z.string(),
   styleName: z.string(),
+  /** The style that counts, with this pet's own changes: what `forecastPet` takes. */
+  style: styleShape,
   /** Of the last finished visit, null for a first visit. */
   lastVisitDate: z.string().nullable(),
 });
