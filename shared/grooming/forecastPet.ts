@@ -47,12 +47,15 @@ export function forecastPet(
     );
   }
   checkCoatState(pet);
-  const work = draftWork(pet, style, model, options);
-  const { body, plan, cautions, drafts } = work;
+  const body = bodyOf(pet);
+  const work = draftWork(pet, style, body, model, options);
+  const { plan, cautions, drafts } = work;
   const limit = tableLimitSeconds(pet, work.age, cautions, model);
   const tableSeconds = tableSecondsOf(drafts);
+  // The coat has grown from the whole style, whatever is left out of it today.
+  const asGrown = { ...pet, lastCuts: pet.lastCuts ?? style.cuts };
   const over = overTable(style, limit, tableSeconds, (less) =>
-    tableSecondsOf(draftWork(pet, less, model, options).drafts),
+    tableSecondsOf(draftWork(asGrown, less, body, model, options).drafts),
   );
   const steps = drafts.map((draft) => finishStep(draft, work.sigmaOf(draft.key), model));
 
@@ -79,8 +82,13 @@ export function forecastPet(
 const LARGE_GRAMS = 32_000;
 
 /** Everything up to medians: the part plan B is tried on. */
-function draftWork(pet: PetFacts, style: Style, model: GroomModel, options: ForecastOptions) {
-  const body = bodyOf(pet);
+function draftWork(
+  pet: PetFacts,
+  style: Style,
+  body: Body,
+  model: GroomModel,
+  options: ForecastOptions,
+) {
   const age = ageBand(pet.ageYears, body);
   const { spread } = model;
   const daySigma = (pet.firstVisit ? spread.firstDayPermille : spread.dayPermille) / 1000;
@@ -102,7 +110,7 @@ function draftWork(pet: PetFacts, style: Style, model: GroomModel, options: Fore
   const rest = restStep(drafts, cautions, model);
   // Rests are spread over the work; they are listed once, before the wrap-up.
   if (rest) drafts.splice(-1, 0, rest);
-  return { body, age, daySigma, sigmaOf, plan, cautions, drafts, ...cut };
+  return { age, daySigma, sigmaOf, plan, cautions, drafts, ...cut };
 }
 
 function finishStep(draft: StepDraft, sigma: number, model: GroomModel): StepForecast {

@@ -129,7 +129,7 @@ function wordsOf(
   seconds: number,
   limit: number,
 ): string {
-  const parts = [...(regions.length > 0 ? [`${regionWords(regions)} uncut`] : [])];
+  const parts = regions.length > 0 ? [`${regionWords(regions)} uncut`] : [];
   if (services.length > 0)
     parts.push(`no ${services.map((each) => SERVICE_WORDS[each]).join(', ')}`);
   const then = `${durationWords(seconds)} on the table of ${durationWords(limit)}`;
