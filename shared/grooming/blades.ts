@@ -56,14 +56,16 @@ const ladder: readonly number[] = [
   ...guideCombsTenthsMm.filter((length) => length > blades.at(-1)!.lengthTenthsMm),
 ];
 
+const logLadder = ladder.map(Math.log);
+
 /** Past the longest comb a step is as large as the last one on the ladder. */
-const lastRatio = ladder.at(-1)! / ladder.at(-2)!;
+const lastLogRatio = logLadder.at(-1)! - logLadder.at(-2)!;
 
 function place(tenthsMm: number): number {
-  const length = Math.max(tenthsMm, ladder[0]!);
-  const above = ladder.findIndex((rung) => rung > length);
-  if (above === -1)
-    return ladder.length - 1 + Math.log(length / ladder.at(-1)!) / Math.log(lastRatio);
-  const low = ladder[above - 1]!;
-  return above - 1 + Math.log(length / low) / Math.log(ladder[above]! / low);
+  const log = Math.log(Math.max(tenthsMm, ladder[0]!));
+  const top = logLadder.length - 1;
+  if (log >= logLadder[top]!) return top + (log - logLadder[top]!) / lastLogRatio;
+  let below = 0;
+  while (logLadder[below + 1]! <= log) below += 1;
+  return below + (log - logLadder[below]!) / (logLadder[below + 1]! - logLadder[below]!);
 }

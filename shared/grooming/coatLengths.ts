@@ -1,5 +1,5 @@
 import { leftTenthsMm } from './blades.ts';
-import { regions, type Body } from './body.ts';
+import type { Body } from './body.ts';
 import type { CoatGrowth, GroomModel } from './groomModel.ts';
 import type { CoatType, PetFacts, Region, RegionCut, Style } from './types.ts';
 
@@ -75,6 +75,18 @@ function naturalTenthsMm(growth: CoatGrowth, region: Region): number {
   return growth.byRegionTenthsMm[region] ?? growth.naturalTenthsMm;
 }
 
+/** A plain literal: this runs for every keystroke in the style editor, in every plan B. */
 function each(length: (region: Region) => number): Lengths {
-  return Object.fromEntries(regions.map((region) => [region, length(region)])) as Lengths;
+  return {
+    head: length('head'),
+    ears: length('ears'),
+    neck: length('neck'),
+    back: length('back'),
+    belly: length('belly'),
+    foreLegs: length('foreLegs'),
+    hindLegs: length('hindLegs'),
+    feet: length('feet'),
+    tail: length('tail'),
+    sanitary: length('sanitary'),
+  };
 }

@@ -49,6 +49,7 @@ export function draftSteps(
     return step;
   };
   const coatTenthsMm = coatLengths(pet, style, body, model);
+  const lengthPermille = permilleForLength(coatTenthsMm, body, model);
 
   const checkIn = plain('checkIn', 'check in, hands-on look');
   if (pet.firstVisit) addSeconds(checkIn, model.firstVisit.checkInSeconds, 'first visit');
@@ -70,7 +71,7 @@ export function draftSteps(
     );
     scale(bath, soiled, 'dirty coat');
     const dry = scaleForCoat(plain('dry', 'dry'), body, model);
-    follow(dry, coatTenthsMm, body, model);
+    follow(dry, lengthPermille);
     shed(dry, pet, body, model);
     scale(dry, 1000 - Math.round(250 * plan.clippedShare), 'coat clipped short');
   }
@@ -78,7 +79,7 @@ export function draftSteps(
     // Without bath, undercoat or cut there is nothing to brush for: a nail trim stays a nail trim.
     if (has('bath') || has('deshed') || Object.keys(plan.cuts).length > 0) {
       const brush = scaleForCoat(plain('brush', 'brush and comb'), body, model);
-      follow(brush, coatTenthsMm, body, model);
+      follow(brush, lengthPermille);
       if (has('deshed')) scale(brush, model.deshedPermille, 'undercoat out');
       shed(brush, pet, body, model);
       scale(brush, 1000 - Math.round(500 * plan.clippedShare), 'coat clipped short');
@@ -111,14 +112,17 @@ function overRegions(body: Body, permille: (region: Region) => number): number {
  * A longer coat than usual holds more water and more comb. Only for coats that keep growing: the
  * others are about as long as they get, and their minutes already say so.
  */
-function follow(step: StepDraft, arrival: Lengths, body: Body, model: GroomModel): void {
-  if (!growingCoats.includes(body.coatType)) return;
+function permilleForLength(arrival: Lengths, body: Body, model: GroomModel): number {
+  if (!growingCoats.includes(body.coatType)) return 1000;
   const { usualTenthsMm, perStepPermille } = model.growth;
   const steps = regions.reduce((sum, region) => {
     const longer = arrival[region] > usualTenthsMm ? 1 : -1;
     return sum + body.shares[region] * longer * bladeSteps(arrival[region], usualTenthsMm);
   }, 0);
-  const permille = Math.min(1150, Math.max(850, 1000 + Math.round(perStepPermille * steps)));
+  return Math.min(1150, Math.max(850, 1000 + Math.round(perStepPermille * steps)));
+}
+
+function follow(step: StepDraft, permille: number): void {
   // A step that moves by less than a fiftieth says nothing.
   if (Math.abs(permille - 1000) < 20) return;
   scale(step, permille, permille > 1000 ? 'long coat' : 'short coat');

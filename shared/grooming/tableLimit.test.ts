@@ -4,7 +4,7 @@ import { forecastPet } from './forecastPet.ts';
 import { petLike } from './petLike.ts';
 import { planBOf } from './planB.ts';
 import { findStyle, styles } from './styles.ts';
-import type { PetFacts } from './types.ts';
+import type { PetFacts, Region } from './types.ts';
 
 function forecast(known: Partial<PetFacts>, styleId = 'teddy') {
   return forecastPet(petLike(known), findStyle(styleId));
@@ -70,6 +70,22 @@ describe('plan B', () => {
           expect(overTable.overSeconds).toBe(tableSeconds - tableLimitSeconds);
           expect(overTable.fits).toBe(overTable.tableSeconds <= tableLimitSeconds);
           const planB = planBOf(style);
+          const back = overTable.leftServices.filter(
+            (each) => planB.services[each] === 'ifAllowed',
+          );
+          for (const service of overTable.fits ? back : []) {
+            const left = overTable.leftServices.filter((each) => each !== service);
+            const cuts = Object.entries(style.cuts).filter(
+              ([region]) => !overTable.leftRegions.includes(region as Region),
+            );
+            const more = {
+              ...style,
+              cuts: Object.fromEntries(cuts),
+              services: style.services.filter((each) => !left.includes(each)),
+            };
+            const asGrown = { ...pet, lastCuts: style.cuts };
+            expect(forecastPet(asGrown, more).tableSeconds).toBeGreaterThan(tableLimitSeconds);
+          }
           for (const service of overTable.leftServices)
             expect(planB.services[service]).not.toBe('must');
           for (const region of overTable.leftRegions)

@@ -33,8 +33,8 @@ export function tableLimitSeconds(
 
 /**
  * What to leave out when the style asks for more than the limit, by its plan B: first everything to
- * `leave`, then what is done `ifAllowed`, cuts before care, one after the other until it fits. What
- * must be done stays, whether it fits or not. `secondsOf` is the time on the table in a style.
+ * `leave`, then what is done `ifAllowed`, cuts before care, one after the other until it fits, and
+ * back again what then still fits. What must be done stays, whether it fits or not. `secondsOf` is the time on the table in a style.
  */
 export function overTable(
   style: Style,
@@ -44,13 +44,22 @@ export function overTable(
 ): OverTable | null {
   if (tableSeconds <= limit) return null;
   const parts = partsOf(style);
-  const left: Part[] = parts.filter(({ word }) => word === 'leave');
-  let seconds = left.length > 0 ? secondsOf(without(style, left)) : tableSeconds;
+  const gone = parts.filter(({ word }) => word === 'leave');
+  let given: Part[] = [];
+  let seconds = gone.length > 0 ? secondsOf(without(style, gone)) : tableSeconds;
   for (const part of parts.filter(({ word }) => word === 'ifAllowed')) {
     if (seconds <= limit) break;
-    left.push(part);
-    seconds = secondsOf(without(style, left));
+    given.push(part);
+    seconds = secondsOf(without(style, [...gone, ...given]));
   }
+  // A long part given up last may have made room for what went before it, the dearest first.
+  for (const part of given.slice(0, -1).reverse()) {
+    if (seconds > limit) break;
+    const fewer = given.filter((each) => each !== part);
+    const longer = secondsOf(without(style, [...gone, ...fewer]));
+    if (longer <= limit) [given, seconds] = [fewer, longer];
+  }
+  const left = [...gone, ...given];
   const leftRegions = left.flatMap(({ regions }) => regions);
   const leftServices = left.flatMap(({ services }) => services);
   const fits = seconds <= limit;
