@@ -1,7 +1,9 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { bodyOf, regions, regionShares, surfaceCm2 } from './body.ts';
+import { forecastPet } from './forecastPet.ts';
 import { petLike } from './petLike.ts';
+import { findStyle } from './styles.ts';
 
 describe('surfaceCm2', () => {
   // k·W^(2/3) worked out apart from the code, W in grams: 0.101 × kg^(2/3) m² for dogs.
@@ -88,6 +90,31 @@ describe('bodyOf', () => {
     expect(bodyOf(petLike({ ...pug, weightGrams: null })).weightGrams).toBe(7_348);
     const cross = { breedId: null, weightGrams: null, sizeClass: 'large' } as const;
     expect(bodyOf(petLike(cross)).weightGrams).toBe(30_000);
+  });
+
+  it('asks for a cross’s weight: a size class beats its middle, and a guess says so', () => {
+    const cross = { breedId: 'goldendoodle', coatType: null, weightGrams: null } as const;
+    expect(bodyOf(petLike(cross))).toMatchObject({ weightGrams: 22_583, weightFrom: 'cross' });
+    const large = bodyOf(petLike({ ...cross, sizeClass: 'large' }));
+    expect(large).toMatchObject({ weightGrams: 30_000, weightFrom: 'size' });
+    // ln(34/15) / 3.29
+    expect(bodyOf(petLike(cross)).weightSpreadPermille).toBe(249);
+    expect(bodyOf(petLike({ weightGrams: 20_000 })).weightSpreadPermille).toBe(0);
+    expect(bodyOf(petLike({ ...cross, breedId: 'pug' })).weightFrom).toBe('breed');
+  });
+
+  it('a guessed weight widens the forecast, not its middle', () => {
+    const style = findStyle('teddy');
+    const guessed = forecastPet(petLike({ breedId: 'cockapoo', weightGrams: null }), style);
+    const weighed = forecastPet(
+      petLike({ breedId: 'cockapoo', weightGrams: guessed.heaviestGrams }),
+      style,
+    );
+    expect([guessed.weightFrom, weighed.weightFrom]).toEqual(['cross', 'given']);
+    expect(guessed.steps.map((step) => step.medianSeconds)).toEqual(
+      weighed.steps.map((step) => step.medianSeconds),
+    );
+    expect(guessed.varianceSeconds2).toBeGreaterThan(weighed.varianceSeconds2 * 1.1);
   });
 
   it('says which field is wrong and what would be right', () => {

@@ -1,11 +1,22 @@
 import { findBreed, middleGrams } from './breeds.ts';
-import type { BreedFacts, CoatType, PetFacts, Region, SizeClass, Species } from './types.ts';
+import type {
+  BreedFacts,
+  CoatType,
+  PetFacts,
+  Region,
+  SizeClass,
+  Species,
+  WeightFrom,
+} from './types.ts';
 
 /** A pet's body as the model needs it, settled from what is known about the pet. */
 export interface Body {
   species: Species;
   breed: BreedFacts | null;
   weightGrams: number;
+  weightFrom: WeightFrom;
+  /** SD of the log of the weight × 1000: 0 when weighed, else from the range it was guessed in. */
+  weightSpreadPermille: number;
   coatType: CoatType;
   undercoat: boolean;
   surfaceCm2: number;
@@ -28,7 +39,7 @@ export const regions: readonly Region[] = [
 
 /**
  * Settles weight, coat and surface. A weight given beats the breed's middle weight, which beats a
- * size class; a coat given beats the breed's.
+ * size class; for a cross the size class beats the middle. A coat given beats the breed's.
  * @throws RangeError naming the field that is missing or out of range and what would be right.
  */
 export function bodyOf(pet: PetFacts): Body {
@@ -38,7 +49,7 @@ export function bodyOf(pet: PetFacts): Body {
       `breedId "${breed.id}" is a ${breed.species}, but species is ${pet.species}.`,
     );
   }
-  const weightGrams = weightOf(pet, breed);
+  const weight = weightOf(pet, breed);
   const coatType = pet.coatType ?? breed?.coatType;
   if (!coatType) {
     throw new RangeError(
@@ -48,10 +59,10 @@ export function bodyOf(pet: PetFacts): Body {
   return {
     species: pet.species,
     breed,
-    weightGrams,
+    ...weight,
     coatType,
     undercoat: coatType === 'double' || (breed?.undercoat ?? false),
-    surfaceCm2: surfaceCm2(pet.species, weightGrams),
+    surfaceCm2: surfaceCm2(pet.species, weight.weightGrams),
     shares: regionShares(breed?.regionPermille ?? {}),
   };
 }
@@ -104,13 +115,18 @@ const NINES_PERMILLE: Record<Region, number> = {
   sanitary: 3,
 };
 
+/** A size class spans about 2.5 times between its ends: ln 2.5 / 3.29. */
+const SIZE_CLASS_SPREAD = 279;
+
 /** Wider than any sound pet: catches grams typed as kilograms and the reverse. */
 const WEIGHT_LIMITS: Record<Species, [number, number]> = {
   dog: [400, 120_000],
   cat: [400, 20_000],
 };
 
-function weightOf(pet: PetFacts, breed: BreedFacts | null): number {
+type Weight = Pick<Body, 'weightGrams' | 'weightFrom' | 'weightSpreadPermille'>;
+
+function weightOf(pet: PetFacts, breed: BreedFacts | null): Weight {
   if (pet.weightGrams !== null) {
     const [least, most] = WEIGHT_LIMITS[pet.species];
     if (!Number.isInteger(pet.weightGrams) || pet.weightGrams < least || pet.weightGrams > most) {
@@ -118,9 +134,19 @@ function weightOf(pet: PetFacts, breed: BreedFacts | null): number {
         `weightGrams must be whole grams from ${least} to ${most} for a ${pet.species}, got ${pet.weightGrams}.`,
       );
     }
-    return pet.weightGrams;
+    return { weightGrams: pet.weightGrams, weightFrom: 'given', weightSpreadPermille: 0 };
   }
-  if (breed) return middleGrams(breed);
-  if (pet.sizeClass) return sizeClassGrams[pet.species][pet.sizeClass];
+  if (pet.sizeClass && (breed === null || breed.cross)) {
+    const weightGrams = sizeClassGrams[pet.species][pet.sizeClass];
+    return { weightGrams, weightFrom: 'size', weightSpreadPermille: SIZE_CLASS_SPREAD };
+  }
+  if (breed) {
+    return {
+      weightGrams: middleGrams(breed),
+      weightFrom: breed.cross ? 'cross' : 'breed',
+      // The usual range is taken to hold nine in ten adults, 3.29 SDs.
+      weightSpreadPermille: Math.round((1000 * Math.log(breed.maxGrams / breed.minGrams)) / 3.29),
+    };
+  }
   throw new RangeError('weightGrams is missing: give a weight, a breed or a size class.');
 }

@@ -103,7 +103,7 @@ export const breeds: readonly BreedFacts[] = [
     undercoat: true,
   }),
   dog('lowchen', 'Little lion dog (Löwchen)', 233, 4, 8, 'drop', drop),
-  dog('biewer', 'Biewer terrier', null, 1.8, 3.6, 'drop', drop),
+  dog('biewer', 'Biewer terrier', null, 1.8, 3.6, 'drop', drop, { unlisted: true }),
   dog('shih-poo', 'Shih Tzu × poodle', null, 3.5, 8, 'drop', drop),
   dog('morkie', 'Maltese × Yorkshire terrier', null, 2, 5, 'drop', drop),
   dog('cesky-terrier', 'Cesky terrier', 246, 6, 10, 'drop', ['short-all-over', 'teddy']),
@@ -198,7 +198,10 @@ export const breeds: readonly BreedFacts[] = [
   dog('saluki', 'Saluki', 269, 18, 27, 'combination', tidyOnly, longHead),
   dog('field-spaniel', 'Field spaniel', 123, 17, 25, 'combination', spaniel, bigEars),
   dog('sussex-spaniel', 'Sussex spaniel', 127, 16, 23, 'combination', spaniel, bigEars),
-  dog('boykin-spaniel', 'Boykin spaniel', null, 11, 18, 'combination', spaniel, bigEars),
+  dog('boykin-spaniel', 'Boykin spaniel', null, 11, 18, 'combination', spaniel, {
+    ...bigEars,
+    unlisted: true,
+  }),
   dog('king-charles-spaniel', 'King Charles spaniel', 128, 3.6, 6.5, 'combination', spaniel, {
     shortNosed: true,
     regionPermille: { ears: 2000, tail: 4000 },
@@ -436,6 +439,8 @@ export function middleGrams(breed: Pick<BreedFacts, 'minGrams' | 'maxGrams'>): n
 interface Extras {
   undercoat?: boolean;
   shortNosed?: boolean;
+  /** A breed of its own that the FCI does not list: no cross. */
+  unlisted?: boolean;
   headShape?: HeadShape;
   regionPermille?: Partial<Record<Region, number>>;
 }
@@ -459,6 +464,7 @@ function dog(
     maxGrams: Math.round(maxKg * 1000),
     coatType,
     undercoat: extras.undercoat ?? (coatType === 'double' || coatType === 'wire'),
+    cross: fciNumber === null && !extras.unlisted,
     headShape: extras.shortNosed ? 'short' : (extras.headShape ?? 'medium'),
     shortNosed: extras.shortNosed ?? false,
     regionPermille: extras.regionPermille ?? {},
@@ -483,6 +489,7 @@ function cat(
   return {
     ...dog(id, name, null, minKg, maxKg, coatType, usual, extras),
     species: 'cat',
+    cross: false,
     undercoat: extras.undercoat ?? coatType === 'catLong',
   };
 }

@@ -71,6 +71,7 @@ export function forecastPet(
     overTable: over,
     waterMl: drafts.some(({ key }) => key === 'bath') ? waterMl(pet, body, model) : 0,
     heaviestGrams: body.weightGrams,
+    weightFrom: body.weightFrom,
     needs: skillsNeeded(body, drafts),
     cautions: cautions.map(({ key, words, stop }) => ({ key, words, stop })),
     extraCleanSeconds: Math.max(0, ...cautions.map((caution) => caution.extraCleanSeconds)),
@@ -91,7 +92,9 @@ function draftWork(
 ) {
   const age = ageBand(pet.ageYears, body);
   const { spread } = model;
-  const daySigma = (pet.firstVisit ? spread.firstDayPermille : spread.dayPermille) / 1000;
+  const day = pet.firstVisit ? spread.firstDayPermille : spread.dayPermille;
+  const weighed = (spread.perLogWeightPermille * body.weightSpreadPermille) / 1000;
+  const daySigma = Math.hypot(day, weighed) / 1000;
   const sigmaOf = (key: StepKey) => Math.hypot(spread.stepPermille[key] / 1000, daySigma);
   const matMeanPerMedian = Math.exp(sigmaOf('mats') ** 2 / 2);
   const used = options.matSecondsUsed ?? 0;

@@ -111,7 +111,13 @@ export interface GroomModel {
     soilPermille: readonly number[];
   };
   /** SD of log seconds × 1000: each step's own, and what all steps of a pet share on a day. */
-  spread: { stepPermille: Record<StepKey, number>; dayPermille: number; firstDayPermille: number };
+  spread: {
+    stepPermille: Record<StepKey, number>;
+    dayPermille: number;
+    firstDayPermille: number;
+    /** How far minutes follow a weight that is only guessed: per log of weight. */
+    perLogWeightPermille: number;
+  };
   attentionPermille: Record<StepKey, number>;
 }
 
@@ -317,6 +323,8 @@ export const groomModel: GroomModel = {
     },
     dayPermille: 220,
     firstDayPermille: 270,
+    // A teddy takes 74 min at 5 kg and 181 at 50: ln(181/74) / ln(10).
+    perLogWeightPermille: 390,
   },
   attentionPermille: {
     checkIn: 350,

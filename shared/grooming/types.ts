@@ -93,6 +93,8 @@ export interface BreedFacts {
   maxGrams: number;
   coatType: CoatType;
   undercoat: boolean;
+  /** A cross: its litter-mates differ by twice and more, so ask the weight or a size class. */
+  cross: boolean;
   headShape: HeadShape;
   /** The same as `headShape` being `short`. */
   shortNosed: boolean;
@@ -313,6 +315,9 @@ export interface PlanChange {
   needsConsent: true;
 }
 
+/** `given` · `breed` middle of the breed's range · `cross` the same of a cross · `size` a size class. */
+export type WeightFrom = 'given' | 'breed' | 'cross' | 'size';
+
 /** One pet's groom minutes. `meanSeconds` is the sum of the steps' means. */
 export interface PetForecast extends Distribution {
   steps: StepForecast[];
@@ -329,6 +334,8 @@ export interface PetForecast extends Distribution {
   overTable: OverTable | null;
   waterMl: number;
   heaviestGrams: number;
+  /** Where the weight came from; a guess widens the spread, and a cross's should be asked for. */
+  weightFrom: WeightFrom;
   needs: Skill[];
   cautions: CautionNote[];
   /** Cleaning this pet leaves behind beyond the usual (fleas: contact time of the disinfectant). */
