@@ -24,6 +24,7 @@ import { reviewRoutes } from '#server/routes/reviewRoutes.ts';
 import { runRoutes } from '#server/routes/runRoutes.ts';
 import { sessionRoutes } from '#server/routes/sessionRoutes.ts';
 import { setupRoutes } from '#server/routes/setupRoutes.ts';
+import { styleRoutes } from '#server/routes/styleRoutes.ts';
 import { textRoutes } from '#server/routes/textRoutes.ts';
 import { visitRoutes } from '#server/routes/visitRoutes.ts';
 import { webhookRoutes } from '#server/routes/webhookRoutes.ts';
@@ -64,6 +65,7 @@ export function buildApp(): Express {
     setupRoutes,
     areaRoutes,
     householdRoutes,
+    styleRoutes,
     visitRoutes,
     dayRoutes,
     runRoutes,

@@ -31,3 +31,23 @@ export function owns(column: string, target: string, onDelete = 'RESTRICT'): str
 }
 
 export const ofBusiness = 'FOREIGN KEY (businessId) REFERENCES businesses (id) ON DELETE CASCADE';
+
+/** A migration that adds columns to a table that is there already, all or none. */
+export function addColumns(name: string, columns: Record<string, string>): Migration {
+  const run = (query: QueryInterface, parts: string[]) =>
+    query.sequelize.query(`ALTER TABLE \`${name}\` ${parts.join(', ')}`);
+  return {
+    async up(query) {
+      await run(
+        query,
+        Object.entries(columns).map(([key, type]) => `ADD COLUMN IF NOT EXISTS ${key} ${type}`),
+      );
+    },
+    async down(query) {
+      await run(
+        query,
+        Object.keys(columns).map((key) => `DROP COLUMN IF EXISTS ${key}`),
+      );
+    },
+  };
+}

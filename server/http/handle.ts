@@ -25,17 +25,20 @@ export interface SignedCall<E extends Endpoint> extends Call<E> {
 /**
  * Binds an endpoint: ability → zod → use-case → response schema. The ability is required; 'public'
  * is said aloud through `handlePublic`. The answer is parsed on the way out, so a column nobody
- * named cannot leak.
+ * named cannot leak. `readBody` reads a body that is not JSON, once it is known who sends it and
+ * before the transaction opens.
  */
 export function handle<E extends Endpoint>(
   router: Router,
   endpoint: E,
   ability: Exclude<Ability, 'public'>,
   fn: (call: SignedCall<E>) => Promise<z.input<E['response']>>,
+  options: { readBody?: (req: Request, res: Response) => Promise<void> } = {},
 ): void {
   bind(router, endpoint, ability, async (req, res) => {
     const actor = needActor(req, ability);
     needCsrf(req, actor.sessionId);
+    await options.readBody?.(req, res);
     const call = { ...readInput(endpoint, req), now: clock.now(), req, res, actor };
     return actAs(actor, () => fn(call), { onlyReads: endpoint.method === 'GET' });
   });

@@ -2,6 +2,7 @@ import { schedule } from 'node-cron';
 import { clock } from '#server/clock.ts';
 import { log } from '#server/log.ts';
 import { resealGateCodes } from '#server/services/households/resealGateCodes.ts';
+import { sweepPhotos } from '#server/services/photos/sweepPhotos.ts';
 import { sendDueTexts } from '#server/services/texts/sendDueTexts.ts';
 import { removeExpired } from '#server/services/upkeep/removeExpired.ts';
 
@@ -54,5 +55,6 @@ async function sendAll(origin: string): Promise<void> {
 
 async function keepUp(): Promise<void> {
   await removeExpired(clock.now());
+  await sweepPhotos(clock.now());
   await resealGateCodes();
 }

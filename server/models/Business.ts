@@ -21,6 +21,8 @@ export class Business extends Model<InferAttributes<Business>, InferCreationAttr
   declare deskPhone: CreationOptional<string | null>;
   declare setUpMinutes: CreationOptional<number>;
   declare cleanDownMinutes: CreationOptional<number>;
+  declare priceCentsPerHour: CreationOptional<number>;
+  declare calloutCents: CreationOptional<number>;
   declare weights: Weights;
   declare isDemo: CreationOptional<boolean>;
   declare createdAt: Date;
@@ -39,6 +41,8 @@ Business.init(
     deskPhone: DataTypes.STRING,
     setUpMinutes: { type: DataTypes.INTEGER, defaultValue: 6 },
     cleanDownMinutes: { type: DataTypes.INTEGER, defaultValue: 6 },
+    priceCentsPerHour: { type: DataTypes.INTEGER, defaultValue: 0 },
+    calloutCents: { type: DataTypes.INTEGER, defaultValue: 0 },
     weights: DataTypes.JSON,
     isDemo: { type: DataTypes.BOOLEAN, defaultValue: false },
     createdAt: DataTypes.DATE(3),

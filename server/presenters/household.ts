@@ -1,7 +1,7 @@
 import type { z } from 'zod';
 import type { getHousehold, household, listHouseholds, site } from '#shared/api/households.ts';
 import type { pet } from '#shared/api/pets.ts';
-import { findStyle } from '#shared/grooming/styles.ts';
+import type { Style } from '#shared/grooming/types.ts';
 import type { Household } from '#server/models/Household.ts';
 import type { Pet } from '#server/models/Pet.ts';
 import type { Promise as PromiseRow } from '#server/models/Promise.ts';
@@ -10,6 +10,7 @@ import type { Site } from '#server/models/Site.ts';
 import type { Van } from '#server/models/Van.ts';
 import type { Visit } from '#server/models/Visit.ts';
 import type { VisitPet } from '#server/models/VisitPet.ts';
+import { presentStyleShape } from './style.ts';
 import { breedNameOf } from './visit.ts';
 
 /** The gate code itself never leaves by this door; only whether there is one. */
@@ -46,7 +47,11 @@ export function presentSite(facts: { site: Site; householdCount: number }): z.in
   };
 }
 
-export function presentPet(row: Pet, lastVisitDate: string | null): z.input<typeof pet> {
+export function presentPet(
+  row: Pet,
+  style: Style,
+  lastVisitDate: string | null,
+): z.input<typeof pet> {
   return {
     id: row.id,
     householdId: row.householdId,
@@ -65,7 +70,8 @@ export function presentPet(row: Pet, lastVisitDate: string | null): z.input<type
     vetName: row.vetName,
     vetPhone: row.vetPhone ?? null,
     styleId: row.styleId,
-    styleName: findStyle(row.styleId).name,
+    styleName: style.name,
+    style: presentStyleShape(style),
     styleNotes: row.styleNotes,
     intervalWeeks: row.intervalWeeks,
     active: row.active,
@@ -120,6 +126,7 @@ export function presentHouseholdDetail(facts: {
   promises: PromiseRow[];
   runs: Run[];
   vans: Van[];
+  styleOf: (pet: Pet) => Style;
 }): z.input<(typeof getHousehold)['response']> {
   const lastDone = (petId: string) =>
     facts.visits.find(
@@ -129,7 +136,7 @@ export function presentHouseholdDetail(facts: {
     )?.date ?? null;
   return {
     household: presentHousehold(facts.household),
-    pets: facts.pets.map((one) => presentPet(one, lastDone(one.id))),
+    pets: facts.pets.map((one) => presentPet(one, facts.styleOf(one), lastDone(one.id))),
     visits: facts.visits.map((visit) => {
       const promise = facts.promises.findLast((one) => one.visitId === visit.id);
       const run = facts.runs.find(

@@ -21,6 +21,8 @@ export function presentBusiness(row: Business): z.input<typeof business> {
     deskPhone: row.deskPhone ?? null,
     setUpMinutes: row.setUpMinutes,
     cleanDownMinutes: row.cleanDownMinutes,
+    priceCentsPerHour: row.priceCentsPerHour,
+    calloutCents: row.calloutCents,
   };
 }
 

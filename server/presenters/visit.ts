@@ -1,7 +1,7 @@
 import type { z } from 'zod';
 import type { visitCard } from '#shared/api/visits.ts';
 import { findBreed, middleGrams } from '#shared/grooming/breeds.ts';
-import { findStyle } from '#shared/grooming/styles.ts';
+import type { Style } from '#shared/grooming/types.ts';
 import type { Household } from '#server/models/Household.ts';
 import type { Pet } from '#server/models/Pet.ts';
 import type { Site } from '#server/models/Site.ts';
@@ -11,7 +11,7 @@ interface VisitFacts {
   visit: Visit;
   household: Household;
   site: Site | null;
-  pets: { pet: Pet; cautions: { key: string; words: string; stop: boolean }[] }[];
+  pets: { pet: Pet; style: Style; cautions: { key: string; words: string; stop: boolean }[] }[];
   promise: { startMinutes: number; endMinutes: number; version: number } | null;
 }
 
@@ -32,13 +32,13 @@ export function presentVisit(facts: VisitFacts): z.input<typeof visitCard> {
     textsConsent: household.textsConsent,
     note: visit.note,
     promise: facts.promise,
-    pets: facts.pets.map(({ pet, cautions }) => ({
+    pets: facts.pets.map(({ pet, style, cautions }) => ({
       id: pet.id,
       name: pet.name,
       species: pet.species,
       breedName: breedNameOf(pet),
       weightGrams: pet.weightGrams ?? (pet.breedId ? middleGrams(findBreed(pet.breedId)) : 0),
-      styleName: findStyle(pet.styleId).name,
+      styleName: style.name,
       styleNotes: pet.styleNotes,
       temperament: pet.temperament,
       cautions,

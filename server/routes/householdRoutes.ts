@@ -19,6 +19,7 @@ import {
   updateHousehold,
 } from '#server/services/households/households.ts';
 import { createPet, updatePet } from '#server/services/households/pets.ts';
+import { stylesOf } from '#server/services/styles/stylesOf.ts';
 import {
   createSite,
   listSites,
@@ -66,7 +67,7 @@ handle(householdRoutes, api.removeSite, 'households.edit', async ({ params }) =>
 handle(householdRoutes, petApi.getPet, 'households.read', async ({ params }) => {
   const found = await getPet(params.petId);
   return {
-    pet: presentPet(found.pet, found.lastVisitDate),
+    pet: presentPet(found.pet, found.style, found.lastVisitDate),
     householdName: found.household.name,
     past: found.visits.flatMap((visit) => {
       const clock = found.clocks.get(visit.id);
@@ -83,10 +84,25 @@ handle(householdRoutes, petApi.getPet, 'households.read', async ({ params }) => 
     }),
   };
 });
-handle(householdRoutes, petApi.createPet, 'households.edit', async ({ params, body, now }) =>
-  presentPet(await createPet(params.householdId, body, now), null),
+handle(
+  householdRoutes,
+  petApi.createPet,
+  'households.edit',
+  async ({ actor, params, body, now }) => {
+    const pet = await createPet(params.householdId, body, now, actor.userName);
+    return presentPet(pet, (await stylesOf([pet]))(pet), null);
+  },
 );
-handle(householdRoutes, petApi.updatePet, 'households.edit', async ({ params, body, now }) => {
-  const pet = await updatePet(params.petId, body, now);
-  return presentPet(pet, (await lastVisitDates([pet.id])).get(pet.id) ?? null);
-});
+handle(
+  householdRoutes,
+  petApi.updatePet,
+  'households.edit',
+  async ({ actor, params, body, now }) => {
+    const pet = await updatePet(params.petId, body, now, actor.userName);
+    return presentPet(
+      pet,
+      (await stylesOf([pet]))(pet),
+      (await lastVisitDates([pet.id])).get(pet.id) ?? null,
+    );
+  },
+);

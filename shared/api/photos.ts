@@ -23,7 +23,7 @@ export const photo = z.object({
 export type Photo = z.infer<typeof photo>;
 
 /**
- * The body is multipart/form-data with one file in the field `photo`: JPEG, PNG, WebP, HEIC or AVIF,
+ * The body is multipart/form-data with one file in the field `photo`: JPEG, PNG, WebP or AVIF,
  * told by its content. Kept as JPEG without any metadata (no place, no camera). Errors: 400 with
  * `fields.photo` for another type, a broken file or too many; 413 when it is too large.
  */

@@ -35,15 +35,19 @@ export const regionCut = z.discriminatedUnion(
   'must be leave, a blade or comb with a length and direction, scissor or strip',
 );
 /** Regions not named are not touched. */
-export const styleCuts = z.partialRecord(region, regionCut);
+export const styleCuts = z.partialRecord(
+  region,
+  regionCut,
+  `must be cuts by region: ${region.options.join(', ')}`,
+);
 export const styleServices = z
   .array(styleService)
   .max(7)
   .refine((list) => new Set(list).size === list.length, 'must name each service once');
 const planBWord = z.enum(['must', 'ifAllowed', 'leave']);
 export const stylePlanB = z.object({
-  services: z.partialRecord(styleService, planBWord),
-  regions: z.partialRecord(region, planBWord),
+  services: z.partialRecord(styleService, planBWord, 'must be words by service'),
+  regions: z.partialRecord(region, planBWord, 'must be words by region'),
 });
 const finish = z.enum(['tidy', 'pet', 'full']);
 

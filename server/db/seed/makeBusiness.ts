@@ -35,6 +35,8 @@ export async function makeBusiness(
       areaName: area.name,
       senderPhone: '+447700900999',
       deskPhone: '+447700900998',
+      priceCentsPerHour: 6500,
+      calloutCents: 1500,
       weights: startingWeights,
       isDemo: true,
       createdAt: now,

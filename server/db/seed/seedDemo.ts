@@ -12,6 +12,7 @@ import { type DemoSignIn, demoSignIns } from './demoSignIns.ts';
 import { dueOn, type Rhythm } from './dueOn.ts';
 import { householdCount, makeHouseholds } from './makeHouseholds.ts';
 import { makeBusiness } from './makeBusiness.ts';
+import { stylesOf } from '#server/services/styles/stylesOf.ts';
 import { forecastOf } from '#server/services/visits/forecastOf.ts';
 import { planDate } from './planDate.ts';
 import { seedActor } from './seedActor.ts';
@@ -83,9 +84,10 @@ async function loadRhythms(businessId: string, date: string): Promise<Rhythm[]> 
     }),
     Pet.findAll({ where: { active: true }, order: [['name', 'ASC']] }),
   ]);
+  const styleOf = await stylesOf(pets);
   return households.map((household) => {
     const own = pets.filter((pet) => pet.householdId === household.id);
-    const { forecast } = forecastOf(own, business!, date, new Map());
+    const { forecast } = forecastOf(own, business!, date, new Map(), styleOf);
     const { work, setUpSeconds, cleanDownSeconds } = forecast;
     return {
       household,

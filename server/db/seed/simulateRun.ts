@@ -5,7 +5,6 @@ import {
   drawHiddenGroomer,
   drawHiddenPet,
 } from '#shared/grooming/simulateVisit.ts';
-import { findStyle } from '#shared/grooming/styles.ts';
 import { normalDraw } from '#shared/grooming/normalDraw.ts';
 import type { DayProblem } from '#shared/schedule/types.ts';
 import { secondsToInstant } from '#shared/time/wallSeconds.ts';
@@ -81,11 +80,11 @@ function workVisit(
   }
   const on = new Date(`${facts.visit.date}T12:00:00Z`);
   const drawn = simulateVisit({
-    pets: facts.pets.map(({ pet }) => ({
+    pets: facts.pets.map(({ pet, style }) => ({
       petId: pet.id,
       name: pet.name,
       pet: petFactsOf(pet, on, work.lastVisits.get(pet.id) ?? null),
-      style: findStyle(pet.styleId),
+      style,
       hidden: drawHiddenPet(randomFor(`pet ${facts.household.name} ${pet.name} ${pet.breedId}`)),
       coatStylePermille: drawCoatStylePermille(randomFor(`coat ${facts.visit.forecast.coatStyle}`)),
     })),

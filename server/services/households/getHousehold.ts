@@ -5,6 +5,7 @@ import { Run } from '#server/models/Run.ts';
 import { Van } from '#server/models/Van.ts';
 import { Visit } from '#server/models/Visit.ts';
 import { VisitPet } from '#server/models/VisitPet.ts';
+import { stylesOf } from '#server/services/styles/stylesOf.ts';
 import { clockOfVisits } from '#server/services/runs/clockOfVisits.ts';
 import { needHousehold } from './households.ts';
 import { needPet } from './pets.ts';
@@ -31,7 +32,8 @@ export async function getHousehold(householdId: string) {
     Run.findAll({ where: { date: visits.map((visit) => visit.date) } }),
     Van.findAll(),
   ]);
-  return { household, pets, visits, visitPets, promises, runs, vans };
+  const styleOf = await stylesOf(pets);
+  return { household, pets, visits, visitPets, promises, runs, vans, styleOf };
 }
 
 /** The date of each pet's last finished visit. */
@@ -68,5 +70,6 @@ export async function getPet(petId: string) {
     Groomer.findAll(),
     lastVisitDates([petId]),
   ]);
-  return { pet, household, visits, clocks, groomers, lastVisitDate: last.get(petId) ?? null };
+  const style = (await stylesOf([pet]))(pet);
+  return { pet, style, household, visits, clocks, groomers, lastVisitDate: last.get(petId) ?? null };
 }

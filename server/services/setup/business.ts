@@ -20,6 +20,8 @@ export type BusinessChange = Partial<
     | 'deskPhone'
     | 'setUpMinutes'
     | 'cleanDownMinutes'
+    | 'priceCentsPerHour'
+    | 'calloutCents'
   >
 >;
 

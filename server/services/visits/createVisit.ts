@@ -11,6 +11,7 @@ import { logChange } from '#server/services/days/logChange.ts';
 import { lockDay } from '#server/services/days/lockDay.ts';
 import { localDateOf } from '#server/services/days/today.ts';
 import { lastVisitDates } from '#server/services/households/getHousehold.ts';
+import { stylesOf } from '#server/services/styles/stylesOf.ts';
 import { forecastOf } from './forecastOf.ts';
 
 export interface VisitInput {
@@ -45,6 +46,7 @@ export async function createVisit(actor: Actor, input: VisitInput, now: Date): P
     business,
     input.date,
     await lastVisitDates(petIds),
+    await stylesOf(pets),
   );
   const visit = await Visit.create({
     householdId: household.id,
