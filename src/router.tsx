@@ -89,11 +89,23 @@ export const routes: RouteObject[] = [
           },
           {
             path: '/households/:householdId/pets/new',
-            lazy: () => screen(import('./routes/PetScreen.tsx'), 'PetScreen'),
+            lazy: () => screen(import('./routes/PetFormScreen.tsx'), 'PetFormScreen'),
           },
           {
             path: '/households/:householdId/pets/:petId',
             lazy: () => screen(import('./routes/PetScreen.tsx'), 'PetScreen'),
+          },
+          {
+            path: '/households/:householdId/pets/:petId/edit',
+            lazy: () => screen(import('./routes/PetFormScreen.tsx'), 'PetFormScreen'),
+          },
+          {
+            path: '/households/:householdId/pets/:petId/style',
+            lazy: () => screen(import('./routes/PetStyleScreen.tsx'), 'PetStyleScreen'),
+          },
+          {
+            path: '/forecast',
+            lazy: () => screen(import('./routes/ForecastScreen.tsx'), 'ForecastScreen'),
           },
           { path: '/texts', lazy: () => screen(import('./routes/TextsScreen.tsx'), 'TextsScreen') },
           {

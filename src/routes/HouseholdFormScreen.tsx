@@ -1,6 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
-import { useNavigate, useParams } from 'react-router-dom';
+import { useLocation, useNavigate, useParams } from 'react-router-dom';
 import { householdQueries, useCreateHousehold, useUpdateHousehold } from '#src/api/households.ts';
+import type { Where } from '#src/api/useWhere.ts';
 import { Loading } from '#src/components/Loading.tsx';
 import { PageHeader } from '#src/components/PageHeader.tsx';
 import { toast } from '#src/components/toast.ts';
@@ -16,11 +17,14 @@ export function HouseholdFormScreen() {
 function NewHousehold() {
   const navigate = useNavigate();
   const create = useCreateHousehold();
+  // The forecast hands on the address it was told.
+  const told = useLocation().state as { where?: Where } | null;
   return (
     <>
       <PageHeader title="Add a household" back={{ to: '/households', words: 'Households' }} />
       <HouseholdForm
         household={null}
+        where={told?.where ?? null}
         saveWords="Add the household"
         onSave={async (body) => {
           const made = await create.mutateAsync({ body });

@@ -1,104 +1,101 @@
 import { useQuery } from '@tanstack/react-query';
-import { useNavigate, useParams } from 'react-router-dom';
+import { useParams } from 'react-router-dom';
 import type { Pet } from '#shared/api/pets.ts';
-import { householdQueries } from '#src/api/households.ts';
-import { petQueries, useCreatePet, useUpdatePet } from '#src/api/pets.ts';
-import { useToday } from '#src/api/session.ts';
+import { petStyleQueries } from '#src/api/petStyles.ts';
+import { useCan, useSession } from '#src/api/sessionStore.ts';
+import { ButtonLink } from '#src/components/ButtonLink.tsx';
 import { Chip } from '#src/components/Chip.tsx';
+import { ErrorNote } from '#src/components/ErrorNote.tsx';
 import { Loading } from '#src/components/Loading.tsx';
 import { PageHeader } from '#src/components/PageHeader.tsx';
-import { toast } from '#src/components/toast.ts';
+import { leanWords } from '#src/features/households/leanWords.ts';
 import { PastVisits } from '#src/features/households/PastVisits.tsx';
-import { PetForm } from '#src/features/households/PetForm.tsx';
-import { RestPet } from '#src/features/households/RestPet.tsx';
+import { PetCautions } from '#src/features/households/PetCautions.tsx';
+import { PetStyleCard } from '#src/features/styles/PetStyleCard.tsx';
+import { StyleVersions } from '#src/features/styles/StyleVersions.tsx';
+import { writeWeight, type WeightUnit } from '#src/lib/measures.ts';
 import { FailedQuery } from './FailedQuery.tsx';
+import { useKnownPet } from './useKnownPet.ts';
 
-/** One pet: its facts, its style, what it takes. Without a pet in the address, a new one. */
+/** One pet: how it is groomed and what that takes, what the past says, what to beware of. */
 export function PetScreen() {
-  const { householdId, petId } = useParams();
-  return petId ? (
-    <KnownPet key={petId} householdId={householdId!} petId={petId} />
-  ) : (
-    <NewPet householdId={householdId!} />
-  );
-}
-
-function NewPet({ householdId }: { householdId: string }) {
-  const navigate = useNavigate();
-  const create = useCreatePet();
-  const household = useQuery(householdQueries.one(householdId));
-  const back = `/households/${householdId}`;
-  return (
-    <>
-      <PageHeader
-        title="Add a pet"
-        back={{ to: back, words: household.data?.household.name ?? 'Household' }}
-      />
-      <PetForm
-        pet={null}
-        saveWords="Add the pet"
-        onSave={async (body) => {
-          await create.mutateAsync({ params: { householdId }, body });
-          toast(`${body.name} is added.`);
-          navigate(back, { state: { saved: true } });
-        }}
-      />
-    </>
-  );
-}
-
-function KnownPet({ householdId, petId }: { householdId: string; petId: string }) {
-  const navigate = useNavigate();
-  const today = useToday();
-  const update = useUpdatePet();
-  const found = useQuery(petQueries.one(petId));
+  const { householdId, petId } = useParams() as { householdId: string; petId: string };
+  const { business } = useSession();
+  const mayEdit = useCan('households.edit');
+  const { found, facts, today } = useKnownPet(petId);
+  const versions = useQuery(petStyleQueries.list(petId));
+  const household = `/households/${householdId}`;
   if (found.isPending) return <Loading lines={8} />;
   if (found.isError)
     return (
       <FailedQuery
         title="This pet does not open"
         error={found.error}
-        back={{ to: `/households/${householdId}`, words: 'Household' }}
+        back={{ to: household, words: 'Household' }}
         onRetry={() => found.refetch()}
       />
     );
   const { pet, past, householdName } = found.data;
-  const back = `/households/${householdId}`;
+  const at = `${household}/pets/${petId}`;
   return (
     <>
       <PageHeader
         title={pet.name}
-        dim={
-          <span className="flex flex-wrap items-center gap-x-2 gap-y-1">
-            {factWords(pet, today)}
-            {!pet.active && <Chip tone="heed">rests: not booked any more</Chip>}
-          </span>
-        }
-        back={{ to: back, words: householdName }}
-        actions={<RestPet pet={pet} />}
+        dim={<PetFactWords pet={pet} today={today} unit={business.weightUnit} />}
+        back={{ to: household, words: householdName }}
+        actions={mayEdit && <ButtonLink to={`${at}/edit`}>Change {pet.name}</ButtonLink>}
       />
-      <PetForm
-        pet={pet}
-        saveWords={`Save ${pet.name}`}
-        onSave={async (body) => {
-          await update.mutateAsync({ params: { petId }, body });
-          toast(`${body.name} is saved.`);
-          navigate(back, { state: { saved: true } });
-        }}
-        below={<PastVisits past={past} year={Number(today.slice(0, 4))} />}
-      />
+      <div className="grid gap-4 lg:gap-5">
+        <PetStyleCard
+          pet={pet}
+          version={versions.data?.[0] ?? null}
+          facts={facts ?? 'No forecast yet.'}
+          timeZone={business.timeZone}
+          today={today}
+          editTo={mayEdit ? `${at}/style` : null}
+          learned={past.length > 0 ? leanWords(past) : null}
+        />
+        <div className="grid items-start gap-4 lg:grid-cols-[minmax(0,1.25fr)_minmax(0,1fr)] lg:gap-5">
+          <div className="grid gap-4">
+            <PastVisits past={past} year={Number(today.slice(0, 4))} petName={pet.name} />
+            <PetCautions pet={pet} />
+          </div>
+          {versions.isError ? (
+            <ErrorNote
+              error={versions.error}
+              title="The versions of the style do not open"
+              onRetry={() => versions.refetch()}
+            />
+          ) : versions.isPending ? (
+            <Loading lines={4} />
+          ) : (
+            <StyleVersions
+              petName={pet.name}
+              versions={versions.data}
+              timeZone={business.timeZone}
+              today={today}
+              mayEdit={mayEdit}
+            />
+          )}
+        </div>
+      </div>
     </>
   );
 }
 
-function factWords(pet: Pet, today: string): string {
+function PetFactWords({ pet, today, unit }: { pet: Pet; today: string; unit: WeightUnit }) {
   const age = pet.birthYear === null ? null : Number(today.slice(0, 4)) - pet.birthYear;
-  return [
+  const words = [
     pet.breedName,
-    pet.styleName,
+    pet.weightGrams === null ? null : writeWeight(pet.weightGrams, unit),
     age === null ? null : age < 1 ? 'under a year' : age === 1 ? '1 year' : `${age} years`,
+    pet.temperament,
     `every ${pet.intervalWeeks} weeks`,
-  ]
-    .filter(Boolean)
-    .join(' · ');
+  ];
+  return (
+    <span className="flex flex-wrap items-center gap-x-2 gap-y-1">
+      {words.filter(Boolean).join(' · ')}
+      {!pet.active && <Chip tone="heed">rests: not booked any more</Chip>}
+    </span>
+  );
 }

@@ -50,6 +50,13 @@ const tabs: { key: string; words: string; Panel: ComponentType }[] = [
     })),
   },
   {
+    key: 'styles',
+    words: 'Styles',
+    Panel: lazy(async () => ({
+      default: (await import('#src/features/styles/StylesPanel.tsx')).StylesPanel,
+    })),
+  },
+  {
     key: 'people',
     words: 'People',
     Panel: lazy(async () => ({
@@ -58,7 +65,7 @@ const tabs: { key: string; words: string; Panel: ComponentType }[] = [
   },
 ];
 
-/** What the days are made from: business, area, places, vans, groomers, shifts, people. */
+/** What the days are made from: business, area, places, vans, groomers, shifts, styles, people. */
 export function SetupScreen() {
   const { tab } = useParams();
   const { business } = useSession();

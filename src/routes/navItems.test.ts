@@ -8,8 +8,15 @@ const words = (roles: Role[], worksInVan: boolean) =>
 
 test('each person sees the screens they use', () => {
   expect(words(['groomer'], true)).toEqual(['Run']);
-  expect(words(['dispatcher'], false)).toEqual(['Day', 'Households', 'Texts', 'Setup']);
-  expect(words(['operator'], false)).toEqual(['Day', 'Households', 'Texts', 'Review', 'Setup']);
+  expect(words(['dispatcher'], false)).toEqual(['Day', 'Households', 'Forecast', 'Texts', 'Setup']);
+  expect(words(['operator'], false)).toEqual([
+    'Day',
+    'Households',
+    'Forecast',
+    'Texts',
+    'Review',
+    'Setup',
+  ]);
 });
 
 test('a one-van owner has it all, the run included', () => {
@@ -17,6 +24,7 @@ test('a one-van owner has it all, the run included', () => {
     'Day',
     'Run',
     'Households',
+    'Forecast',
     'Texts',
     'Review',
     'Setup',

@@ -1,6 +1,6 @@
 import type { NamedAbility } from '#shared/api/abilities.ts';
 
-export type NavIcon = 'day' | 'run' | 'households' | 'texts' | 'review' | 'setup';
+export type NavIcon = 'day' | 'run' | 'households' | 'forecast' | 'texts' | 'review' | 'setup';
 
 export interface NavItem {
   to: string;
@@ -12,6 +12,7 @@ const all: (NavItem & { ability: NamedAbility })[] = [
   { to: '/day', words: 'Day', icon: 'day', ability: 'days.read' },
   { to: '/run', words: 'Run', icon: 'run', ability: 'runs.work' },
   { to: '/households', words: 'Households', icon: 'households', ability: 'households.read' },
+  { to: '/forecast', words: 'Forecast', icon: 'forecast', ability: 'visits.edit' },
   { to: '/texts', words: 'Texts', icon: 'texts', ability: 'texts.read' },
   { to: '/review', words: 'Review', icon: 'review', ability: 'review.read' },
   { to: '/setup', words: 'Setup', icon: 'setup', ability: 'setup.read' },

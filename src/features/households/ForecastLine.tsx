@@ -1,10 +1,10 @@
 import { summaryWords } from '#shared/grooming/explain.ts';
-import type { PetFacts } from '#shared/grooming/types.ts';
+import type { PetFacts, Style } from '#shared/grooming/types.ts';
 import { tryForecast } from './tryForecast.ts';
 
 /** On a phone the whole forecast stands below the form; its sum keeps up here. */
-export function ForecastLine({ facts, styleId }: { facts: PetFacts | string; styleId: string }) {
-  const forecast = tryForecast(facts, styleId);
+export function ForecastLine({ facts, style }: { facts: PetFacts | string; style: Style | null }) {
+  const forecast = tryForecast(facts, style);
   if (typeof forecast === 'string') return null;
   return (
     <a

@@ -3,7 +3,7 @@ import { useQuery } from '@tanstack/react-query';
 import type { z } from 'zod';
 import { createHousehold, type Household, type Site } from '#shared/api/households.ts';
 import { householdQueries } from '#src/api/households.ts';
-import { useWhere } from '#src/api/useWhere.ts';
+import { useWhere, type Where } from '#src/api/useWhere.ts';
 import { Button } from '#src/components/Button.tsx';
 import { Card } from '#src/components/Card.tsx';
 import { CheckboxField } from '#src/components/CheckboxField.tsx';
@@ -27,15 +27,18 @@ export type HouseholdFields = z.output<typeof createHousehold.body>;
 /** Who opens the door, where the van parks, what to know at the kerb. */
 export function HouseholdForm({
   household,
+  where: startWhere = null,
   onSave,
   saveWords,
 }: {
   household: Household | null;
+  /** Where a new one is, when that was told before. */
+  where?: Where | null;
   onSave: (fields: HouseholdFields) => Promise<void>;
   saveWords: string;
 }) {
   const { business } = useSession();
-  const form = useZodForm(createHousehold.body, householdStart(household));
+  const form = useZodForm(createHousehold.body, householdStart(household, startWhere));
   const submit = useSubmit(form, onSave);
   const sites = useQuery(householdQueries.sites());
   const [makingSite, setMakingSite] = useState(false);

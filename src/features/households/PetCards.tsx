@@ -3,7 +3,6 @@ import type { Pet } from '#shared/api/pets.ts';
 import { findCaution } from '#shared/grooming/cautions.ts';
 import { explain } from '#shared/grooming/explain.ts';
 import { forecastPet } from '#shared/grooming/forecastPet.ts';
-import { findStyle } from '#shared/grooming/styles.ts';
 import type { CautionKey } from '#shared/grooming/types.ts';
 import { useSession } from '#src/api/sessionStore.ts';
 import { ButtonLink } from '#src/components/ButtonLink.tsx';
@@ -108,7 +107,7 @@ function shortWords(key: string): string {
 function tryForecast(pet: Pet, today: string) {
   try {
     const facts = petFactsOf(pet, pet.lastVisitDate, today);
-    return typeof facts === 'string' ? null : forecastPet(facts, findStyle(pet.styleId));
+    return typeof facts === 'string' ? null : forecastPet(facts, pet.style);
   } catch {
     // A pet saved under an older table still shows; its own page says what is wrong.
     return null;

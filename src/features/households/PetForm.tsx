@@ -1,10 +1,13 @@
+import { useQuery } from '@tanstack/react-query';
 import type { z } from 'zod';
 import { createPet, type Pet } from '#shared/api/pets.ts';
 import { cautions } from '#shared/grooming/cautions.ts';
 import { findBreed } from '#shared/grooming/breeds.ts';
+import { styles as startingStyles } from '#shared/grooming/styles.ts';
 import type { BreedFacts, CoatType } from '#shared/grooming/types.ts';
 import { useToday } from '#src/api/session.ts';
 import { useSession } from '#src/api/sessionStore.ts';
+import { styleQueries } from '#src/api/styles.ts';
 import { Button } from '#src/components/Button.tsx';
 import { Card } from '#src/components/Card.tsx';
 import { FormChecks } from '#src/components/FormChecks.tsx';
@@ -36,18 +39,18 @@ import { styleChoices } from './styleChoices.ts';
 
 export type PetFields = z.output<typeof createPet.body>;
 
-/** Everything about a pet beside what it will take, which follows every change. */
+/**
+ * Everything about a pet beside what it will take, which follows every change. A new pet begins with
+ * a style; later its style has a page of its own, so a known pet's form leaves it alone.
+ */
 export function PetForm({
   pet,
   onSave,
   saveWords,
-  below,
 }: {
   pet: Pet | null;
   onSave: (fields: PetFields) => Promise<void>;
   saveWords: string;
-  /** Under the forecast: what the past says. */
-  below?: React.ReactNode;
 }) {
   const today = useToday();
   const { weightUnit } = useSession().business;
@@ -58,18 +61,20 @@ export function PetForm({
   const species = values.species;
   const breed = values.breedId ? findBreed(values.breedId) : null;
   const coat = (values.coatType ?? null) as CoatType | null;
+  const library = useQuery(styleQueries.list()).data ?? startingStyles;
+  const style = pet?.style ?? library.find(({ id }) => id === values.styleId) ?? null;
   const unit = (grams: number) => fromGrams(grams, weightUnit);
 
   const setBreed = (next: BreedFacts | null) => {
     form.setValue('breedId', next?.id ?? null, { shouldDirty: true, shouldValidate: true });
     form.setValue('coatType', null, { shouldDirty: true });
     const usual = next?.usualStyleIds[0];
-    if (usual) form.setValue('styleId', usual, { shouldDirty: true, shouldValidate: true });
+    if (usual && !pet) form.setValue('styleId', usual, { shouldDirty: true, shouldValidate: true });
   };
   const clearForSpecies = () => {
     form.setValue('breedId', null, { shouldDirty: true });
     form.setValue('coatType', null, { shouldDirty: true });
-    form.setValue('styleId', '', { shouldDirty: true });
+    if (!pet) form.setValue('styleId', '', { shouldDirty: true });
   };
 
   const facts = petFactsOf(
@@ -133,7 +138,7 @@ export function PetForm({
             />
           </div>
         </Card>
-        <Card title="Coat and style">
+        <Card title={pet ? 'Coat' : 'Coat and style'}>
           <div className="grid gap-4 md:grid-cols-2">
             <SelectField
               label="Coat"
@@ -142,13 +147,16 @@ export function PetForm({
               {...form.register('coatType', { setValueAs: emptyToNull })}
               error={errors.coatType?.message}
             />
-            <SelectField
-              label="Style"
-              empty="Choose a style"
-              choices={styleChoices(species, values.breedId, coat)}
-              {...form.register('styleId')}
-              error={errors.styleId && 'Choose a style.'}
-            />
+            {!pet && (
+              <SelectField
+                label="Style"
+                empty="Choose a style"
+                choices={styleChoices(library, species, values.breedId, coat)}
+                hint="The cut plan can be changed for this pet afterwards."
+                {...form.register('styleId')}
+                error={errors.styleId && 'Choose a style.'}
+              />
+            )}
             <div className="md:col-span-2">
               <FormLevel
                 control={form.control}
@@ -164,18 +172,20 @@ export function PetForm({
               label="Comes every"
               unit="weeks"
             />
-            <TextArea
-              label="Style notes"
-              required={false}
-              rows={2}
-              className="md:col-span-2"
-              hint="“Ears long, feet round, no perfume.”"
-              {...form.register('styleNotes')}
-              error={errors.styleNotes?.message}
-            />
+            {!pet && (
+              <TextArea
+                label="Style notes"
+                required={false}
+                rows={2}
+                className="md:col-span-2"
+                hint="“Ears long, feet round, no perfume.”"
+                {...form.register('styleNotes')}
+                error={errors.styleNotes?.message}
+              />
+            )}
           </div>
         </Card>
-        <ForecastLine facts={facts} styleId={values.styleId} />
+        <ForecastLine facts={facts} style={style} />
         <Card title="Cautions" dim="shown wherever the pet is handled">
           <FormChecks
             control={form.control}
@@ -210,14 +220,13 @@ export function PetForm({
         </Card>
       </div>
       <div id="what-it-takes" className="grid scroll-mt-4 gap-4 lg:sticky lg:top-4">
-        <ForecastPanel facts={facts} styleId={values.styleId} petName={values.name} />
+        <ForecastPanel facts={facts} style={style} petName={values.name} />
         <FormErrors error={submit.failure} fields={submit.strayFields} />
         <div>
           <Button type="submit" kind="go" busy={submit.busy} busyWords="Saving">
             {saveWords}
           </Button>
         </div>
-        {below}
       </div>
       <UnsavedGuard when={isDirty} />
     </form>

@@ -1,6 +1,6 @@
 import { expect, test } from 'vitest';
 import { forecastPet } from '#shared/grooming/forecastPet.ts';
-import { findStyle } from '#shared/grooming/styles.ts';
+import { findStyle, styles } from '#shared/grooming/styles.ts';
 import { petFactsOf, type PetLike } from './petFactsOf.ts';
 import { styleChoices } from './styleChoices.ts';
 
@@ -50,10 +50,12 @@ test('a year half typed does not break the forecast', () => {
 });
 
 test('styles: the usual ones of the breed first, what does not suit the coat last', () => {
-  const choices = styleChoices('dog', 'labradoodle', null);
+  const choices = styleChoices(styles, 'dog', 'labradoodle', null);
   expect(choices[0]).toEqual({ value: 'teddy', label: expect.stringContaining(' · usual') });
   expect(choices.at(-1)?.label).toContain('not for this coat');
   expect(
-    styleChoices('cat', null, null).every(({ value }) => findStyle(value).species === 'cat'),
+    styleChoices(styles, 'cat', null, null).every(
+      ({ value }) => findStyle(value).species === 'cat',
+    ),
   ).toBe(true);
 });

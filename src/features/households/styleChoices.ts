@@ -1,9 +1,9 @@
 import { findBreed } from '#shared/grooming/breeds.ts';
-import { styles } from '#shared/grooming/styles.ts';
-import type { CoatType, Species } from '#shared/grooming/types.ts';
+import type { CoatType, Species, Style } from '#shared/grooming/types.ts';
 
 /** Styles of a species, the breed's usual ones first, then those that suit the coat, then the rest. */
 export function styleChoices(
+  styles: readonly (Style & { retired?: boolean })[],
   species: Species,
   breedId: string | null,
   coatType: CoatType | null,
@@ -14,7 +14,7 @@ export function styleChoices(
   const rank = (id: string, coats: readonly CoatType[]) =>
     usual.includes(id) ? usual.indexOf(id) : coat && !coats.includes(coat) ? 200 : 100;
   return styles
-    .filter((style) => style.species === species)
+    .filter((style) => style.species === species && !style.retired)
     .map((style) => ({ style, rank: rank(style.id, style.coats) }))
     .sort((a, b) => a.rank - b.rank)
     .map(({ style, rank: place }) => ({

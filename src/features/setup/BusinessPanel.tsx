@@ -28,6 +28,12 @@ export function BusinessPanel() {
   return <BusinessForm business={business.data} />;
 }
 
+/** Money is stored in hundredths of the currency. */
+const hundredths = {
+  show: (cents: number) => cents / 100,
+  store: (amount: number) => Math.round(amount * 100),
+};
+
 const schema = updateBusiness.body.omit({ areaName: true }).required();
 
 function BusinessForm({ business }: { business: Business }) {
@@ -122,6 +128,28 @@ function BusinessForm({ business }: { business: Business }) {
               label="Clean down after the last"
               unit="min"
               hint="Hand back, payment, sweep, unhook."
+            />
+          </div>
+        </Card>
+        <Card title="Prices" dim="for forecasts over the phone">
+          <div className="grid gap-4 md:grid-cols-2">
+            <FormNumber
+              control={form.control}
+              name="priceCentsPerHour"
+              label="An hour on the pet"
+              unit={form.watch('currency')}
+              decimals={2}
+              hint="0 until it is set: then no price is shown."
+              shownAs={hundredths}
+            />
+            <FormNumber
+              control={form.control}
+              name="calloutCents"
+              label="Call-out"
+              unit={form.watch('currency')}
+              decimals={2}
+              hint="Once for every visit."
+              shownAs={hundredths}
             />
           </div>
         </Card>

@@ -1,0 +1,94 @@
+import type { quickForecast } from '#shared/api/forecasts.ts';
+import type { ResponseOf } from '#shared/api/endpoint.ts';
+import { summaryWords } from '#shared/grooming/explain.ts';
+import type { PetForecast } from '#shared/grooming/types.ts';
+import { ButtonLink } from '#src/components/ButtonLink.tsx';
+import { Card } from '#src/components/Card.tsx';
+import { ErrorNote } from '#src/components/ErrorNote.tsx';
+import { Loading } from '#src/components/Loading.tsx';
+import { writeMoneyRange } from '#src/lib/writeMoneyRange.ts';
+import { ForecastNotes, ForecastSteps } from '#src/strips/ForecastSteps.tsx';
+import { OfferList } from './OfferList.tsx';
+import type { QuickPet } from './quickPet.ts';
+
+type Answer = ResponseOf<typeof quickForecast>;
+
+/** Minutes, price, earliest windows, and where to go from here. */
+export function QuickAnswer({
+  pet,
+  local,
+  answer,
+  fresh,
+  error,
+  onRetry,
+}: {
+  pet: QuickPet;
+  /** Worked out here; words when something is missing. */
+  local: PetForecast | string;
+  /** The server's: price and offers. null while it is not there. */
+  answer: Answer | null;
+  /** The answer is of what is told now, not of a moment ago. */
+  fresh: boolean;
+  error: unknown;
+  onRetry: () => void;
+}) {
+  if (typeof local === 'string')
+    return (
+      <Card title="What it takes">
+        <p className="text-slate">{local}</p>
+      </Card>
+    );
+  return (
+    <div className="grid gap-4">
+      <Card
+        title="Price and windows"
+        aside={!fresh && <span className="text-sm text-slate">asking</span>}
+      >
+        <p className="text-[26px] leading-tight font-bold tracking-tight" role="status">
+          {summaryWords(local).split(',')[0]}
+          {answer?.priceCents && (
+            <>
+              {' · '}
+              {writeMoneyRange(answer.priceCents.low, answer.priceCents.high, answer.currency)}
+            </>
+          )}
+        </p>
+        <p className="text-slate">{priceLine(local, answer)}</p>
+        {error ? (
+          <ErrorNote
+            error={error}
+            title="Price and windows did not come"
+            onRetry={onRetry}
+            className="mt-3"
+          />
+        ) : answer ? (
+          <OfferList offers={answer.offers} noOfferWords={answer.noOfferWords} fresh={fresh} />
+        ) : (
+          <Loading lines={3} />
+        )}
+        <div className="mt-4">
+          <ButtonLink to="/households/new" kind="go" state={{ where: pet.where }}>
+            Add the household and book
+          </ButtonLink>
+        </div>
+      </Card>
+      <Card title="What it takes" dim={summaryWords(local)}>
+        <ForecastSteps steps={local.steps} petName="this pet" />
+        <ForecastNotes forecast={local} />
+      </Card>
+    </div>
+  );
+}
+
+function priceLine(local: PetForecast, answer: Answer | null): string {
+  const spread = `8 in 10 between ${summaryWords(local).split('between ')[1]}`;
+  if (!answer) return spread;
+  const around = Math.round((answer.setUpSeconds + answer.cleanDownSeconds) / 60);
+  return [
+    spread,
+    `${around} min around it`,
+    answer.priceCents ? null : 'no price set yet, see Setup, Business',
+  ]
+    .filter(Boolean)
+    .join(' · ');
+}

@@ -1,0 +1,123 @@
+import { useEffect, useRef, type ReactNode } from 'react';
+import type { Region, Style } from '#shared/grooming/types.ts';
+import { IconButton } from '#src/components/IconButton.tsx';
+import { regionOrder } from './bodyShapes.ts';
+import { cutWords } from './cutWords.ts';
+
+/**
+ * The cut plan in words, numbered as a small drawing is. With `onPick` a row opens and `editor`
+ * stands in it; focus goes there, and back to the row's button when it is closed.
+ */
+export function CutTable({
+  cuts,
+  picked = null,
+  onPick,
+  editor,
+}: {
+  cuts: Style['cuts'];
+  picked?: Region | null;
+  onPick?: (region: Region | null) => void;
+  editor?: (region: Region) => ReactNode;
+}) {
+  return (
+    <ol className="rows" aria-label="Cut plan by region">
+      {regionOrder.map((region, index) => (
+        <CutRow
+          key={region}
+          number={index + 1}
+          region={region}
+          cuts={cuts}
+          open={picked === region}
+          {...(onPick && { onPick })}
+        >
+          {editor?.(region)}
+        </CutRow>
+      ))}
+    </ol>
+  );
+}
+
+function CutRow({
+  number,
+  region,
+  cuts,
+  open,
+  onPick,
+  children,
+}: {
+  number: number;
+  region: Region;
+  cuts: Style['cuts'];
+  open: boolean;
+  onPick?: (region: Region | null) => void;
+  children: ReactNode;
+}) {
+  const words = cutWords(cuts, region);
+  const button = useRef<HTMLButtonElement>(null);
+  const box = useRef<HTMLDivElement>(null);
+  useEffect(() => {
+    if (!open) return;
+    const first = box.current?.querySelector<HTMLElement>('input:checked, input, select');
+    first?.focus({ preventScroll: true });
+    box.current?.scrollIntoView?.({ block: 'nearest' });
+  }, [open]);
+  const close = () => {
+    onPick?.(null);
+    button.current?.focus();
+  };
+  const line = (
+    <>
+      <span className="w-6 shrink-0 text-slate" aria-hidden="true">
+        {number}
+      </span>
+      <span className="grow font-medium">
+        {words.region}
+        <span className="block text-sm font-normal text-slate">
+          {[words.tool, words.direction].filter(Boolean).join(', ')}
+        </span>
+      </span>
+      <span className="shrink-0 text-right">{words.left}</span>
+    </>
+  );
+  if (!onPick) return <li className="flex items-baseline gap-1 py-1.5">{line}</li>;
+  return (
+    <li
+      className={open ? 'rounded-[10px] bg-[var(--cream)] shadow-[0_0_0_1.5px_var(--rosette)]' : ''}
+    >
+      <button
+        ref={button}
+        type="button"
+        aria-expanded={open}
+        onClick={() => onPick(open ? null : region)}
+        className="flex min-h-11 w-full items-baseline gap-1 rounded-[10px] px-2 py-1.5 text-left hover:bg-linen"
+      >
+        {line}
+        <span className="w-5 shrink-0 text-right text-collar" aria-hidden="true">
+          {open ? '▴' : '▾'}
+        </span>
+      </button>
+      {open && (
+        <div
+          ref={box}
+          role="group"
+          aria-label={`Cut of the ${words.region}`}
+          className="relative px-3 pt-1 pb-4"
+          onKeyDown={(event) => {
+            if (event.key !== 'Escape') return;
+            event.stopPropagation();
+            close();
+          }}
+        >
+          {children}
+          <IconButton
+            label={`Close the ${words.region}`}
+            onClick={close}
+            className="absolute! top-0 right-2"
+          >
+            <span aria-hidden="true">✓</span>
+          </IconButton>
+        </div>
+      )}
+    </li>
+  );
+}

@@ -1,0 +1,12 @@
+import { useQuery } from '@tanstack/react-query';
+import { petQueries } from '#src/api/pets.ts';
+import { useToday } from '#src/api/session.ts';
+import { petFactsOf } from '#src/features/households/petFactsOf.ts';
+
+/** A pet's answer and the facts its forecast is made from; both null until it is read. */
+export function useKnownPet(petId: string) {
+  const today = useToday();
+  const found = useQuery(petQueries.one(petId));
+  const facts = found.data ? petFactsOf(found.data.pet, found.data.pet.lastVisitDate, today) : null;
+  return { found, facts, today };
+}
