@@ -18,6 +18,7 @@ import { log, logSerializers } from '#server/log.ts';
 import { areaRoutes } from '#server/routes/areaRoutes.ts';
 import { arrivalRoutes } from '#server/routes/arrivalRoutes.ts';
 import { dayRoutes } from '#server/routes/dayRoutes.ts';
+import { forecastRoutes } from '#server/routes/forecastRoutes.ts';
 import { householdRoutes } from '#server/routes/householdRoutes.ts';
 import { memberRoutes } from '#server/routes/memberRoutes.ts';
 import { reviewRoutes } from '#server/routes/reviewRoutes.ts';
@@ -66,6 +67,7 @@ export function buildApp(): Express {
     areaRoutes,
     householdRoutes,
     styleRoutes,
+    forecastRoutes,
     visitRoutes,
     dayRoutes,
     runRoutes,

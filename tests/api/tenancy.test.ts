@@ -1,11 +1,13 @@
 import { dropDatabase, makeDatabase } from '../support/freshDatabase.ts';
 import type { Express } from 'express';
+import sharp from 'sharp';
 import request from 'supertest';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { getDay, moveVisit, sendRuns, startProposal } from '#shared/api/days.ts';
 import { createSite, getHousehold, listHouseholds } from '#shared/api/households.ts';
 import { listShifts } from '#shared/api/groomers.ts';
 import { createPet } from '#shared/api/pets.ts';
+import { createStyle } from '#shared/api/styles.ts';
 import { createVan } from '#shared/api/vans.ts';
 import { createVisit } from '#shared/api/visits.ts';
 import { buildApp } from '#server/app.ts';
@@ -26,6 +28,20 @@ beforeAll(async () => {
 });
 afterAll(dropDatabase);
 
+const ownStyle = {
+  name: 'Nails at the door',
+  species: 'dog' as const,
+  coats: ['curly' as const],
+  cuts: {},
+  finish: 'tidy' as const,
+  services: ['nails' as const],
+};
+
+const aPicture = () =>
+  sharp({ create: { width: 8, height: 8, channels: 3, background: '#a0522d' } })
+    .png()
+    .toBuffer();
+
 /** Every kind of thing one business can have, by the name its id has in a path. */
 async function everything() {
   const { client, vans, groomers, depot } = await buildBusiness(app, date);
@@ -40,6 +56,11 @@ async function everything() {
   await client.must(sendRuns, { params: { date }, body: { runVersions: versionsOf(day) } });
   const site = await client.must(createSite, { body: { name: 'Court', lat: 41, lon: -36 } });
   const [shift] = await client.must(listShifts, { query: { from: date, to: date } });
+  const style = await client.must(createStyle, { body: ownStyle });
+  const photo = await client.agent
+    .post(`/api/pets/${pet.id}/styles/1/photos`)
+    .set('X-Furlong-Csrf', client.session!.csrfToken)
+    .attach('photo', await aPicture(), 'clover.png');
   const proposal = await client.must(startProposal, { params: { date }, body: { seconds: 1 } });
   return {
     client,
@@ -54,6 +75,9 @@ async function everything() {
       shiftId: shift!.id,
       runId: day.runs[0]!.runId,
       proposalId: proposal.id,
+      styleId: style.id,
+      photoId: (photo.body as { id: string }).id,
+      version: '1',
       userId: client.session!.user.id,
       invitationId: household.id,
       date,
@@ -74,6 +98,7 @@ const bodies: Record<string, unknown> = {
     weightGrams: 5000,
     styleId: 'teddy',
   },
+  '/api/pets/:petId/styles': { styleId: 'teddy' },
   '/api/visits/:visitId/cancel': { reason: 'test' },
   '/api/members/:userId': { roles: ['groomer'] },
   '/api/days/:date/pins/:visitId': { vanId: null },
