@@ -21,6 +21,7 @@ import { dayRoutes } from '#server/routes/dayRoutes.ts';
 import { forecastRoutes } from '#server/routes/forecastRoutes.ts';
 import { householdRoutes } from '#server/routes/householdRoutes.ts';
 import { memberRoutes } from '#server/routes/memberRoutes.ts';
+import { learningRoutes } from '#server/routes/learningRoutes.ts';
 import { reviewRoutes } from '#server/routes/reviewRoutes.ts';
 import { runRoutes } from '#server/routes/runRoutes.ts';
 import { sessionRoutes } from '#server/routes/sessionRoutes.ts';
@@ -73,6 +74,7 @@ export function buildApp(): Express {
     runRoutes,
     textRoutes,
     reviewRoutes,
+    learningRoutes,
     arrivalRoutes,
   ])
     app.use(routes);

@@ -2,18 +2,21 @@ import { schedule } from 'node-cron';
 import { clock } from '#server/clock.ts';
 import { log } from '#server/log.ts';
 import { resealGateCodes } from '#server/services/households/resealGateCodes.ts';
+import { learnEverywhere } from '#server/services/learning/learnEverywhere.ts';
 import { sweepPhotos } from '#server/services/photos/sweepPhotos.ts';
 import { sendDueTexts } from '#server/services/texts/sendDueTexts.ts';
 import { removeExpired } from '#server/services/upkeep/removeExpired.ts';
 
 /**
- * Starts the tickers: every two seconds the texts that are due; at start and every hour the upkeep. A
- * tick never overlaps the one before. `stop` ends them and waits for the ticks under way.
+ * Starts the tickers: every two seconds the texts that are due; at start and every hour the upkeep;
+ * once a night the learning. A tick never overlaps the one before. `stop` ends them and waits for
+ * the ticks under way.
  */
 export function startJobs(origin: string): { stop(): Promise<void> } {
   const tickers = [
     startTicker('texts', '*/2 * * * * *', () => sendAll(origin)),
     startTicker('upkeep', '17 * * * *', keepUp),
+    startTicker('learning', '7 2 * * *', () => learnEverywhere(clock.now())),
   ];
   // A key taken to the front of the ring counts from this start on.
   void tickers[1]!.tick();

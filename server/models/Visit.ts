@@ -43,6 +43,31 @@ export interface VisitForecast {
   heaviestGrams: number;
   /** Of the first pet, for leans: "curly · scissored teddy". */
   coatStyle: string;
+  /** Work where a groomer's pace was known at booking, by groomer id. Absent before learning. */
+  workByGroomer?: Record<string, Spread>;
+  /** What learning needs later and what it said now. Absent on visits booked before it. */
+  learning?: VisitLearning;
+}
+export interface VisitLearning {
+  /** The fit used; null: the plain model. */
+  fitId: string | null;
+  /** Per pet: the plain model's word, which is what the clock is compared with. */
+  plain: {
+    petId: string;
+    breedId: string | null;
+    styleId: string;
+    coatStyle: string;
+    meanSeconds: number;
+    varianceSeconds2: number;
+    steps: Pick<
+      ForecastStep,
+      'key' | 'family' | 'medianSeconds' | 'meanSeconds' | 'varianceSeconds2'
+    >[];
+  }[];
+  /** What the learning says of these pets, ready to show. */
+  words: string[];
+  petVisits: number;
+  learnedPermille: number;
 }
 
 export class Visit extends Model<InferAttributes<Visit>, InferCreationAttributes<Visit>> {

@@ -5,7 +5,7 @@ import type { Style } from '#shared/grooming/types.ts';
 import type { Household } from '#server/models/Household.ts';
 import type { Pet } from '#server/models/Pet.ts';
 import type { Site } from '#server/models/Site.ts';
-import type { Visit } from '#server/models/Visit.ts';
+import type { Visit, VisitLearning } from '#server/models/Visit.ts';
 
 interface VisitFacts {
   visit: Visit;
@@ -49,7 +49,12 @@ export function presentVisit(facts: VisitFacts): z.input<typeof visitCard> {
     steps: visit.forecast.steps,
     p10Seconds: visit.forecast.p10Seconds,
     p90Seconds: visit.forecast.p90Seconds,
+    ...(visit.forecast.learning?.fitId && { learned: learnedOf(visit.forecast.learning) }),
   };
+}
+
+function learnedOf({ words, petVisits, learnedPermille }: VisitLearning) {
+  return { words, petVisits, learnedPermille };
 }
 
 export function breedNameOf(pet: Pet): string {

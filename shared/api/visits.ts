@@ -60,6 +60,10 @@ export const visitCard = z.object({
   steps: z.array(visitStep),
   p10Seconds: z.int(),
   p90Seconds: z.int(),
+  /** What finished visits taught about this forecast; absent where nothing was learned at booking. */
+  learned: z
+    .object({ words: z.array(z.string()), petVisits: z.int(), learnedPermille: z.int() })
+    .optional(),
 });
 export type VisitCard = z.infer<typeof visitCard>;
 

@@ -98,7 +98,7 @@ function visitFact(facts: VisitFacts, points: PointList, at: (wall: number) => n
     point: points.add(`household:${household.id}`, household.lat, household.lon),
     siteId: household.siteId ?? null,
     work: forecast.work,
-    workByGroomer: {},
+    workByGroomer: forecast.workByGroomer ?? {},
     setUpSeconds: forecast.setUpSeconds,
     cleanDownSeconds: forecast.cleanDownSeconds,
     allowed: visit.allowed.map(({ startMinutes, endMinutes, binds }) => ({

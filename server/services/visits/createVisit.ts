@@ -13,6 +13,7 @@ import { localDateOf } from '#server/services/days/today.ts';
 import { lastVisitDates } from '#server/services/households/getHousehold.ts';
 import { stylesOf } from '#server/services/styles/stylesOf.ts';
 import { forecastOf } from './forecastOf.ts';
+import { learningOf } from './learningOf.ts';
 
 export interface VisitInput {
   householdId: string;
@@ -47,6 +48,7 @@ export async function createVisit(actor: Actor, input: VisitInput, now: Date): P
     input.date,
     await lastVisitDates(petIds),
     await stylesOf(pets),
+    await learningOf(actor.businessId),
   );
   const visit = await Visit.create({
     householdId: household.id,

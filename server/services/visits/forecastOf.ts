@@ -1,22 +1,34 @@
-import { findBreed } from '#shared/grooming/breeds.ts';
-import { forecastVisit } from '#shared/grooming/forecastVisit.ts';
-import type { Style } from '#shared/grooming/types.ts';
+import { forecastVisit, type VisitForecast as PlainVisit } from '#shared/grooming/forecastVisit.ts';
+import { groomWork } from '#shared/grooming/learning/groomWork.ts';
+import { type LearnedVisit, learnVisit } from '#shared/grooming/learning/learnVisit.ts';
+import type { PetForecast } from '#shared/grooming/types.ts';
 import type { Business } from '#server/models/Business.ts';
+import type { Groomer } from '#server/models/Groomer.ts';
 import type { Pet } from '#server/models/Pet.ts';
-import type { VisitForecast } from '#server/models/Visit.ts';
+import type { ForecastStep, VisitForecast, VisitLearning } from '#server/models/Visit.ts';
 import { petFactsOf } from '#server/services/households/petFactsOf.ts';
+import type { KeptFit } from '#server/services/learning/keptFit.ts';
 import type { StyleOf } from '#server/services/styles/stylesOf.ts';
+import { coatStyleOf } from './coatStyleOf.ts';
 
-/** The forecast booking stores: what today's model says of these pets on that date. */
+/** What the business has learned and whose pace may be asked for; null: nothing yet. */
+export type Learning = (KeptFit & { groomers: Pick<Groomer, 'id' | 'name'>[] }) | null;
+
+/**
+ * The forecast booking stores: what today's model says of these pets on that date, with what was
+ * learned, and each groomer's own minutes. The plain model's word is stored beside it, so that a later
+ * fit compares the clock with that and never with itself.
+ */
 export function forecastOf(
   pets: Pet[],
   business: Business,
   date: string,
   lastVisits: ReadonlyMap<string, string>,
   styleOf: StyleOf,
+  learning: Learning = null,
 ): { forecast: VisitForecast; modelVersion: string } {
   const on = new Date(`${date}T12:00:00Z`);
-  const result = forecastVisit(
+  const plain = forecastVisit(
     pets.map((pet) => ({
       petId: pet.id,
       name: pet.name,
@@ -28,34 +40,14 @@ export function forecastOf(
       cleanDownSeconds: business.cleanDownMinutes * 60,
     },
   );
+  const coatStyles = pets.map((pet) => coatStyleOf(pet, styleOf(pet)));
+  const learned = learning && learnVisit(plain, learning.fit, { groomerId: null, coatStyles });
+  const result = learned ?? plain;
   const { work } = result;
   return {
     modelVersion: result.modelVersion,
     forecast: {
-      steps: result.pets.flatMap(({ petId, forecast }) =>
-        forecast.steps.map(
-          ({
-            key,
-            family,
-            label,
-            medianSeconds,
-            meanSeconds,
-            varianceSeconds2,
-            attentionPermille,
-            reasons,
-          }) => ({
-            petId,
-            key,
-            family,
-            label,
-            medianSeconds,
-            meanSeconds,
-            varianceSeconds2,
-            attentionPermille,
-            reasons,
-          }),
-        ),
-      ),
+      steps: result.pets.flatMap(({ petId, forecast }) => forecast.steps.map(stepOf(petId))),
       work: { meanSeconds: work.meanSeconds, varianceSeconds2: work.varianceSeconds2 },
       p10Seconds: work.p10Seconds,
       p90Seconds: work.p90Seconds,
@@ -64,17 +56,80 @@ export function forecastOf(
       tankUse: result.tankUse,
       needs: result.needs,
       heaviestGrams: result.heaviestGrams,
-      coatStyle: coatStyleOf(pets[0]!, styleOf(pets[0]!)),
+      coatStyle: coatStyles[0]!,
+      workByGroomer: workByGroomer(plain, coatStyles, learning),
+      learning: {
+        fitId: learning?.fitId ?? null,
+        plain: plain.pets.map(({ forecast }, index) =>
+          plainOf(pets[index]!, coatStyles[index]!, forecast),
+        ),
+        ...toldOf(learned),
+      },
     },
   };
 }
 
-/** "curly, teddy": the group a lean is told for. */
-function coatStyleOf(pet: Pet, style: Style): string {
-  const coat = pet.coatType ?? (pet.breedId ? findBreed(pet.breedId).coatType : 'unknown');
-  const words: Record<string, string> = {
-    catShort: 'short-haired cat',
-    catLong: 'long-haired cat',
+function stepOf(petId: string) {
+  return (step: PetForecast['steps'][number]): ForecastStep => ({
+    petId,
+    key: step.key,
+    family: step.family,
+    label: step.label,
+    medianSeconds: step.medianSeconds,
+    meanSeconds: step.meanSeconds,
+    varianceSeconds2: step.varianceSeconds2,
+    attentionPermille: step.attentionPermille,
+    reasons: step.reasons,
+  });
+}
+
+/** Groomers without a finished visit are left out: they take the visit's own minutes. */
+function workByGroomer(
+  plain: PlainVisit,
+  coatStyles: string[],
+  learning: Learning,
+): NonNullable<VisitForecast['workByGroomer']> {
+  if (!learning) return {};
+  const { fit, groomers } = learning;
+  return Object.fromEntries(
+    groomers
+      .filter(({ id }) => fit.effects[`groomer ${id}`] !== undefined)
+      .map(({ id }) => {
+        const { work } = learnVisit(plain, fit, { groomerId: id, coatStyles });
+        const { meanSeconds, varianceSeconds2 } = work;
+        return [id, { meanSeconds, varianceSeconds2 }];
+      }),
+  );
+}
+
+function plainOf(
+  pet: Pet,
+  coatStyle: string,
+  forecast: PetForecast,
+): VisitLearning['plain'][number] {
+  const work = groomWork(forecast);
+  return {
+    petId: pet.id,
+    breedId: pet.breedId ?? null,
+    styleId: pet.styleId,
+    coatStyle,
+    ...work.forecast,
+    steps: work.steps.map(({ key, family, medianSeconds, meanSeconds, varianceSeconds2 }) => ({
+      key,
+      family,
+      medianSeconds,
+      meanSeconds,
+      varianceSeconds2,
+    })),
   };
-  return `${words[coat] ?? coat}, ${style.name.toLowerCase()}`;
+}
+
+function toldOf(learned: LearnedVisit | null) {
+  const notes = learned?.pets.map((pet) => pet.learned) ?? [];
+  return {
+    words: notes.flatMap(({ words }) => words),
+    petVisits: notes.reduce((sum, { petVisits }) => sum + petVisits, 0),
+    learnedPermille:
+      Math.min(1000, ...notes.map((note) => note.learnedPermille)) * Number(notes.length > 0),
+  };
 }
