@@ -54,10 +54,18 @@ export function findOffers(
     ...problem,
     visits: [...problem.visits, { ...visit, promise: null }],
   };
-  const start: Plan = { ...plan, notPlaced: [...plan.notPlaced, visit.id] };
+  const start: Plan = {
+    runs: problem.vans.map(
+      ({ vanId }) => plan.runs.find((run) => run.vanId === vanId) ?? { vanId, stops: [] },
+    ),
+    notPlaced: [...plan.notPlaced, visit.id],
+  };
+  const before = new Map(
+    start.runs.map((run) => [run.vanId, evaluateRun(asked, run).times] as const),
+  );
   const tries = placesByDetour(asked, start, visit).slice(0, limits.mostTrials ?? 24);
   const found = tries
-    .flatMap((place) => tryPlace(asked, start, visit.id, place) ?? [])
+    .flatMap((place) => tryPlace(asked, start, visit.id, place, before.get(place.vanId)!) ?? [])
     .sort((a, b) => a.more - b.more || a.place.index - b.place.index);
   const perVan = new Map<string, number>();
   const offers: DayOffer[] = [];
@@ -93,7 +101,7 @@ function placesByDetour(problem: DayProblem, plan: Plan, visit: VisitFact): Plac
   const base = (from: number, to: number) => day.base[from * day.pointCount + to]!;
   const places = problem.vans.flatMap((van, vanIndex): Place[] => {
     if (ready.staticBroken[vanIndex]! > 0) return [];
-    const stops = plan.runs.find((run) => run.vanId === van.vanId)?.stops ?? [];
+    const { stops } = plan.runs.find((run) => run.vanId === van.vanId)!;
     const points = stops.flatMap((stop) =>
       stop.kind === 'visit' ? day.visits[day.visitIndex.get(stop.visitId)!]!.fact.point : [],
     );
@@ -106,7 +114,13 @@ function placesByDetour(problem: DayProblem, plan: Plan, visit: VisitFact): Plac
   return places.sort((a, b) => a.detour - b.detour);
 }
 
-function tryPlace(problem: DayProblem, plan: Plan, visitId: string, place: Place): Trial | null {
+function tryPlace(
+  problem: DayProblem,
+  plan: Plan,
+  visitId: string,
+  place: Place,
+  before: RunTimes,
+): Trial | null {
   const { vanId, index } = place;
   const { plan: next, refusedBecause } = applyMove(problem, plan, {
     kind: 'placeVisit',
@@ -116,8 +130,6 @@ function tryPlace(problem: DayProblem, plan: Plan, visitId: string, place: Place
   });
   if (refusedBecause !== undefined) return null;
   const run = next.runs.find((one) => one.vanId === vanId)!;
-  const old = plan.runs.find((one) => one.vanId === vanId) ?? { vanId, stops: [] };
-  const before = evaluateRun(problem, old).times;
   const after = evaluateRun(problem, run).times;
   if (hardRules(after) > hardRules(before)) return null;
   const stop = after.stops.find((one) => one.stopId === visitId)!;

@@ -1,12 +1,15 @@
 import { app, useApp } from '../support/useApp.ts';
-import { expect, it } from 'vitest';
+import { expect, it, vi } from 'vitest';
 import { getHousehold } from '#shared/api/households.ts';
+import { createStyle } from '#shared/api/styles.ts';
 import { addPetStyle, listPetStyles } from '#shared/api/petStyles.ts';
-import { getPet, updatePet } from '#shared/api/pets.ts';
+import { createPet, getPet, updatePet } from '#shared/api/pets.ts';
 import { createVisit } from '#shared/api/visits.ts';
 import { findStyle } from '#shared/grooming/styles.ts';
-import { inBusiness } from '#server/db/database.ts';
+import { database, inBusiness } from '#server/db/database.ts';
+import { Pet } from '#server/models/Pet.ts';
 import { PetStyle } from '#server/models/PetStyle.ts';
+import { stylesOf } from '#server/services/styles/stylesOf.ts';
 import { addHousehold, buildBusiness } from '../support/buildBusiness.ts';
 import { tomorrow } from '../support/tomorrow.ts';
 
@@ -127,4 +130,44 @@ it('refuses a style of the other species and nonsense in the changes, and keeps 
   }
   expect(await versions()).toHaveLength(1);
   expect(await client.must(getPet, { params })).toEqual(before);
+});
+
+it('the styles of a list take two queries, however long the list', async () => {
+  const { client, household, pet } = await clover();
+  const own = await client.must(createStyle, {
+    body: {
+      name: 'Short back',
+      species: 'dog',
+      coats: ['curly'],
+      cuts: shortBack,
+      finish: 'tidy',
+      services: [],
+    },
+  });
+  for (const name of ['Rook', 'Wren', 'Teasel'])
+    await client.must(createPet, {
+      params: { householdId: household.id },
+      body: {
+        name,
+        species: 'dog',
+        breedId: 'bichon-frise',
+        weightGrams: 6000,
+        styleId: name === 'Wren' ? 'short-all-over' : own.id,
+      },
+    });
+  const asked = vi.spyOn(database, 'query');
+  await inBusiness(client.session!.business.id, async () => {
+    const pets = await Pet.findAll({ order: [['name', 'ASC']] });
+    asked.mockClear();
+    const styleOf = await stylesOf(pets);
+    expect(asked).toHaveBeenCalledTimes(2);
+    expect(pets.map((one) => styleOf(one).name)).toEqual([
+      findStyle('teddy').name,
+      'Short back',
+      'Short back',
+      findStyle('short-all-over').name,
+    ]);
+  });
+  asked.mockRestore();
+  expect(pet.style.name).toBe(findStyle('teddy').name);
 });

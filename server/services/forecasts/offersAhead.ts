@@ -130,7 +130,7 @@ function askedVisit(forecast: VisitForecast, point: number): VisitFact {
     point,
     siteId: null,
     work: forecast.work,
-    workByGroomer: {},
+    workByGroomer: forecast.workByGroomer ?? {},
     setUpSeconds: forecast.setUpSeconds,
     cleanDownSeconds: forecast.cleanDownSeconds,
     allowed: [],

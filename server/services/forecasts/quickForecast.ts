@@ -9,6 +9,7 @@ import { checkPet } from '#server/services/households/pets.ts';
 import { stylesOf } from '#server/services/styles/stylesOf.ts';
 import { localDateOf } from '#server/services/days/today.ts';
 import { forecastOf } from '#server/services/visits/forecastOf.ts';
+import { learningOf } from '#server/services/visits/learningOf.ts';
 import { type DatedOffer, offersAhead } from './offersAhead.ts';
 
 export interface QuickInput extends Pick<
@@ -53,7 +54,8 @@ export async function quickForecast(
   await checkPet(pet, now, true);
   const styleOf = await stylesOf([pet]);
   const date = localDateOf(now, business.timeZone);
-  const { forecast } = forecastOf([pet], business, date, new Map(), styleOf);
+  const learning = await learningOf(businessId);
+  const { forecast } = forecastOf([pet], business, date, new Map(), styleOf, learning);
   const plain = forecastPet(petFactsOf(pet, now, null), styleOf(pet));
   const { p50Seconds } = distribution(forecast.work);
   const found =
