@@ -45,7 +45,7 @@ export function PetScreen() {
         back={{ to: household, words: householdName }}
         actions={mayEdit && <ButtonLink to={`${at}/edit`}>Change {pet.name}</ButtonLink>}
       />
-      <div className="grid gap-4 lg:gap-5">
+      <div className="grid grid-cols-[minmax(0,1fr)] gap-4 lg:gap-5">
         <PetStyleCard
           pet={pet}
           version={versions.data?.[0] ?? null}
@@ -55,8 +55,8 @@ export function PetScreen() {
           editTo={mayEdit ? `${at}/style` : null}
           learned={past.length > 0 ? leanWords(past) : null}
         />
-        <div className="grid items-start gap-4 lg:grid-cols-[minmax(0,1.25fr)_minmax(0,1fr)] lg:gap-5">
-          <div className="grid gap-4">
+        <div className="grid grid-cols-[minmax(0,1fr)] items-start gap-4 lg:grid-cols-[minmax(0,1.25fr)_minmax(0,1fr)] lg:gap-5">
+          <div className="grid grid-cols-[minmax(0,1fr)] gap-4">
             <PastVisits past={past} year={Number(today.slice(0, 4))} petName={pet.name} />
             <PetCautions pet={pet} />
           </div>

@@ -53,7 +53,7 @@ export function PetStrip({
         {familyRuns(towers).map((run) => {
           const words = `${stepFamily(run.family).words} ${Math.round(run.seconds / 60)}`;
           const room = xOf(run.toSeconds) - xOf(run.fromSeconds);
-          if (room < words.length * 6.2) return null;
+          if (room < words.length * 6.9) return null;
           return (
             <text
               key={run.fromSeconds}

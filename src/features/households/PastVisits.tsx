@@ -31,15 +31,14 @@ export function PastVisits({
       </Card>
     );
   return (
-    <Card title="Coat history">
+    <Card title="Coat history" dim="minutes are the whole visit’s">
       <p className="text-slate">{leanWords(past)}</p>
       <div className="mt-1 overflow-x-auto">
         <table className="plain">
           <thead>
             <tr>
               <th className="!pl-0">Visit</th>
-              <th>Groomer</th>
-              <th className="num">coat of</th>
+              <th className="num whitespace-nowrap">coat of</th>
               <th className="num">forecast</th>
               <th className="num">clock</th>
               <th className="num !pr-0">min</th>
@@ -48,8 +47,10 @@ export function PastVisits({
           <tbody>
             {past.map((visit, index) => (
               <tr key={visit.visitId}>
-                <td className="!pl-0 whitespace-nowrap">{writeDate(visit.date, 'short', year)}</td>
-                <td>{visit.groomerName}</td>
+                <td className="!pl-0">
+                  <span className="whitespace-nowrap">{writeDate(visit.date, 'short', year)}</span>
+                  <span className="block text-sm text-slate">{visit.groomerName}</span>
+                </td>
                 <td className="num">{weeksWords(past[index + 1]?.date, visit.date)}</td>
                 <td className="num">{writeSpan(visit.forecastSeconds)}</td>
                 <td className="num">{writeSpan(visit.clockSeconds)}</td>

@@ -39,7 +39,7 @@ export function QuickAnswer({
       </Card>
     );
   return (
-    <div className="grid gap-4">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-4">
       <Card
         title="Price and windows"
         aside={!fresh && <span className="text-sm text-slate">asking</span>}

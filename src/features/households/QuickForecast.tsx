@@ -37,7 +37,7 @@ export function QuickForecast() {
   const answer = useQuery(forecastQueries.quick(asked));
   const change = (part: Partial<QuickPet>) => setPet((before) => withUsual(before, part));
   return (
-    <div className="grid items-start gap-4 lg:grid-cols-[minmax(0,1fr)_minmax(0,1.1fr)] lg:gap-5">
+    <div className="grid grid-cols-[minmax(0,1fr)] items-start gap-4 lg:grid-cols-[minmax(0,1fr)_minmax(0,1.1fr)] lg:gap-5">
       <QuickFields pet={pet} styleChoices={choices} onChange={change} />
       <QuickAnswer
         pet={pet}

@@ -1,6 +1,6 @@
 import { useEffect, useRef, type ReactNode } from 'react';
 import type { Region, Style } from '#shared/grooming/types.ts';
-import { IconButton } from '#src/components/IconButton.tsx';
+import { Button } from '#src/components/Button.tsx';
 import { regionOrder } from './bodyShapes.ts';
 import { cutWords } from './cutWords.ts';
 
@@ -79,7 +79,8 @@ function CutRow({
       <span className="shrink-0 text-right">{words.left}</span>
     </>
   );
-  if (!onPick) return <li className="flex items-baseline gap-1 py-1.5">{line}</li>;
+  if (!onPick)
+    return <li className="flex break-inside-avoid items-baseline gap-1 py-1.5">{line}</li>;
   return (
     <li
       className={open ? 'rounded-[10px] bg-[var(--cream)] shadow-[0_0_0_1.5px_var(--rosette)]' : ''}
@@ -101,7 +102,7 @@ function CutRow({
           ref={box}
           role="group"
           aria-label={`Cut of the ${words.region}`}
-          className="relative px-3 pt-1 pb-4"
+          className="scroll-mt-4 scroll-mb-48 px-3 pt-1 pb-4"
           onKeyDown={(event) => {
             if (event.key !== 'Escape') return;
             event.stopPropagation();
@@ -109,13 +110,9 @@ function CutRow({
           }}
         >
           {children}
-          <IconButton
-            label={`Close the ${words.region}`}
-            onClick={close}
-            className="absolute! top-0 right-2"
-          >
-            <span aria-hidden="true">✓</span>
-          </IconButton>
+          <Button size="small" onClick={close} className="mt-3">
+            Done with the {words.region}
+          </Button>
         </div>
       )}
     </li>

@@ -55,16 +55,13 @@ export function PetStyleCard({
           ? style.services.map((service) => serviceWords[service]).join(', ')
           : 'no services'}
       </p>
-      <div className="mt-3 grid items-start gap-x-7 gap-y-5 lg:grid-cols-[minmax(0,1.25fr)_minmax(0,1fr)]">
+      <div className="mt-3 grid grid-cols-[minmax(0,1fr)] items-start gap-x-7 gap-y-5 lg:grid-cols-[minmax(0,1.25fr)_minmax(0,1fr)]">
         <div>
           <BodyDiagram species={style.species} cuts={style.cuts} />
           <DiagramLegend />
-          <details className="mt-2 lg:hidden" open>
-            <summary className="min-h-11 py-2 font-medium text-collar">
-              The cut plan in words
-            </summary>
+          <div className="mt-3 sm:columns-2 sm:gap-x-8">
             <CutTable cuts={style.cuts} />
-          </details>
+          </div>
           {pet.styleNotes && (
             <p className="mt-3 border-l-[3px] border-fawn pl-3 whitespace-pre-line">
               {pet.styleNotes}

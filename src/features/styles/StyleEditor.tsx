@@ -13,7 +13,7 @@ import { DiagramLegend } from './DiagramLegend.tsx';
 import { PlanBTable } from './PlanBTable.tsx';
 import { serviceList, serviceWords } from './serviceWords.ts';
 import { changeDraft, styleOf, type DraftChange, type StyleDraft } from './styleDraft.ts';
-import { StyleMinutes } from './StyleMinutes.tsx';
+import { MinutesLine, StyleMinutes } from './StyleMinutes.tsx';
 
 /**
  * A cut plan over the body, services and plan B, with the minutes beside them. `head` and `finish`
@@ -49,6 +49,7 @@ export function StyleEditor({
   const [saving, setSaving] = useState(false);
   const [failure, setFailure] = useState<unknown>(null);
   const style = styleOf(draft);
+  const [startStyle] = useState(() => styleOf(start));
   const from = base(draft.styleId);
   const save = async () => {
     setSaving(true);
@@ -62,11 +63,11 @@ export function StyleEditor({
     }
   };
   return (
-    <div className="grid items-start gap-4 xl:grid-cols-[minmax(0,2.1fr)_minmax(0,1fr)] xl:gap-5">
-      <div className="grid gap-4">
+    <div className="grid grid-cols-[minmax(0,1fr)] items-start gap-4 xl:grid-cols-[minmax(0,2.1fr)_minmax(0,1fr)] xl:gap-5">
+      <div className="grid grid-cols-[minmax(0,1fr)] gap-4">
         {head(draft, change)}
         <Card title="Cut plan" dim="pick a region on the body or in the list">
-          <div className="grid items-start gap-4 lg:grid-cols-[minmax(0,1.45fr)_minmax(0,1fr)]">
+          <div className="grid grid-cols-[minmax(0,1fr)] items-start gap-4 lg:grid-cols-[minmax(0,1.45fr)_minmax(0,1fr)]">
             <div className="lg:sticky lg:top-4">
               <BodyDiagram
                 species={draft.species}
@@ -116,16 +117,17 @@ export function StyleEditor({
         </div>
         {foot(draft, change)}
       </div>
-      <div className="grid gap-4 xl:sticky xl:top-4">
-        <StyleMinutes facts={facts} style={style} before={styleOf(start)} petName={petName}>
-          {aboutPet && <p className="mt-2 text-sm text-slate">{aboutPet}</p>}
-        </StyleMinutes>
-        {failure ? <ErrorNote error={failure} title="The style is not saved" /> : null}
-        <div>
-          <Button kind="go" busy={saving} busyWords="Saving" onClick={() => void save()}>
-            {saveWords}
-          </Button>
-        </div>
+      <StyleMinutes facts={facts} style={style} petName={petName}>
+        {aboutPet && <p className="mt-2 text-sm text-slate">{aboutPet}</p>}
+      </StyleMinutes>
+      {failure ? (
+        <ErrorNote error={failure} title="The style is not saved" className="xl:col-span-2" />
+      ) : null}
+      <div className="card sticky bottom-[4.25rem] z-20 flex flex-wrap items-center justify-between gap-x-6 gap-y-2 px-4 py-2.5 md:bottom-3 md:px-5 xl:col-span-2">
+        <MinutesLine facts={facts} style={style} before={startStyle} />
+        <Button kind="go" busy={saving} busyWords="Saving" onClick={() => void save()}>
+          {saveWords}
+        </Button>
       </div>
       <UnsavedGuard when={(dirtyAtStart || draft !== start) && !saving} />
     </div>

@@ -24,7 +24,9 @@ export function StyleList({ styles, ...actions }: { styles: readonly Style[] } &
     <div className="grid max-w-5xl gap-4">
       {own.length === 0 ? (
         <EmptyState title="No style of your own yet">
-          Copy a starting style below and make it yours: pets that have it follow its changes.
+          {actions.mayEdit
+            ? 'Copy a starting style below and make it yours: pets that have it follow its changes.'
+            : 'An owner-operator can copy a starting style and change it.'}
         </EmptyState>
       ) : (
         <Card title="Your styles">

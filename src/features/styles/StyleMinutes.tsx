@@ -6,18 +6,16 @@ import { Card } from '#src/components/Card.tsx';
 import { ForecastNotes, ForecastSteps } from '#src/strips/ForecastSteps.tsx';
 import { stepLines } from './stepLines.ts';
 
-/** What a style takes on a pet, worked out anew with every change. `before`: the style it came from. */
+/** What a style takes on a pet, worked out anew with every change. */
 export function StyleMinutes({
   facts,
   style,
-  before,
   petName,
   children,
 }: {
   /** Words instead when something of the pet is still missing. */
   facts: PetFacts | string;
   style: Style;
-  before?: Style;
   petName: string;
   children?: React.ReactNode;
 }) {
@@ -28,21 +26,42 @@ export function StyleMinutes({
         <p className="text-slate">{forecast}</p>
       </Card>
     );
-  const old = before && tryStyle(facts, before);
-  const more = old && typeof old !== 'string' ? forecast.medianSeconds - old.medianSeconds : 0;
   return (
-    <Card title="What it takes" dim={<span role="status">{summaryWords(forecast)}</span>}>
-      {before && (
-        <p className="mb-1 text-sm text-slate" aria-live="polite">
-          {Math.abs(more) < 30
-            ? 'As long as the saved style.'
-            : `${durationWords(Math.abs(more))} ${more > 0 ? 'more' : 'less'} than the saved style.`}
-        </p>
-      )}
+    <Card title="What it takes" dim={summaryWords(forecast)}>
       <ForecastSteps steps={stepLines(forecast, style.cuts)} petName={petName} />
       <ForecastNotes forecast={forecast} />
       {children}
     </Card>
+  );
+}
+
+/** The sum in one line, and what an edit did to it; it stays in sight while the plan is edited. */
+export function MinutesLine({
+  facts,
+  style,
+  before,
+}: {
+  facts: PetFacts | string;
+  style: Style;
+  before: Style;
+}) {
+  const [forecast, old] = [tryStyle(facts, style), tryStyle(facts, before)];
+  if (typeof forecast === 'string') return <p className="text-slate">{forecast}</p>;
+  const more = typeof old === 'string' ? 0 : forecast.medianSeconds - old.medianSeconds;
+  return (
+    <p role="status">
+      <b className="font-semibold">
+        {durationWords(forecast.medianSeconds)}
+        <span className="max-sm:hidden">
+          {summaryWords(forecast).slice(durationWords(forecast.medianSeconds).length)}
+        </span>
+      </b>
+      <span className="block text-sm text-slate">
+        {Math.abs(more) < 30
+          ? 'as long as the saved style'
+          : `${durationWords(Math.abs(more))} ${more > 0 ? 'more' : 'less'} than the saved style`}
+      </span>
+    </p>
   );
 }
 

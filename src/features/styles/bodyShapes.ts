@@ -38,11 +38,11 @@ export const bodyDrawings: Record<Species, BodyDrawing> = {
   dog: {
     order: [
       'tail',
+      'belly',
+      'back',
       'foreLegs',
       'hindLegs',
       'feet',
-      'belly',
-      'back',
       'neck',
       'head',
       'ears',
@@ -110,11 +110,11 @@ export const bodyDrawings: Record<Species, BodyDrawing> = {
   cat: {
     order: [
       'tail',
+      'belly',
+      'back',
       'foreLegs',
       'hindLegs',
       'feet',
-      'belly',
-      'back',
       'neck',
       'ears',
       'head',
