@@ -12,7 +12,7 @@ const all: (NavItem & { ability: NamedAbility })[] = [
   { to: '/day', words: 'Day', icon: 'day', ability: 'days.read' },
   { to: '/run', words: 'Run', icon: 'run', ability: 'runs.work' },
   { to: '/households', words: 'Households', icon: 'households', ability: 'households.read' },
-  { to: '/forecast', words: 'Forecast', icon: 'forecast', ability: 'visits.edit' },
+  { to: '/forecast', words: 'Forecast', icon: 'forecast', ability: 'households.edit' },
   { to: '/texts', words: 'Texts', icon: 'texts', ability: 'texts.read' },
   { to: '/review', words: 'Review', icon: 'review', ability: 'review.read' },
   { to: '/setup', words: 'Setup', icon: 'setup', ability: 'setup.read' },

@@ -1,4 +1,5 @@
 import { useEffect, useRef, type ReactNode } from 'react';
+import { regionWords } from '#shared/grooming/regionWords.ts';
 import type { Region, Style } from '#shared/grooming/types.ts';
 import { Button } from '#src/components/Button.tsx';
 import { regionOrder } from './bodyShapes.ts';
@@ -19,12 +20,15 @@ export function CutTable({
   onPick?: (region: Region | null) => void;
   editor?: (region: Region) => ReactNode;
 }) {
+  // To look at, what is left alone is one line; to edit, every region has its row.
+  const rows = regionOrder.filter((region) => onPick || cuts[region]);
+  const untouched = regionOrder.filter((region) => !rows.includes(region));
   return (
     <ol className="rows" aria-label="Cut plan by region">
-      {regionOrder.map((region, index) => (
+      {rows.map((region) => (
         <CutRow
           key={region}
-          number={index + 1}
+          number={regionOrder.indexOf(region) + 1}
           region={region}
           cuts={cuts}
           open={picked === region}
@@ -33,6 +37,14 @@ export function CutTable({
           {editor?.(region)}
         </CutRow>
       ))}
+      {untouched.length > 0 && (
+        <li className="break-inside-avoid py-1.5 text-slate">
+          Not touched:{' '}
+          {untouched
+            .map((region) => `${regionOrder.indexOf(region) + 1} ${regionWords([region])}`)
+            .join(', ')}
+        </li>
+      )}
     </ol>
   );
 }

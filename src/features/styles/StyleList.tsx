@@ -26,7 +26,7 @@ export function StyleList({ styles, ...actions }: { styles: readonly Style[] } &
         <EmptyState title="No style of your own yet">
           {actions.mayEdit
             ? 'Copy a starting style below and make it yours: pets that have it follow its changes.'
-            : 'An owner-operator can copy a starting style and change it.'}
+            : 'Nobody has copied a starting style yet.'}
         </EmptyState>
       ) : (
         <Card title="Your styles">

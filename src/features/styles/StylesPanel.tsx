@@ -10,7 +10,7 @@ import { StyleList } from './StyleList.tsx';
 
 /** The business's styles: the starting library to copy from, its own to edit and retire. */
 export function StylesPanel() {
-  const mayEdit = useCan('setup.edit');
+  const mayEdit = useCan('households.edit');
   const styles = useQuery(styleQueries.list());
   const [search, setSearch] = useSearchParams();
   if (styles.isPending) return <Loading lines={8} />;
