@@ -17,6 +17,8 @@ const business = {
   deskPhone: null,
   setUpMinutes: 6,
   cleanDownMinutes: 8,
+  priceCentsPerHour: 0,
+  calloutCents: 0,
 };
 
 const session = (csrfToken: string): Session => ({

@@ -10,7 +10,8 @@ export function UnsavedGuard({ when }: { when: boolean }) {
   const blocker = useBlocker(
     ({ currentLocation, nextLocation }) =>
       when &&
-      currentLocation.pathname !== nextLocation.pathname &&
+      currentLocation.pathname + currentLocation.search !==
+        nextLocation.pathname + nextLocation.search &&
       !(nextLocation.state as { saved?: boolean } | null)?.saved,
   );
   useEffect(() => {

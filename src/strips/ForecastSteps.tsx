@@ -7,8 +7,8 @@ import type { TowerStep } from './towersOf.ts';
 /** A step as a table needs it; `about` says what is known beside its reasons. */
 export type StepLine = Pick<
   StepForecast,
-  'key' | 'family' | 'label' | 'medianSeconds' | 'attentionPermille'
-> & { reasons: readonly Reason[]; about?: string | undefined };
+  'family' | 'label' | 'medianSeconds' | 'attentionPermille'
+> & { key: string; reasons: readonly Reason[]; about?: string | undefined };
 
 /** One pet's steps: the strip, then each step's minutes and what made them. */
 export function ForecastSteps({
@@ -109,7 +109,7 @@ function StepRow({ step }: { step: StepLine }) {
   return (
     <tr className="border-t border-linen">
       <td className={`py-1.5 pr-3 ${weight}`}>
-        {step.label}
+        <span className="inline-block first-letter:uppercase">{step.label}</span>
         {why.length > 0 && (
           <span className="block text-sm font-normal text-slate">{why.join(' · ')}</span>
         )}

@@ -33,7 +33,7 @@ export function PastVisits({
   return (
     <Card title="Coat history" dim="minutes are the whole visit’s">
       <p className="text-slate">{leanWords(past)}</p>
-      <div className="mt-1 overflow-x-auto">
+      <div className="mt-1 overflow-x-auto" role="region" aria-label="Past visits" tabIndex={0}>
         <table className="plain">
           <thead>
             <tr>

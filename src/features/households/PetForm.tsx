@@ -74,7 +74,7 @@ export function PetForm({
   const clearForSpecies = () => {
     form.setValue('breedId', null, { shouldDirty: true });
     form.setValue('coatType', null, { shouldDirty: true });
-    if (!pet) form.setValue('styleId', '', { shouldDirty: true });
+    form.setValue('styleId', '', { shouldDirty: true });
   };
 
   const facts = petFactsOf(
@@ -92,16 +92,18 @@ export function PetForm({
         <Card title="The pet">
           <div className="grid gap-4 md:grid-cols-2">
             <TextField label="Name" {...form.register('name')} error={errors.name?.message} />
-            <FormSegmented
-              control={form.control}
-              name="species"
-              label="Species"
-              choices={[
-                { value: 'dog', label: 'Dog' },
-                { value: 'cat', label: 'Cat' },
-              ]}
-              onPick={clearForSpecies}
-            />
+            {!pet && (
+              <FormSegmented
+                control={form.control}
+                name="species"
+                label="Species"
+                choices={[
+                  { value: 'dog', label: 'Dog' },
+                  { value: 'cat', label: 'Cat' },
+                ]}
+                onPick={clearForSpecies}
+              />
+            )}
             <BreedField
               key={species}
               species={species}

@@ -38,14 +38,16 @@ export function QuickAnswer({
         <p className="text-slate">{local}</p>
       </Card>
     );
+  const shown = fresh && answer ? told(local, answer) : local;
+  const [typical, ...spread] = summaryWords(shown).split(', ');
   return (
-    <div className="grid grid-cols-[minmax(0,1fr)] gap-4">
+    <div id="what-it-takes" className="grid scroll-mt-4 grid-cols-[minmax(0,1fr)] gap-4">
       <Card
         title="Price and windows"
         aside={!fresh && <span className="text-sm text-slate">asking</span>}
       >
         <p className="text-[26px] leading-tight font-bold tracking-tight" role="status">
-          {summaryWords(local).split(',')[0]}
+          {typical}
           {answer?.priceCents && (
             <>
               {' · '}
@@ -53,7 +55,7 @@ export function QuickAnswer({
             </>
           )}
         </p>
-        <p className="text-slate">{priceLine(local, answer)}</p>
+        <p className="text-slate">{[...spread, ...aroundWords(answer)].join(' · ')}</p>
         {error ? (
           <ErrorNote
             error={error}
@@ -72,23 +74,26 @@ export function QuickAnswer({
           </ButtonLink>
         </div>
       </Card>
-      <Card title="What it takes" dim={summaryWords(local)}>
-        <ForecastSteps steps={local.steps} petName="this pet" />
+      <Card title="What it takes" dim={summaryWords(shown)}>
+        <ForecastSteps steps={shown.steps} petName="this pet" />
         <ForecastNotes forecast={local} />
       </Card>
     </div>
   );
 }
 
-function priceLine(local: PetForecast, answer: Answer | null): string {
-  const spread = `8 in 10 between ${summaryWords(local).split('between ')[1]}`;
-  if (!answer) return spread;
+/** The server's minutes know what the business's own visits taught; cautions and needs are the same. */
+function told(
+  local: PetForecast,
+  answer: Answer,
+): Omit<PetForecast, 'steps'> & Pick<Answer, 'steps'> {
+  const { p10Seconds, p50Seconds, p90Seconds, steps } = answer;
+  return { ...local, medianSeconds: p50Seconds, p10Seconds, p50Seconds, p90Seconds, steps };
+}
+
+function aroundWords(answer: Answer | null): string[] {
+  if (!answer) return [];
   const around = Math.round((answer.setUpSeconds + answer.cleanDownSeconds) / 60);
-  return [
-    spread,
-    `${around} min around it`,
-    answer.priceCents ? null : 'no price set yet, see Setup, Business',
-  ]
-    .filter(Boolean)
-    .join(' · ');
+  const unpriced = answer.priceCents ? [] : ['no price set yet, see Setup, Business'];
+  return [`${around} min around it`, ...unpriced];
 }

@@ -5,6 +5,7 @@ import { styles as startingStyles } from '#shared/grooming/styles.ts';
 import { forecastQueries, type QuickForecastFields } from '#src/api/forecasts.ts';
 import { useToday } from '#src/api/session.ts';
 import { styleQueries } from '#src/api/styles.ts';
+import { ForecastLine } from './ForecastLine.tsx';
 import { petFactsOf } from './petFactsOf.ts';
 import { QuickAnswer } from './QuickAnswer.tsx';
 import { QuickFields } from './QuickFields.tsx';
@@ -38,7 +39,10 @@ export function QuickForecast() {
   const change = (part: Partial<QuickPet>) => setPet((before) => withUsual(before, part));
   return (
     <div className="grid grid-cols-[minmax(0,1fr)] items-start gap-4 lg:grid-cols-[minmax(0,1fr)_minmax(0,1.1fr)] lg:gap-5">
-      <QuickFields pet={pet} styleChoices={choices} onChange={change} />
+      <div className="grid grid-cols-[minmax(0,1fr)] gap-4">
+        <QuickFields pet={pet} styleChoices={choices} onChange={change} />
+        <ForecastLine facts={told ? facts : ''} style={style} />
+      </div>
       <QuickAnswer
         pet={pet}
         local={local}

@@ -22,7 +22,8 @@ export function LibraryStyleForm({
   style: Style;
   /** Make a new style of it instead of changing it. */
   copy: boolean;
-  onDone: () => void;
+  /** `saved` false: only looked, or thought better of it. */
+  onDone: (saved: boolean) => void;
 }) {
   const create = useCreateStyle();
   const update = useUpdateStyle();
@@ -37,13 +38,13 @@ export function LibraryStyleForm({
     if (copy) await create.mutateAsync({ body: { ...fields, species, basedOn: style.id } });
     else await update.mutateAsync({ params: { styleId: style.id }, body: fields });
     toast(`${name} is saved.`);
-    onDone();
+    onDone(true);
   };
   return (
     <>
       <div className="mb-3 flex flex-wrap items-center gap-3">
         <h2 className="text-xl">{copy ? `A copy of ${style.name}` : style.name}</h2>
-        <Button size="small" kind="quiet" onClick={onDone}>
+        <Button size="small" kind="quiet" onClick={() => onDone(false)}>
           Back to the styles
         </Button>
       </div>

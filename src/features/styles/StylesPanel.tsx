@@ -16,7 +16,7 @@ export function StylesPanel() {
   if (styles.isPending) return <Loading lines={8} />;
   if (styles.isError) return <ErrorNote error={styles.error} onRetry={() => styles.refetch()} />;
   const find = (key: string) => styles.data.find(({ id }) => id === search.get(key)) ?? null;
-  const back = () => setSearch({}, { state: { saved: true } });
+  const back = (saved: boolean) => setSearch({}, { state: { saved } });
   const edited = find('edit');
   const copied = find('copy');
   if (mayEdit && edited?.source === 'own')
