@@ -5,8 +5,10 @@
  */
 import { businessSettings } from '#shared/grooming/learning/businessSettings.ts';
 import { fitGroomModel } from '#shared/grooming/learning/fitGroomModel.ts';
+import { fitMixedModel } from '#shared/grooming/learning/fitMixedModel.ts';
 import { coverageBand, judgeBusiness } from '#shared/grooming/learning/judgeBusiness.ts';
 import { simulateBusiness } from '#shared/grooming/learning/simulateBusiness.ts';
+import { normalDraw } from '#shared/grooming/normalDraw.ts';
 import { seededRandom } from '../support/random.ts';
 
 const judged = businessSettings.seeds.map((seed) =>
@@ -57,6 +59,29 @@ for (const [name, timed] of [
     `fit of ${timed.length} visits, ${name}`,
     `${((user + system) / 1e6).toFixed(2)} s, ${Object.keys(fit.effects).length} effects, ` +
       `${fit.timedRecords} timed, JSON ${(JSON.stringify(fit).length / 1024).toFixed(0)} kB`,
+  );
+}
+
+// Crossed at random, which fills in most: 5,500 × 400 × 100 levels; and with nothing to find.
+for (const sds of [
+  [0.15, 0.07, 0.1],
+  [0, 0, 0],
+]) {
+  const random = seededRandom(4);
+  const groups = [5_500, 400, 100].map((count, k) => {
+    const effects = Array.from({ length: count }, () => sds[k]! * normalDraw(random));
+    const of = Array.from({ length: 20_000 }, () => Math.floor(random() * count));
+    return { name: `g${k}`, effects, of, levels: of.map(String) };
+  });
+  const y = groups[0]!.of.map((_, i) =>
+    groups.reduce((sum, { effects, of }) => sum + effects[of[i]!]!, 0.2 * normalDraw(random)),
+  );
+  const began = process.cpuUsage();
+  const fit = fitMixedModel({ y, fixed: [y.map(() => 1)], groups });
+  const { user, system } = process.cpuUsage(began);
+  print(
+    `mixed model, 20,000 × 6,000, SDs ${sds.join(', ')}`,
+    `${((user + system) / 1e6).toFixed(2)} s, ${fit.steps} steps, found ${fit.groups.map(({ sd }) => sd.toFixed(3)).join(', ')}`,
   );
 }
 

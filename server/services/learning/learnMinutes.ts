@@ -10,7 +10,8 @@ const pairsHeld = 5;
 /**
  * Learns from the business's finished visits. The new fit counts only when it forecasts held-out
  * visits better than the one in force (or than the plain model). Kept or not, the night leaves a row.
- * Reading and writing are two transactions: none stays open over the arithmetic.
+ * At night reading and writing are two transactions and none stays open over the arithmetic; on demand
+ * the call's own transaction goes around all of it, holding no locks until the row is written.
  */
 export async function learnMinutes(businessId: string, now: Date): Promise<GroomFit> {
   const { records, kept } = await inBusiness(businessId, async () => {

@@ -1,3 +1,4 @@
+import { guessRatios } from './guessRatios.ts';
 import { minimise } from './minimise.ts';
 import {
   type EquationLayout,
@@ -71,14 +72,15 @@ export function fitMixedModel(
   const at = (logRatios: Float64Array) =>
     profile(layout, equations, logRatios, free, options.prior);
 
-  const start = Float64Array.from(layout.groups, ({ name }) => {
-    const { prior } = options;
-    const guess = prior ? prior.sdByGroup[name]! / prior.residualSd : 1;
-    return Math.log(options.startRatios?.[name] || guess || 1e-3);
+  const { prior, startRatios } = options;
+  const guesses = prior ? [] : guessRatios(data.y, data.groups);
+  const start = Float64Array.from(layout.groups, ({ name }, k) => {
+    const guess = prior ? prior.sdByGroup[name]! / prior.residualSd : guesses[k]!;
+    return Math.log(startRatios?.[name] || guess);
   });
   const curvature = Float64Array.from(layout.groups, ({ levels }) => 2 * levels.length + 1);
   const found = minimise(at, start, curvature, { tolerance: options.tolerance ?? 1e-9 });
-  const best = options.prior ? found : dropNothings(at, found);
+  const best = prior ? found : dropNothings(at, found);
   return describe(data, layout, at(best.x), free, best.steps);
 }
 
