@@ -123,9 +123,15 @@ export function StyleEditor({
       {failure ? (
         <ErrorNote error={failure} title="The style is not saved" className="xl:col-span-2" />
       ) : null}
-      <div className="card sticky bottom-[4.25rem] z-20 flex flex-wrap items-center justify-between gap-x-6 gap-y-2 px-4 py-2.5 md:bottom-3 md:px-5 xl:col-span-2">
+      <div className="card sticky bottom-[4.25rem] z-20 flex items-center justify-between gap-x-4 px-4 py-2.5 md:bottom-3 md:px-5 xl:col-span-2">
         <MinutesLine facts={facts} style={style} before={startStyle} />
-        <Button kind="go" busy={saving} busyWords="Saving" onClick={() => void save()}>
+        <Button
+          kind="go"
+          busy={saving}
+          busyWords="Saving"
+          className="shrink-0"
+          onClick={() => void save()}
+        >
           {saveWords}
         </Button>
       </div>

@@ -40,13 +40,13 @@ export function cutWords(cuts: Style['cuts'], region: Region): CutWords {
   }
   const direction = cut.direction === 'with' ? 'with growth' : 'against growth';
   const tool = cut.tool === 'blade' ? `blade ${bladeLabel(cut.lengthTenthsMm)}` : 'guide comb';
-  const short = cut.tool === 'blade' ? bladeLabel(cut.lengthTenthsMm) : 'comb';
+  const short = cut.tool === 'blade' ? shortBlade(cut.lengthTenthsMm) : 'comb';
   return { region: name, tool, direction, left, label: `${short} · ${left}` };
 }
 
 /** "9.5": millimetres of tenths, the tenth only where it says something. */
 export function writeMm(tenthsMm: number): string {
-  const rounded = tenthsMm >= 200 ? Math.round(tenthsMm / 10) * 10 : tenthsMm;
+  const rounded = tenthsMm >= 130 ? Math.round(tenthsMm / 10) * 10 : Math.round(tenthsMm);
   return String(rounded / 10);
 }
 
@@ -59,4 +59,10 @@ export function bladeLabel(lengthTenthsMm: number): string {
 /** "leaves 19 mm", for a choice that says what it will do. */
 export function leavesWords(cut: Extract<RegionCut, { tool: 'blade' | 'comb' }>): string {
   return `leaves ${writeMm(leftTenthsMm(cut))} mm`;
+}
+
+/** "4F", "#10": beside a length a bare number would read as another one. */
+function shortBlade(lengthTenthsMm: number): string {
+  const label = bladeLabel(lengthTenthsMm);
+  return /^\d+½?$/.test(label) ? `#${label}` : label;
 }
