@@ -1,11 +1,11 @@
 import { useQuery } from '@tanstack/react-query';
 import { useLocation, useNavigate, useParams } from 'react-router-dom';
 import { householdQueries, useCreateHousehold, useUpdateHousehold } from '#src/api/households.ts';
-import type { Where } from '#src/api/useWhere.ts';
 import { Loading } from '#src/components/Loading.tsx';
 import { PageHeader } from '#src/components/PageHeader.tsx';
 import { toast } from '#src/components/toast.ts';
 import { HouseholdForm } from '#src/features/households/HouseholdForm.tsx';
+import type { ToldByPhone } from '#src/features/households/quickPet.ts';
 import { FailedQuery } from './FailedQuery.tsx';
 
 /** A household to write: a new one, or the one in the address. */
@@ -17,8 +17,8 @@ export function HouseholdFormScreen() {
 function NewHousehold() {
   const navigate = useNavigate();
   const create = useCreateHousehold();
-  // The forecast hands on the address it was told.
-  const told = useLocation().state as { where?: Where } | null;
+  // The forecast hands on the address and the pet it was told.
+  const told = useLocation().state as Partial<ToldByPhone> | null;
   return (
     <>
       <PageHeader title="Add a household" back={{ to: '/households', words: 'Households' }} />
@@ -29,7 +29,8 @@ function NewHousehold() {
         onSave={async (body) => {
           const made = await create.mutateAsync({ body });
           toast(`${made.name} is added. Now its pets.`);
-          navigate(`/households/${made.id}`, { state: { saved: true }, replace: true });
+          const next = `/households/${made.id}${told?.pet ? '/pets/new' : ''}`;
+          navigate(next, { state: { saved: true, pet: told?.pet }, replace: true });
         }}
       />
     </>

@@ -1,11 +1,12 @@
 import { useQuery } from '@tanstack/react-query';
-import { useNavigate, useParams } from 'react-router-dom';
+import { useLocation, useNavigate, useParams } from 'react-router-dom';
 import { householdQueries } from '#src/api/households.ts';
 import { petQueries, useCreatePet, useUpdatePet } from '#src/api/pets.ts';
 import { Loading } from '#src/components/Loading.tsx';
 import { PageHeader } from '#src/components/PageHeader.tsx';
 import { toast } from '#src/components/toast.ts';
 import { PetForm } from '#src/features/households/PetForm.tsx';
+import type { ToldByPhone } from '#src/features/households/quickPet.ts';
 import { RestPet } from '#src/features/households/RestPet.tsx';
 import { FailedQuery } from './FailedQuery.tsx';
 
@@ -22,6 +23,7 @@ export function PetFormScreen() {
 function NewPet({ householdId }: { householdId: string }) {
   const navigate = useNavigate();
   const create = useCreatePet();
+  const told = useLocation().state as Partial<ToldByPhone> | null;
   const household = useQuery(householdQueries.one(householdId));
   const back = `/households/${householdId}`;
   return (
@@ -32,6 +34,7 @@ function NewPet({ householdId }: { householdId: string }) {
       />
       <PetForm
         pet={null}
+        told={told?.pet ?? null}
         saveWords="Add the pet"
         onSave={async (body) => {
           await create.mutateAsync({ params: { householdId }, body });

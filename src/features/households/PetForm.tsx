@@ -35,6 +35,7 @@ import { ForecastLine } from './ForecastLine.tsx';
 import { ForecastPanel } from './ForecastPanel.tsx';
 import { petFactsOf } from './petFactsOf.ts';
 import { petStart } from './petStart.ts';
+import type { ToldByPhone } from './quickPet.ts';
 import { styleChoices } from './styleChoices.ts';
 
 export type PetFields = z.output<typeof createPet.body>;
@@ -45,16 +46,19 @@ export type PetFields = z.output<typeof createPet.body>;
  */
 export function PetForm({
   pet,
+  told = null,
   onSave,
   saveWords,
 }: {
   pet: Pet | null;
+  /** What a call told of a new one. */
+  told?: ToldByPhone['pet'] | null;
   onSave: (fields: PetFields) => Promise<void>;
   saveWords: string;
 }) {
   const today = useToday();
   const { weightUnit } = useSession().business;
-  const form = useZodForm(createPet.body, petStart(pet));
+  const form = useZodForm(createPet.body, petStart(pet, told, Number(today.slice(0, 4))));
   const submit = useSubmit(form, onSave);
   const { errors, isDirty } = form.formState;
   const values = form.watch();

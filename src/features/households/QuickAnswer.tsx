@@ -9,7 +9,7 @@ import { Loading } from '#src/components/Loading.tsx';
 import { writeMoneyRange } from '#src/lib/writeMoneyRange.ts';
 import { ForecastNotes, ForecastSteps } from '#src/strips/ForecastSteps.tsx';
 import { OfferList } from './OfferList.tsx';
-import type { QuickPet } from './quickPet.ts';
+import type { QuickPet, ToldByPhone } from './quickPet.ts';
 
 type Answer = ResponseOf<typeof quickForecast>;
 
@@ -69,7 +69,7 @@ export function QuickAnswer({
           <Loading lines={3} />
         )}
         <div className="mt-4">
-          <ButtonLink to="/households/new" kind="go" state={{ where: pet.where }}>
+          <ButtonLink to="/households/new" kind="go" state={toldOf(pet)}>
             Add the household and book
           </ButtonLink>
         </div>
@@ -96,4 +96,8 @@ function aroundWords(answer: Answer | null): string[] {
   const around = Math.round((answer.setUpSeconds + answer.cleanDownSeconds) / 60);
   const unpriced = answer.priceCents ? [] : ['no price set yet, see Setup, Business'];
   return [`${around} min around it`, ...unpriced];
+}
+
+function toldOf({ where, ...pet }: QuickPet): ToldByPhone {
+  return { where, pet };
 }

@@ -1,8 +1,18 @@
 import type { z } from 'zod';
 import type { createPet, Pet } from '#shared/api/pets.ts';
+import type { ToldByPhone } from './quickPet.ts';
 
-/** What a pet's form begins with. */
-export function petStart(pet: Pet | null): z.input<typeof createPet.body> {
+/** What a pet's form begins with; `told` is what a call told of a new one, in the year `thisYear`. */
+export function petStart(
+  pet: Pet | null,
+  told: ToldByPhone['pet'] | null,
+  thisYear: number,
+): z.input<typeof createPet.body> {
+  if (!pet && told) {
+    const { ageYears, ...fields } = told;
+    const birthYear = ageYears === null ? null : thisYear - ageYears;
+    return { ...petStart(null, null, thisYear), ...fields, birthYear };
+  }
   return {
     name: pet?.name ?? '',
     species: pet?.species ?? 'dog',

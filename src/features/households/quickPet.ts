@@ -15,6 +15,12 @@ export interface QuickPet {
   where: Where;
 }
 
+/** What the next screens are handed: the address for the household, then the pet for its form. */
+export interface ToldByPhone {
+  where: Where;
+  pet: Omit<QuickPet, 'where'>;
+}
+
 export const quickStart: QuickPet = {
   species: 'dog',
   breedId: null,
