@@ -98,9 +98,10 @@ export function AppShell() {
           aria-label="Main"
           className="fixed inset-x-0 bottom-0 z-30 border-t border-fawn bg-cream pb-[env(safe-area-inset-bottom)] md:hidden"
         >
-          <ul className="grid auto-cols-fr grid-flow-col">
+          {/* By the length of their words: seven of them fit a phone only so. */}
+          <ul className="flex">
             {items.map((item) => (
-              <li key={item.to}>
+              <li key={item.to} className="min-w-11 flex-auto">
                 <NavLink
                   to={item.to}
                   className={({ isActive }) =>
