@@ -39,6 +39,13 @@ export function StopPanel({ view, stop }: { view: RunView; stop: RunStop }) {
           )}
         </p>
       )}
+      {visit && isEarly(stop.times) && (stop.state === 'ahead' || stop.state === 'driving') && (
+        <p className="mb-2 text-[15px]">
+          <span aria-hidden="true">◆ </span>
+          {writeSpan(stop.times.waitSeconds)} early: the door opens at{' '}
+          {formatWall(view.problem, stop.times.startSeconds)}. Wait, or call them.
+        </p>
+      )}
       <div className="mt-3 grid grid-cols-1 gap-3">
         <KerbCard stop={stop} />
         {visit?.pets.map((pet) => (
@@ -63,6 +70,11 @@ export function StopPanel({ view, stop }: { view: RunView; stop: RunStop }) {
       </div>
     </>
   );
+}
+
+/** The van would stand and wait: the door opens when it was promised, not before. */
+function isEarly(times: RunStop['times']): boolean {
+  return times.waitSeconds >= 180;
 }
 
 /** What matters before the name, in pieces that never break inside. */
