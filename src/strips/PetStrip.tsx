@@ -30,7 +30,8 @@ export function PetStrip({
   const towers = towersOf(steps, petNames ?? new Map(), 0, seconds);
   const xOf = (at: number) => 2 + (at / seconds) * (drawnPx - 4);
   return (
-    <div ref={box}>
+    // Its own width must not hold the page open: a phone is narrower than the widest strip.
+    <div ref={box} className="[contain:inline-size]">
       <svg
         width={drawnPx}
         height={84}
