@@ -35,12 +35,15 @@ export function DayBoard({
   nav,
   onDay,
   readAgain,
+  whenEmpty = (plain) => plain,
 }: {
   day: Day;
   past: boolean;
   nav: ReactNode;
   onDay: (day: Day) => void;
   readAgain: () => Promise<unknown>;
+  /** What stands where the strips would, on a day without vans. */
+  whenEmpty?: (plain: ReactNode) => ReactNode;
 }) {
   const { business } = useSession();
   const can = {
@@ -156,7 +159,8 @@ export function DayBoard({
         words={summaryWords(shown.plan, shown.times, business.distanceUnit, past)}
         dim={past ? 'this day is over' : null}
       />
-      {empty && <EmptyDay past={past} notPlaced={plan.notPlaced.length} canSetUp={can.setUp} />}
+      {empty &&
+        whenEmpty(<EmptyDay past={past} notPlaced={plan.notPlaced.length} canSetUp={can.setUp} />)}
       {!empty && narrow && (
         <Tabs label="Day" tabs={phoneTabs} current={tab} onChange={setTab}>
           <div className="mt-3">
