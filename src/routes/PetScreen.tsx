@@ -11,6 +11,7 @@ import { toast } from '#src/components/toast.ts';
 import { PastVisits } from '#src/features/households/PastVisits.tsx';
 import { PetForm } from '#src/features/households/PetForm.tsx';
 import { RestPet } from '#src/features/households/RestPet.tsx';
+import { breedWords } from '#src/strips/petWords.ts';
 import { FailedQuery } from './FailedQuery.tsx';
 
 /** One pet: its facts, its style, what it takes. Without a pet in the address, a new one. */
@@ -94,7 +95,7 @@ function KnownPet({ householdId, petId }: { householdId: string; petId: string }
 function factWords(pet: Pet, today: string): string {
   const age = pet.birthYear === null ? null : Number(today.slice(0, 4)) - pet.birthYear;
   return [
-    pet.breedName,
+    breedWords(pet.breedName),
     pet.styleName,
     age === null ? null : age < 1 ? 'under a year' : age === 1 ? '1 year' : `${age} years`,
     `every ${pet.intervalWeeks} weeks`,

@@ -12,6 +12,7 @@ import { Chip } from '#src/components/Chip.tsx';
 import { EmptyState } from '#src/components/EmptyState.tsx';
 import { writeWeight } from '#src/lib/measures.ts';
 import { PetStrip } from '#src/strips/PetStrip.tsx';
+import { breedWords } from '#src/strips/petWords.ts';
 import { petFactsOf } from './petFactsOf.ts';
 
 /** Every pet with its minutes as a strip; those that rest stand last and faint. */
@@ -59,7 +60,7 @@ function PetLines({ pet, today, to }: { pet: Pet; today: string; to: string }) {
   const { weightUnit } = useSession().business;
   const forecast = tryForecast(pet, today);
   const facts = [
-    pet.breedName,
+    breedWords(pet.breedName),
     pet.weightGrams === null ? null : writeWeight(pet.weightGrams, weightUnit),
     pet.active ? pet.styleName : 'rests, not booked',
   ];
