@@ -14,7 +14,12 @@ export function PastVisits({ past, year }: { past: readonly PastVisit[]; year: n
   if (past.length === 0) return null;
   return (
     <Card title="Forecast against the clock">
-      <div className="overflow-x-auto">
+      <div
+        className="overflow-x-auto"
+        role="region"
+        aria-label="Forecast against the clock"
+        tabIndex={0}
+      >
         <table className="plain">
           <thead>
             <tr>
