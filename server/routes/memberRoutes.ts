@@ -2,7 +2,7 @@ import { Router } from 'express';
 import * as api from '#shared/api/members.ts';
 import { ownOrigin } from '#server/http/csrf.ts';
 import { handle, handlePublic } from '#server/http/handle.ts';
-import { limitFailures, limitLinks } from '#server/http/limits.ts';
+import { limitFailures, limitLinks, limitMaking } from '#server/http/limits.ts';
 import { presentMember, presentMembers } from '#server/presenters/members.ts';
 import {
   acceptInvitation,
@@ -15,6 +15,8 @@ import { enter } from './sessionRoutes.ts';
 export const memberRoutes = Router();
 const done = { done: true } as const;
 
+// Letters go to addresses the inviter names.
+memberRoutes.post(api.inviteMember.path, limitMaking);
 memberRoutes.use(api.getInvitation.path, limitLinks);
 // A known person's password is checked here as well.
 memberRoutes.use(api.acceptInvitation.path, limitFailures);
