@@ -3,7 +3,7 @@ import * as api from '#shared/api/days.ts';
 import { AppError } from '#server/errors.ts';
 import { handle } from '#server/http/handle.ts';
 import { presentDay, presentProposal } from '#server/presenters/day.ts';
-import { getDaySurroundings } from '#server/services/days/getDay.ts';
+import { getDaySurroundings } from '#server/services/days/getDaySurroundings.ts';
 import { type LoadedDay, loadDay } from '#server/services/days/loadDay.ts';
 import { type Conflict, moveVisit } from '#server/services/days/moveVisit.ts';
 import { pinVisit } from '#server/services/days/pinVisit.ts';
