@@ -2,7 +2,7 @@ import { lazy, Suspense, type ComponentType } from 'react';
 import { useParams } from 'react-router-dom';
 import { useCan, useSession } from '#src/api/sessionStore.ts';
 import { Loading } from '#src/components/Loading.tsx';
-import { SetupGuide } from '#src/features/setup/SetupGuide.tsx';
+import { NextSetupStep } from '#src/features/setup/SetupGuide.tsx';
 import { PageHeader } from '#src/components/PageHeader.tsx';
 import { TabLinks } from '#src/components/TabLinks.tsx';
 import { NotFoundScreen } from './NotFoundScreen.tsx';
@@ -70,7 +70,7 @@ export function SetupScreen() {
   return (
     <>
       <PageHeader title="Setup" dim={business.name} />
-      <SetupGuide />
+      <NextSetupStep at={`/setup/${current.key}`} />
       <TabLinks
         label="Setup"
         tabs={shown.map(({ key, words }) => ({ to: `/setup/${key}`, words }))}

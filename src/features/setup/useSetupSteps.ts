@@ -24,6 +24,7 @@ export function useSetupSteps(): SetupStep[] | null {
   const today = useToday();
   const worksInVan = useSession().groomerId !== null;
   const business = useQuery(businessQueries.one());
+  const areas = useQuery(businessQueries.areas());
   const places = useQuery(placeQueries.list());
   const vans = useQuery(vanQueries.list());
   const groomers = useQuery(groomerQueries.list());
@@ -31,6 +32,7 @@ export function useSetupSteps(): SetupStep[] | null {
   const households = useQuery(householdQueries.list('', 1));
   if (
     !business.data ||
+    !areas.data ||
     !places.data ||
     !vans.data ||
     !groomers.data ||
@@ -44,8 +46,9 @@ export function useSetupSteps(): SetupStep[] | null {
       words: 'Choose the area',
       why: 'Roads, addresses and the map come from it.',
       to: '/setup/area',
-      done: business.data.areaName !== null,
-      optional: false,
+      done: areas.data.some(({ name }) => name === business.data.areaName),
+      // Without an imported map the days still work, on rough distances.
+      optional: areas.data.length === 0,
     },
     {
       key: 'depot',
