@@ -42,7 +42,7 @@ export function ForecastPanel({
           {forecast.steps.map((step) => (
             <tr key={step.key} className="border-t border-linen">
               <td className={`py-1.5 pr-3 ${step.family === 'scissor' ? 'font-semibold' : ''}`}>
-                {step.label}
+                <span className="inline-block first-letter:uppercase">{step.label}</span>
                 {tellable(step.reasons).length > 0 && (
                   <span className="block text-sm font-normal text-slate">
                     {tellable(step.reasons).map(reasonWords).join(' · ')}

@@ -59,6 +59,8 @@ export function PetCards({
 function PetLines({ pet, today, to }: { pet: Pet; today: string; to: string }) {
   const { weightUnit } = useSession().business;
   const forecast = tryForecast(pet, today);
+  // The forecast adds what age, breed and coat bring to what was ticked.
+  const cautions = forecast?.cautions ?? pet.cautions.map((key) => ({ key, stop: false }));
   const facts = [
     breedWords(pet.breedName),
     pet.weightGrams === null ? null : writeWeight(pet.weightGrams, weightUnit),
@@ -73,11 +75,17 @@ function PetLines({ pet, today, to }: { pet: Pet; today: string; to: string }) {
         <span className="text-slate">{facts.filter(Boolean).join(' · ')}</span>
       </p>
       {forecast && <p className="text-slate">{explain(forecast).summary}</p>}
-      {(pet.cautions.length > 0 || pet.cautionNote) && (
+      {forecast?.planChange && (
+        <p className="mt-1.5 rounded-[10px] bg-[var(--honey-soft)] px-3 py-2">
+          <span aria-hidden="true">◆ </span>
+          {forecast.planChange.words}
+        </p>
+      )}
+      {(cautions.length > 0 || pet.cautionNote) && (
         <div className="mt-1.5 flex flex-wrap gap-1.5">
-          {pet.cautions.map((key) => (
-            <Chip key={key} tone="bad">
-              {shortWords(key)}
+          {cautions.map(({ key, stop }) => (
+            <Chip key={key} tone={stop ? 'bad' : 'heed'}>
+              {stop ? `Stop: ${shortWords(key)}` : shortWords(key)}
             </Chip>
           ))}
           {pet.cautionNote && <Chip tone="heed">{pet.cautionNote}</Chip>}
