@@ -90,7 +90,7 @@ function headWords(view: RunView, stop: RunStop): string[] {
   if (state === 'working')
     return [`Here since ${arrive}`, `done about ${formatWall(day, times.endSeconds)}`];
   const drive =
-    times.driveSeconds > 0
+    times.driveSeconds >= 30
       ? `${writeSpan(times.driveSeconds)} drive${times.rough ? ', rough' : ''}`
       : 'no driving';
   return [`Next, ${arrive}`, drive, ...promised];
