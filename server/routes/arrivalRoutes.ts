@@ -1,7 +1,7 @@
 import { type ErrorRequestHandler, Router } from 'express';
 import * as api from '#shared/api/arrival.ts';
 import { clock } from '#server/clock.ts';
-import { AppError } from '#server/errors.ts';
+import { knownError } from '#server/http/answerErrors.ts';
 import { handlePublic } from '#server/http/handle.ts';
 import { limitLinks } from '#server/http/limits.ts';
 import { arrivalPage } from '#server/http/arrivalPage.ts';
@@ -28,7 +28,7 @@ arrivalRoutes.get('/a/:token', limitLinks, async (req, res) => {
 
 /** A pet owner is told in a page, whatever went wrong. */
 const answerInPage: ErrorRequestHandler = async (error: unknown, req, res, _next) => {
-  const known = error instanceof AppError ? error : null;
+  const known = knownError(error);
   if (!known) log.error({ err: error, requestId: req.id }, 'an arrival page failed');
   const words = known?.message ?? 'Something broke on our side. Open the link again in a minute.';
   res
