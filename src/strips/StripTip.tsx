@@ -98,6 +98,9 @@ function StopTip({ day, stop }: { day: DayClock; stop: StripStop }) {
           {stop.drive.rough && ', rough: no road answer'}
         </p>
       )}
+      {stop.kind === 'visit' && (
+        <p className="mt-1 text-slate">Keys: D opens it, Enter picks it up.</p>
+      )}
       {stop.wait && (
         <p className="text-slate">waits {writeSpan(stop.wait.toSeconds - stop.wait.fromSeconds)}</p>
       )}

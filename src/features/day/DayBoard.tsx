@@ -17,6 +17,7 @@ import { moveWords, targetWords } from './moveWords.ts';
 import type { ProposalView } from './ProposalCard.tsx';
 import { StripsCard } from './StripsCard.tsx';
 import { summaryWords } from './summaryWords.ts';
+import { unsentWords } from './unsentWords.ts';
 import { useBoardActions } from './useBoardActions.ts';
 import { useBoardMoves } from './useBoardMoves.ts';
 import { useDayChange, type DayChange } from './useDayChange.ts';
@@ -157,7 +158,7 @@ export function DayBoard({
       </div>
       <DaySummary
         words={summaryWords(shown.plan, shown.times, business.distanceUnit, past)}
-        dim={past ? 'this day is over' : null}
+        dim={past ? 'this day is over' : unsentWords(day, shown.times, nowSeconds)}
       />
       {empty &&
         whenEmpty(<EmptyDay past={past} notPlaced={plan.notPlaced.length} canSetUp={can.setUp} />)}
