@@ -28,11 +28,11 @@ handle(dayRoutes, api.moveVisit, 'visits.move', async ({ actor, params, body, no
 handle(dayRoutes, api.pinVisit, 'visits.move', async ({ actor, params, body, now }) =>
   show(await pinVisit(actor, params.date, params.visitId, body.vanId, now)),
 );
-handle(dayRoutes, api.undoMove, 'visits.move', async ({ actor, params, now }) =>
-  show(await undoMove(actor, params.date, now)),
+handle(dayRoutes, api.undoMove, 'visits.move', async ({ actor, params, body, now }) =>
+  showOrConflict(await undoMove(actor, params.date, body.changeId, now)),
 );
-handle(dayRoutes, api.redoMove, 'visits.move', async ({ actor, params, now }) =>
-  show(await redoMove(actor, params.date, now)),
+handle(dayRoutes, api.redoMove, 'visits.move', async ({ actor, params, body, now }) =>
+  showOrConflict(await redoMove(actor, params.date, body.changeId, now)),
 );
 handle(dayRoutes, api.sendRuns, 'days.send', async ({ actor, params, body, now }) =>
   showOrConflict(await sendRuns(actor, params.date, body.vanIds, body.runVersions, now)),
