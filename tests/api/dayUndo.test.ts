@@ -84,7 +84,7 @@ describe('undo and redo', () => {
     expect((await redo()).status).toBe(409);
     // After taking the newer move back, that one comes again: not the one given up before it.
     await undo();
-    expect((await read()).redo).toEqual({ words: 'Wren to Plover, first' });
+    expect((await read()).redo).toMatchObject({ words: 'Wren to Plover, first' });
     expect(ordersOf((await redo()).body)).toMatchObject({ Otter: [], Plover: ['Wren'] });
     expect((await redo()).status).toBe(409);
   });
