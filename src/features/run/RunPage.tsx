@@ -166,7 +166,9 @@ function NotSent({ run }: { run: RunDetail }) {
 }
 
 function RunOver({ view, unsent }: { view: RunView; unsent: number }) {
-  const done = view.stops.filter(({ kind, state }) => kind === 'visit' && state === 'done').length;
+  const visits = view.stops.filter(({ kind }) => kind === 'visit');
+  const done = visits.filter(({ state }) => state === 'done').length;
+  const failed = visits.filter(({ state }) => state === 'failed').length;
   return (
     <>
       <p className="text-[15px] text-slate">
@@ -176,6 +178,7 @@ function RunOver({ view, unsent }: { view: RunView; unsent: number }) {
       </p>
       <h1 className="text-[26px] leading-[1.12] tracking-tight">
         All stops are over, {done} {done === 1 ? 'visit' : 'visits'} done
+        {failed > 0 && `, ${failed} not done`}
       </h1>
       {unsent > 0 && (
         <p className="mt-2">
