@@ -33,6 +33,8 @@ export default defineConfig({
         extends: true,
         test: {
           name: 'unit',
+          // Times belong to benches: a busy machine must not fail an answer that is right.
+          testTimeout: 30_000,
           include: [
             'shared/**/*.test.ts',
             'server/**/*.test.ts',

@@ -1,8 +1,8 @@
 import { randomBytes } from 'node:crypto';
-import { chmodSync, existsSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs';
 import { join, resolve } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { z } from 'zod';
+import { readOrMakeFile } from './readOrMakeFile.ts';
 
 const loopback = ['127.0.0.1', '::1', '[::1]', 'localhost'];
 
@@ -83,7 +83,7 @@ let ring: KeyRing | null = null;
 
 /** `FURLONG_KEYS` is `id:base64key[,id:base64key…]`; absent, one is made in the data folder (mode 0600). */
 export function keyRing(): KeyRing {
-  ring ??= parseKeys(env.keysText ?? readOrMakeKeys(env.dataFolder));
+  ring ??= parseKeys(env.keysText ?? readOrMakeFile(join(env.dataFolder, 'keys'), makeKeys).trim());
   return ring;
 }
 
@@ -108,18 +108,6 @@ export function parseKeys(text: string): KeyRing {
   return { keys };
 }
 
-function readOrMakeKeys(folder: string): string {
-  const path = join(folder, 'keys');
-  if (!existsSync(path)) {
-    mkdirSync(folder, { recursive: true });
-    const made = `k1:${randomBytes(32).toString('base64')}`;
-    try {
-      writeFileSync(path, made, { mode: 0o600, flag: 'wx' });
-    } catch (error) {
-      // Two processes may start at once: the first one's keys count for both.
-      if ((error as NodeJS.ErrnoException).code !== 'EEXIST') throw error;
-    }
-    chmodSync(path, 0o600);
-  }
-  return readFileSync(path, 'utf8').trim();
+function makeKeys(): string {
+  return `k1:${randomBytes(32).toString('base64')}`;
 }

@@ -11,7 +11,7 @@ import { openCarriers } from '#server/services/texts/openCarriers.ts';
 await database.authenticate();
 const server = buildApp().listen(env.port, env.host, (error?: Error) => {
   if (error) stopWith(error);
-  else void ready();
+  else ready().catch(stopWith);
 });
 let closeAll: () => Promise<void> = async () => {};
 
@@ -37,15 +37,23 @@ for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'] as const)
     stopping = true;
     // Connections that stay open must not keep a stopped server alive.
     setTimeout(() => process.exit(0), 5000).unref();
-    server.close();
-    server.closeIdleConnections();
-    void closeAll()
+    void finishCalls()
+      .then(() => closeAll())
       .then(() => database.close())
       .finally(() => process.exit(0));
   });
 
+/** Takes no new calls and lets those under way have their answers, for three seconds at most. */
+async function finishCalls(): Promise<void> {
+  const finished = new Promise((resolve) => server.close(resolve));
+  const idle = setInterval(() => server.closeIdleConnections(), 50);
+  const late = new Promise((resolve) => setTimeout(resolve, 3000).unref());
+  await Promise.race([finished, late]);
+  clearInterval(idle);
+}
+
 function stopWith(error: Error): never {
-  log.fatal({ err: error }, 'the server cannot listen');
-  process.stderr.write(`Furlong cannot listen on ${env.host}:${env.port}: ${error.message}\n`);
+  log.fatal({ err: error }, 'the server cannot start');
+  process.stderr.write(`Furlong cannot start on ${env.host}:${env.port}: ${error.message}\n`);
   process.exit(1);
 }

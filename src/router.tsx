@@ -76,6 +76,10 @@ export const routes: RouteObject[] = [
             lazy: () => screen(import('./routes/HouseholdsScreen.tsx'), 'HouseholdsScreen'),
           },
           {
+            path: '/households/sites',
+            lazy: () => screen(import('./routes/SitesScreen.tsx'), 'SitesScreen'),
+          },
+          {
             path: '/households/new',
             lazy: () => screen(import('./routes/HouseholdFormScreen.tsx'), 'HouseholdFormScreen'),
           },

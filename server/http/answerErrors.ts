@@ -10,7 +10,7 @@ export const answerUnknown: RequestHandler = (_req, _res, next) => {
 /** The one place an error becomes an answer; what nobody foresaw becomes a bland 500 with a request id. */
 export const answerErrors: ErrorRequestHandler = (error: unknown, req, res, next) => {
   if (res.headersSent) return next(error);
-  const known = error instanceof AppError ? error : fromParser(error);
+  const known = knownError(error);
   if (!known) log.error({ err: error, requestId: req.id }, 'request failed');
   res
     .status(known?.status ?? 500)
@@ -26,6 +26,11 @@ export const answerErrors: ErrorRequestHandler = (error: unknown, req, res, next
       ...known?.extra,
     });
 };
+
+/** The error as one of ours, with its words for people; null for what nobody foresaw. */
+export function knownError(error: unknown): AppError | null {
+  return error instanceof AppError ? error : fromParser(error);
+}
 
 /**
  * Express's body parser, router and file server throw their own errors for bad JSON, size, odd

@@ -40,7 +40,9 @@ export function handle<E extends Endpoint>(
     needCsrf(req, actor.sessionId);
     await options.readBody?.(req, res);
     const call = { ...readInput(endpoint, req), now: clock.now(), req, res, actor };
-    return actAs(actor, () => fn(call), { onlyReads: endpoint.method === 'GET' });
+    // Parsed before the commit: an answer that breaks its contract takes the change back with it.
+    const work = async () => endpoint.response.parse(await fn(call)) as ResponseOf<E>;
+    return actAs(actor, work, { onlyReads: endpoint.method === 'GET' });
   });
 }
 
@@ -51,7 +53,9 @@ export function handlePublic<E extends Endpoint>(
   fn: (call: Call<E>) => Promise<z.input<E['response']>>,
 ): void {
   bind(router, endpoint, 'public', (req, res) =>
-    fn({ ...readInput(endpoint, req), now: clock.now(), req, res }),
+    fn({ ...readInput(endpoint, req), now: clock.now(), req, res }).then(
+      (result) => endpoint.response.parse(result) as ResponseOf<E>,
+    ),
   );
 }
 
@@ -59,13 +63,11 @@ function bind<E extends Endpoint>(
   router: Router,
   endpoint: E,
   ability: Ability,
-  answer: (req: Request, res: Response) => Promise<unknown>,
+  answer: (req: Request, res: Response) => Promise<ResponseOf<E>>,
 ): void {
   registerEndpoint(endpoint, ability);
   const handler: RequestHandler = async (req, res) => {
-    const result = await answer(req, res);
-    if (res.headersSent) return;
-    const body = endpoint.response.parse(result) as ResponseOf<E>;
+    const body = await answer(req, res);
     res.setHeader('Cache-Control', 'no-store');
     if (typeof body === 'string') res.send(body);
     else res.json(body);

@@ -31,9 +31,7 @@ function limiter(limit: number, keyGenerator: (req: Request) => string, count: '
     skipSuccessfulRequests: count === 'failures',
     keyGenerator,
     handler: (_req, _res, next) =>
-      next(
-        new AppError('tooMany', `Too many tries. Wait ${minutes} minutes, or reset the password.`),
-      ),
+      next(new AppError('tooMany', `Too many tries. Wait ${minutes} minutes, then try again.`)),
   });
 }
 

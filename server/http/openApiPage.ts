@@ -2,8 +2,15 @@ import { z } from 'zod';
 import { errorBody } from '#shared/api/errors.ts';
 import { boundEndpoints } from './endpointList.ts';
 
-/** OpenAPI 3.1 from the very schemas the server checks with (zod's own JSON Schema). */
+let made: ReturnType<typeof makePage> | null = null;
+
+/** OpenAPI 3.1 from the very schemas the server checks with (zod's own JSON Schema), made once. */
 export function openApiPage() {
+  made ??= makePage();
+  return made;
+}
+
+function makePage() {
   const paths: Record<string, Record<string, unknown>> = {};
   for (const { endpoint, ability } of boundEndpoints()) {
     const path = endpoint.path.replace(/:(\w+)/g, '{$1}');

@@ -38,8 +38,8 @@ export function presentDay(facts: DayFacts): z.input<typeof day> {
       changedSinceSent,
     })),
     visits: facts.visits.map(presentVisit),
-    undo: facts.undo && { words: facts.undo.words },
-    redo: facts.redo && { words: facts.redo.words },
+    undo: facts.undo && { changeId: facts.undo.id, words: facts.undo.words },
+    redo: facts.redo && { changeId: facts.redo.id, words: facts.redo.words },
     openProposalId: facts.openProposal?.id ?? null,
     log: facts.log.map(({ id, at, who, words }) => ({ id, at: at.toISOString(), who, words })),
   };

@@ -1,7 +1,9 @@
 import type { z } from 'zod';
-import type { listMembers, member } from '#shared/api/members.ts';
+import type { listGateOpenings, listMembers, member } from '#shared/api/members.ts';
+import type { Household } from '#server/models/Household.ts';
 import type { Invitation } from '#server/models/Invitation.ts';
 import type { Membership } from '#server/models/Membership.ts';
+import type { Site } from '#server/models/Site.ts';
 import type { User } from '#server/models/User.ts';
 
 interface MemberFacts {
@@ -32,4 +34,15 @@ export function presentMembers(facts: {
       expiresAt: expiresAt.toISOString(),
     })),
   };
+}
+
+export function presentGateOpenings(
+  opened: { household: Household; site: Site | null; at: Date }[],
+): z.input<(typeof listGateOpenings)['response']> {
+  return opened.map(({ household, site, at }) => ({
+    householdId: household.id,
+    householdName: household.name,
+    siteName: site?.name ?? null,
+    at: at.toISOString(),
+  }));
 }

@@ -3,7 +3,7 @@ import * as api from '#shared/api/days.ts';
 import { AppError } from '#server/errors.ts';
 import { handle } from '#server/http/handle.ts';
 import { presentDay, presentProposal } from '#server/presenters/day.ts';
-import { getDaySurroundings } from '#server/services/days/getDay.ts';
+import { getDaySurroundings } from '#server/services/days/getDaySurroundings.ts';
 import { type LoadedDay, loadDay } from '#server/services/days/loadDay.ts';
 import { type Conflict, moveVisit } from '#server/services/days/moveVisit.ts';
 import { pinVisit } from '#server/services/days/pinVisit.ts';
@@ -28,11 +28,11 @@ handle(dayRoutes, api.moveVisit, 'visits.move', async ({ actor, params, body, no
 handle(dayRoutes, api.pinVisit, 'visits.move', async ({ actor, params, body, now }) =>
   show(await pinVisit(actor, params.date, params.visitId, body.vanId, now)),
 );
-handle(dayRoutes, api.undoMove, 'visits.move', async ({ actor, params, now }) =>
-  show(await undoMove(actor, params.date, now)),
+handle(dayRoutes, api.undoMove, 'visits.move', async ({ actor, params, body, now }) =>
+  showOrConflict(await undoMove(actor, params.date, body.changeId, now)),
 );
-handle(dayRoutes, api.redoMove, 'visits.move', async ({ actor, params, now }) =>
-  show(await redoMove(actor, params.date, now)),
+handle(dayRoutes, api.redoMove, 'visits.move', async ({ actor, params, body, now }) =>
+  showOrConflict(await redoMove(actor, params.date, body.changeId, now)),
 );
 handle(dayRoutes, api.sendRuns, 'days.send', async ({ actor, params, body, now }) =>
   showOrConflict(await sendRuns(actor, params.date, body.vanIds, body.runVersions, now)),

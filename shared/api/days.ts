@@ -34,8 +34,8 @@ export const day = z.object({
   plan,
   runs: z.array(dayRun),
   visits: z.array(visitCard),
-  undo: z.object({ words: z.string() }).nullable(),
-  redo: z.object({ words: z.string() }).nullable(),
+  undo: z.object({ changeId: id, words: z.string() }).nullable(),
+  redo: z.object({ changeId: id, words: z.string() }).nullable(),
   openProposalId: id.nullable(),
   log: z.array(logEntry),
 });
@@ -70,18 +70,25 @@ export const pinVisit = endpoint({
   body: z.object({ vanId: id.nullable() }),
   response: day,
 });
+/** The change the screen offered; absent, whichever is last. A colleague's newer move is never taken back unseen. */
+const offered = z.object({ changeId: id.optional() });
+
 export const undoMove = endpoint({
   method: 'POST',
   path: '/api/days/:date/undo',
-  summary: 'Take back the last move, as an inverse move on the day as it is now',
+  summary:
+    'Take back the last move, as an inverse move on the day as it is now; 409 versionMoved when another came after it',
   params: onDate,
+  body: offered,
   response: day,
 });
 export const redoMove = endpoint({
   method: 'POST',
   path: '/api/days/:date/redo',
-  summary: 'Make the move again that was taken back last',
+  summary:
+    'Make the move again that was taken back last; 409 versionMoved when it is another by now',
   params: onDate,
+  body: offered,
   response: day,
 });
 export const sendRuns = endpoint({

@@ -62,6 +62,21 @@ export const removeMember = endpoint({
   response: done,
 });
 
+export const listGateOpenings = endpoint({
+  method: 'GET',
+  path: '/api/members/:userId/gate-openings',
+  summary: 'Households whose gate code a person has seen and that still have one, latest first',
+  params: z.object({ userId: id }),
+  response: z.array(
+    z.object({
+      householdId: id,
+      householdName: z.string(),
+      siteName: z.string().nullable(),
+      at: z.string(),
+    }),
+  ),
+});
+
 const token = z.object({ token: z.string().min(10).max(64) });
 
 export const getInvitation = endpoint({

@@ -49,9 +49,11 @@ export function arrivalSentence(facts: ArrivalFacts): string {
   switch (facts.state) {
     case 'onTheWay':
       return `${groomerName} is on the way to ${pets} in van ${vanName}. ${
-        arrival
-          ? `8 times in 10 a van arrives within the range shown.`
-          : 'The arrival time follows here.'
+        !arrival
+          ? 'The arrival time follows here.'
+          : arrival.from === arrival.to
+            ? 'The van may park earlier and waits until then.'
+            : '8 times in 10 a van arrives within the range shown.'
       }`;
     case 'planned': {
       const told = promise ? ` You were told ${screenRange(promise)}.` : '';

@@ -14,5 +14,6 @@ export function formatWall(day: DayClock, seconds: number): string {
 
 /** Two wall times with an en dash: '9:30–11:30'. */
 export function formatWallRange(day: DayClock, fromSeconds: number, toSeconds: number): string {
-  return `${formatWall(day, fromSeconds)}–${formatWall(day, toSeconds)}`;
+  const [from, to] = [formatWall(day, fromSeconds), formatWall(day, toSeconds)];
+  return from === to ? from : `${from}–${to}`;
 }

@@ -1,14 +1,16 @@
 import { useSyncExternalStore } from 'react';
 import { dismissToast, readToasts, subscribeToasts } from './toast.ts';
 
-/** Where `toast(words)` shows; once on a page. */
-export function ToastRegion() {
+/** Where `toast(words)` shows; once on a page. `high`: at the top, where a screen's foot acts. */
+export function ToastRegion({ high = false }: { high?: boolean }) {
   const notes = useSyncExternalStore(subscribeToasts, readToasts);
   return (
     <div
       aria-live="polite"
       role="status"
-      className="pointer-events-none fixed inset-x-3 bottom-20 z-50 flex flex-col items-center gap-2 md:bottom-6"
+      className={`pointer-events-none fixed inset-x-3 z-50 flex flex-col items-center gap-2 ${
+        high ? 'top-16' : 'bottom-20 md:bottom-6'
+      }`}
     >
       {notes.map((note) => (
         <div

@@ -5,6 +5,7 @@ import { AttributionControl, MapContainer, ZoomControl } from 'react-leaflet';
 import './map.css';
 import { FitView } from './FitView.tsx';
 import { GroundLayer } from './GroundLayer.tsx';
+import { WheelOnceHeld } from './WheelOnceHeld.tsx';
 
 /**
  * The map of an imported area; markers and lines are its children. Fills its box, whatever its size:
@@ -44,6 +45,7 @@ export function AreaMap({
         maxBounds={box.pad(0.35)}
         maxBoundsViscosity={0.8}
         maxZoom={18}
+        scrollWheelZoom={false}
         zoomControl={false}
         attributionControl={false}
         className="h-full w-full"
@@ -51,6 +53,7 @@ export function AreaMap({
         <ZoomControl position="topright" />
         <AttributionControl position="bottomright" prefix={false} />
         <GroundLayer areaName={areaName} version={version} attribution={attribution} />
+        <WheelOnceHeld />
         <FitView bounds={box} fitTo={fitTo} />
         {children}
       </MapContainer>

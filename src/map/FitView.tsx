@@ -28,7 +28,8 @@ export function FitView({
     const touch = (event: Event) => {
       if (!(event instanceof KeyboardEvent && event.key === 'Tab')) touched.current = true;
     };
-    const kinds = ['pointerdown', 'wheel', 'keydown'] as const;
+    // A wheel alone scrolls the page; it zooms only after one of these.
+    const kinds = ['pointerdown', 'keydown'] as const;
     for (const kind of kinds) container.addEventListener(kind, touch, { passive: true });
     return () => {
       for (const kind of kinds) container.removeEventListener(kind, touch);

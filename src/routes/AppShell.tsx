@@ -105,7 +105,7 @@ export function AppShell() {
                 <NavLink
                   to={item.to}
                   className={({ isActive }) =>
-                    `grid min-h-14 content-center justify-items-center gap-0.5 text-[11.5px] no-underline ${
+                    `grid min-h-14 content-center justify-items-center gap-0.5 text-[11.5px] no-underline max-[359px]:text-[9.5px] ${
                       isActive
                         ? 'font-semibold text-collar shadow-[inset_0_3px_0_var(--collar)]'
                         : 'text-slate'
@@ -120,7 +120,7 @@ export function AppShell() {
           </ul>
         </nav>
       )}
-      <ToastRegion />
+      <ToastRegion high={location.pathname.startsWith('/run/')} />
       <ScrollRestoration />
     </div>
   );

@@ -1,4 +1,4 @@
-import { useEffect } from 'react';
+import { useEffect, useState } from 'react';
 import { isRouteErrorResponse, useRouteError } from 'react-router-dom';
 import { Button } from '#src/components/Button.tsx';
 import { CombMark } from '#src/components/CombMark.tsx';
@@ -6,16 +6,28 @@ import { buttonLook } from '#src/components/buttonLook.ts';
 import { errorWords } from '#src/lib/errorWords.ts';
 
 const reloadedKey = 'furlong.reloadedFor';
+const RETRY_MS = 5_000;
 
 /** A screen that failed to load or to draw. A new release replaces chunks, so that one is reloaded once. */
 export function BrokenScreen() {
   const error = useRouteError();
   const missing = isMissingChunk(error);
+  const [silent, setSilent] = useState(false);
+  const reload = async () => {
+    // Reloading while nothing answers would trade this page for the browser's own.
+    if (!missing || (await serverAnswers())) location.reload();
+    else setSilent(true);
+  };
   useEffect(() => {
-    if (!missing || !navigator.onLine) return;
-    if (sessionStorage.getItem(reloadedKey) === location.href) return;
-    sessionStorage.setItem(reloadedKey, location.href);
-    location.reload();
+    if (!missing || sessionStorage.getItem(reloadedKey) === location.href) return;
+    const retry = async () => {
+      if (!(await serverAnswers())) return;
+      sessionStorage.setItem(reloadedKey, location.href);
+      location.reload();
+    };
+    void retry();
+    const timer = setInterval(() => void retry(), RETRY_MS);
+    return () => clearInterval(timer);
   }, [missing]);
   return (
     <main className="mx-auto grid max-w-xl gap-4 px-5 py-16">
@@ -28,9 +40,19 @@ export function BrokenScreen() {
           ? 'The network may be gone, or Furlong was updated meanwhile. Reload the page.'
           : 'Nothing you saved is lost. Reload the page; if it breaks again, go to the start.'}
       </p>
-      <p className="rounded-card border border-fawn bg-linen px-4 py-3 text-sm">{wordsOf(error)}</p>
+      {!missing && (
+        <p className="rounded-card border border-fawn bg-linen px-4 py-3 text-sm">
+          {wordsOf(error)}
+        </p>
+      )}
+      {silent && missing && (
+        <p role="alert" className="font-semibold">
+          <span aria-hidden="true">▲ </span>Furlong does not answer yet. This page tries again by
+          itself.
+        </p>
+      )}
       <div className="flex flex-wrap gap-2.5">
-        <Button kind="go" onClick={() => location.reload()}>
+        <Button kind="go" onClick={() => void reload()}>
           Reload the page
         </Button>
         {/* A plain link: the router itself may be what broke. */}
@@ -40,6 +62,14 @@ export function BrokenScreen() {
       </div>
     </main>
   );
+}
+
+async function serverAnswers(): Promise<boolean> {
+  try {
+    return (await fetch('/', { method: 'HEAD', cache: 'no-store' })).ok;
+  } catch {
+    return false;
+  }
 }
 
 function isMissingChunk(error: unknown): boolean {

@@ -9,6 +9,7 @@ import { ButtonLink } from '#src/components/ButtonLink.tsx';
 import { DayBoard } from '#src/features/day/DayBoard.tsx';
 import { DayNav } from '#src/features/day/DayNav.tsx';
 import { useDay } from '#src/features/day/useDay.ts';
+import { SetupGuide } from '#src/features/setup/SetupGuide.tsx';
 
 /** `/day/:date`: the board of a date, today when none is named. */
 export function DayScreen() {
@@ -56,7 +57,14 @@ function OneDay({ date, today }: { date: string; today: string }) {
     return (
       <>
         {trouble}
-        <DayBoard day={day} past={past} nav={nav} onDay={onDay} readAgain={refetch} />
+        <DayBoard
+          day={day}
+          past={past}
+          nav={nav}
+          onDay={onDay}
+          readAgain={refetch}
+          whenEmpty={(plain) => (past ? plain : <SetupGuide instead={plain} />)}
+        />
       </>
     );
   return (

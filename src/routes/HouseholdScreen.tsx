@@ -60,8 +60,8 @@ export function HouseholdScreen() {
           </>
         }
       />
-      <div className="grid items-start gap-4 lg:grid-cols-[minmax(0,1.3fr)_minmax(0,1fr)] lg:gap-5">
-        <div className="grid gap-4">
+      <div className="grid grid-cols-1 items-start gap-4 lg:grid-cols-[minmax(0,1.3fr)_minmax(0,1fr)] lg:gap-5">
+        <div className="grid grid-cols-1 gap-4">
           <PetCards householdId={householdId} pets={pets} today={today} mayEdit={mayEdit} />
           <HouseholdVisits
             visits={visits}

@@ -35,6 +35,12 @@ export function HouseholdsScreen() {
       Add a household
     </ButtonLink>
   );
+  const actions = (
+    <>
+      <ButtonLink to="/households/sites">Sites</ButtonLink>
+      {add}
+    </>
+  );
   return (
     <>
       <PageHeader
@@ -43,7 +49,7 @@ export function HouseholdsScreen() {
           found.data &&
           writeCount(found.data.total, text ? 'match' : 'household', text ? 'matches' : undefined)
         }
-        actions={add}
+        actions={actions}
       />
       <SearchBox
         label="Search by name, pet, street or phone"

@@ -14,6 +14,7 @@ import { PetCautions } from '#src/features/households/PetCautions.tsx';
 import { PetStyleCard } from '#src/features/styles/PetStyleCard.tsx';
 import { StyleVersions } from '#src/features/styles/StyleVersions.tsx';
 import { writeWeight, type WeightUnit } from '#src/lib/measures.ts';
+import { breedWords } from '#src/strips/petWords.ts';
 import { FailedQuery } from './FailedQuery.tsx';
 import { useKnownPet } from './useKnownPet.ts';
 
@@ -86,7 +87,7 @@ export function PetScreen() {
 function PetFactWords({ pet, today, unit }: { pet: Pet; today: string; unit: WeightUnit }) {
   const age = pet.birthYear === null ? null : Number(today.slice(0, 4)) - pet.birthYear;
   const words = [
-    pet.breedName,
+    breedWords(pet.breedName),
     pet.weightGrams === null ? null : writeWeight(pet.weightGrams, unit),
     age === null ? null : age < 1 ? 'under a year' : age === 1 ? '1 year' : `${age} years`,
     pet.temperament,

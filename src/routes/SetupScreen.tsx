@@ -2,6 +2,7 @@ import { lazy, Suspense, type ComponentType } from 'react';
 import { useParams } from 'react-router-dom';
 import { useCan, useSession } from '#src/api/sessionStore.ts';
 import { Loading } from '#src/components/Loading.tsx';
+import { NextSetupStep } from '#src/features/setup/SetupGuide.tsx';
 import { PageHeader } from '#src/components/PageHeader.tsx';
 import { TabLinks } from '#src/components/TabLinks.tsx';
 import { NotFoundScreen } from './NotFoundScreen.tsx';
@@ -76,6 +77,7 @@ export function SetupScreen() {
   return (
     <>
       <PageHeader title="Setup" dim={business.name} />
+      <NextSetupStep at={`/setup/${current.key}`} />
       <TabLinks
         label="Setup"
         tabs={shown.map(({ key, words }) => ({ to: `/setup/${key}`, words }))}

@@ -52,21 +52,20 @@ export const StopMark = memo(function StopMark(props: StopMarkProps) {
       >
         <StopGround {...props} x={x} width={width} />
         {isVisit ? (
-          <>
-            <StepTowers
-              towers={joinNarrow(stop.towers, 5 / axis.pxPerSecond)}
-              baseline={row.baseline}
-              xOf={(seconds) => xOf(axis, seconds)}
-              heightOf={(permille) => towerHeight(row, permille)}
-              faded={stop.state === 'done'}
-              letters={axis.pxPerSecond * 3600 > 180}
-            />
-            <StopLabel {...props} x={x} width={width} />
-          </>
+          <StepTowers
+            towers={joinNarrow(stop.towers, 5 / axis.pxPerSecond)}
+            baseline={row.baseline}
+            xOf={(seconds) => xOf(axis, seconds)}
+            heightOf={(permille) => towerHeight(row, permille)}
+            faded={stop.state === 'done'}
+            letters={axis.pxPerSecond * 3600 > 180}
+          />
         ) : (
           <PauseMark stop={stop} row={row} axis={axis} />
         )}
       </g>
+      {/* Outside too: cut to fit, its words are not those the button is called by. */}
+      {isVisit && <StopLabel {...props} x={x} width={width} />}
     </g>
   );
 });
@@ -121,7 +120,7 @@ function StopLabel(props: StopMarkProps & { x: number; width: number }) {
   const color = stop.atRisk || stop.state === 'failed' ? 'var(--rosette)' : 'var(--slate)';
   const shifted = !stop.atRisk && Math.abs(props.shiftSeconds) >= 90 && stop.state === 'ahead';
   return (
-    <g pointerEvents="none">
+    <g pointerEvents="none" aria-hidden="true">
       {pinned && (
         <path
           d={`M${x + 4.5} ${y - 10}a3.2 3.2 0 1 1 0 6.4a3.2 3.2 0 1 1 0 -6.4M${x + 4.5} ${y - 3.6}V${y + 1}`}

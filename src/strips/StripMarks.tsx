@@ -13,7 +13,13 @@ export function HourLines({ axis, heightPx }: { axis: TimeAxis; heightPx: number
         return (
           <g key={tick.seconds}>
             <line x1={x} x2={x} y1={AXIS_HEIGHT} y2={heightPx - 4} stroke="var(--linen)" />
-            <text x={x} y={17} fontSize={12} textAnchor="middle" fill="var(--slate)">
+            <text
+              x={x < 16 ? 0 : x}
+              y={17}
+              fontSize={12}
+              textAnchor={x < 16 ? 'start' : 'middle'}
+              fill="var(--slate)"
+            >
               {tick.words}
             </text>
           </g>

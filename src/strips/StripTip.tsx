@@ -52,7 +52,7 @@ function TowerWords({ stop, tower }: { stop: StripStop; tower: Tower }) {
               <span className="shrink-0 text-slate">{writeSpan(step.seconds)}</span>
             )}
           </p>
-          {step.reasons.map((reason) => (
+          {step.reasons.filter(isWeighty).map((reason) => (
             <p key={reason.text} className="flex justify-between gap-3 text-slate">
               <span>{reason.text}</span>
               <span className="shrink-0">{signedMinutes(reason.deltaSeconds)}</span>
@@ -98,11 +98,19 @@ function StopTip({ day, stop }: { day: DayClock; stop: StripStop }) {
           {stop.drive.rough && ', rough: no road answer'}
         </p>
       )}
+      {stop.kind === 'visit' && (
+        <p className="mt-1 text-slate">Keys: D opens it, Enter picks it up.</p>
+      )}
       {stop.wait && (
         <p className="text-slate">waits {writeSpan(stop.wait.toSeconds - stop.wait.fromSeconds)}</p>
       )}
     </>
   );
+}
+
+/** Less than half a minute would read "+0 min". */
+function isWeighty({ deltaSeconds }: { deltaSeconds: number }): boolean {
+  return Math.abs(deltaSeconds) >= 30;
 }
 
 function signedMinutes(seconds: number): string {

@@ -61,6 +61,21 @@ describe('undo and redo', () => {
     expect((await redo()).body.log[0]!.words).toBe('Redone: Rook to Otter, first');
   });
 
+  it('never takes back a move the screen has not shown, nor two for a double click', async () => {
+    const { otter, plover, place, client, date } = await undoableDay();
+    const shown = (await place('Rook', otter)).undo!;
+    const newer = await place('Wren', plover);
+    const body = { changeId: shown.changeId };
+    const late = await client.call(undoMove, { params: { date }, body });
+    expect(late).toMatchObject({ status: 409, error: { code: 'versionMoved' } });
+    expect(late.body).toMatchObject({ day: { undo: newer.undo } });
+    const again = { changeId: newer.undo!.changeId };
+    const clicks = [1, 2].map(() => client.call(undoMove, { params: { date }, body: again }));
+    expect((await Promise.all(clicks)).map(({ status }) => status).sort()).toEqual([200, 409]);
+    const redo = await client.call(redoMove, { params: { date }, body });
+    expect(redo.status).toBe(409);
+  });
+
   it('forgets what was taken back once another move is made', async () => {
     const { otter, plover, place, undo, redo, read } = await undoableDay();
     await place('Rook', otter);
@@ -69,7 +84,7 @@ describe('undo and redo', () => {
     expect((await redo()).status).toBe(409);
     // After taking the newer move back, that one comes again: not the one given up before it.
     await undo();
-    expect((await read()).redo).toEqual({ words: 'Wren to Plover, first' });
+    expect((await read()).redo).toMatchObject({ words: 'Wren to Plover, first' });
     expect(ordersOf((await redo()).body)).toMatchObject({ Otter: [], Plover: ['Wren'] });
     expect((await redo()).status).toBe(409);
   });

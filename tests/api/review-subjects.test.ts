@@ -2,6 +2,7 @@ import { app, useApp } from '../support/useApp.ts';
 import { afterEach, describe, expect, it } from 'vitest';
 import { listShifts, removeShift, setShift } from '#shared/api/groomers.ts';
 import { openGate, updateHousehold } from '#shared/api/households.ts';
+import { listGateOpenings, removeMember } from '#shared/api/members.ts';
 import { cancelVisit, createVisit } from '#shared/api/visits.ts';
 import { clock } from '#server/clock.ts';
 import { inBusiness } from '#server/db/database.ts';
@@ -40,6 +41,32 @@ describe('a gate code', () => {
     setClock(new Date(Date.parse(date) - 86_400_000).toISOString().slice(0, 10), '12:00');
     const early = await work.member(['groomer'], null);
     expect((await open(early)).error.code).toBe('notAllowed');
+  });
+});
+
+describe('who leaves', () => {
+  it('is told with the households whose codes they have seen, as long as those have one', async () => {
+    const work = await workDay(app, [{ petName: 'Rook' }, { petName: 'Wren' }]);
+    const { client, groomers } = work;
+    const [rook, wren] = ['Rook', 'Wren'].map((pet) => work.visits[pet]!.household.id);
+    const setCode = (householdId: string, gateCode: string | null) =>
+      client.must(updateHousehold, { params: { householdId }, body: { gateCode } });
+    await setCode(rook!, '4711');
+    await setCode(wren!, '1111');
+    const mika = await work.member(['groomer'], groomers[0]!.id);
+    for (const householdId of [rook!, wren!, rook!])
+      await mika.must(openGate, { params: { householdId } });
+    const params = { userId: mika.session!.user.id };
+    const names = async () =>
+      (await client.must(listGateOpenings, { params })).map((one) => one.householdName);
+    expect(await names()).toEqual(['The Rooks', 'The Wrens']);
+    await client.must(removeMember, { params });
+    expect(await names()).toEqual(['The Rooks', 'The Wrens']);
+    await setCode(rook!, null);
+    expect(await names()).toEqual(['The Wrens']);
+    const stranger = (await buildBusiness(app, work.date)).client;
+    expect((await stranger.call(listGateOpenings, { params })).status).toBe(404);
+    expect((await mika.call(listGateOpenings, { params })).status).toBe(401);
   });
 });
 

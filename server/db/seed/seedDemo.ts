@@ -85,8 +85,10 @@ async function loadRhythms(businessId: string, date: string): Promise<Rhythm[]> 
     Pet.findAll({ where: { active: true }, order: [['name', 'ASC']] }),
   ]);
   const styleOf = await stylesOf(pets);
-  return households.map((household) => {
+  return households.flatMap((household) => {
     const own = pets.filter((pet) => pet.householdId === household.id);
+    // Somebody trying the demo may have added a household and no pet yet.
+    if (own.length === 0) return [];
     const { forecast } = forecastOf(own, business!, date, new Map(), styleOf);
     const { work, setUpSeconds, cleanDownSeconds } = forecast;
     return {

@@ -2,7 +2,7 @@ import jwt from 'jsonwebtoken';
 import { newId } from '#server/db/newId.ts';
 import { keyRing } from '#server/env.ts';
 import { Session } from '#server/models/Session.ts';
-import { hashToken, makeToken } from '#server/services/secrets/tokens.ts';
+import { hashToken, keyFor, makeToken } from '#server/services/secrets/tokens.ts';
 
 export const accessSeconds = 15 * 60;
 /** "Sign-in lasts the shift", and then some: a month without use ends it. */
@@ -54,7 +54,7 @@ export function signAccess(
   const iat = Math.floor(now.getTime() / 1000);
   const access = jwt.sign(
     { sid: claims.sessionId, gen: claims.generation, iat, exp: iat + accessSeconds },
-    key.secret,
+    keyFor(key.secret, 'access'),
     { algorithm: 'HS256', keyid: key.id },
   );
   return { access, accessEndsAt: new Date((iat + accessSeconds) * 1000) };
@@ -70,7 +70,7 @@ export function readAccess(
     const header = jwt.decode(token, { complete: true })?.header;
     const key = keyRing().keys.find((one) => one.id === header?.kid);
     if (!key) return null;
-    const claims = jwt.verify(token, key.secret, {
+    const claims = jwt.verify(token, keyFor(key.secret, 'access'), {
       algorithms: ['HS256'],
       clockTimestamp: Math.floor(now.getTime() / 1000),
     }) as { sid: string; gen: number; exp: number };

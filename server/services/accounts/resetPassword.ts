@@ -12,14 +12,22 @@ import { hashPassword } from './passwords.ts';
 
 const validMs = 60 * 60 * 1000;
 
-/** Sends a letter when the address is known; says nothing either way. */
+/**
+ * Sends a letter when the address is known, and says nothing either way: the work is not waited for,
+ * because the time it takes would tell. Throws 'notReady' when no mail can go, for every address.
+ */
 export async function requestPasswordReset(
   email: string,
   origin: string,
   now: Date,
 ): Promise<void> {
-  // Asked first, so that a server without mail says the same of every address.
   currentMailer();
+  sendReset(email, origin, now).catch((error: unknown) =>
+    log.error({ err: error }, 'a reset letter did not go out'),
+  );
+}
+
+async function sendReset(email: string, origin: string, now: Date): Promise<void> {
   const user = await User.findOne({ where: { email } });
   if (!user) return;
   const token = makeToken();
@@ -28,15 +36,14 @@ export async function requestPasswordReset(
     tokenHash: hashToken(token),
     expiresAt: new Date(now.getTime() + validMs),
   });
-  // Not waited for: the time a mail server takes would tell which addresses are known.
-  sendLetter(
+  await sendLetter(
     passwordResetLetter({
       to: user.email,
       name: user.name,
       url: `${origin}/reset/${token}`,
       validMinutes: validMs / 60_000,
     }),
-  ).catch((error: unknown) => log.error({ err: error }, 'a reset letter did not go out'));
+  );
 }
 
 /** A link works once and for an hour; the person's other links and every sign-in end. */

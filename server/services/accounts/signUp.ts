@@ -1,8 +1,10 @@
 import { inBusiness, inTransaction } from '#server/db/database.ts';
 import { newId } from '#server/db/newId.ts';
+import { AppError } from '#server/errors.ts';
 import { Business } from '#server/models/Business.ts';
 import { Membership } from '#server/models/Membership.ts';
 import { User } from '#server/models/User.ts';
+import { currentTextRules } from '#server/services/texts/textRules.ts';
 import { createUser, knownEmail } from './createUser.ts';
 import { openSession, type SessionTokens } from './openSession.ts';
 import { hashPassword, passwordFits } from './passwords.ts';
@@ -24,6 +26,7 @@ export async function signUp(
   input: SignUpInput,
   now: Date,
 ): Promise<SessionTokens & { businessId: string }> {
+  await refuseWhileClosed();
   const known = await User.findOne({ where: { email: input.email } });
   if (known && !(await passwordFits(input.password, known.passwordHash))) throw knownEmail();
   const passwordHash = known ? known.passwordHash : await hashPassword(input.password);
@@ -46,4 +49,14 @@ export async function signUp(
     );
     return { ...(await openSession(user.id, businessId, now)), businessId };
   });
+}
+
+/** A new business would text on the account of whoever runs this server: that person lets it in. */
+async function refuseWhileClosed(): Promise<void> {
+  const rules = currentTextRules();
+  if (!rules || rules.signUpsOpen || (await Business.count()) === 0) return;
+  throw new AppError(
+    'notAllowed',
+    'This server takes no new businesses by itself. Ask the person who runs it to open sign-up.',
+  );
 }

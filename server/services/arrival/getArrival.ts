@@ -24,6 +24,7 @@ import { sentVersion } from '#server/services/runs/getRun.ts';
 import { hashToken } from '#server/services/secrets/tokens.ts';
 import { findVisitFacts } from '#server/services/visits/findVisitFacts.ts';
 import type { VisitFacts } from '#server/services/visits/visitFacts.ts';
+import { doorRange } from './doorRange.ts';
 import { findVanPlace } from './findVanPlace.ts';
 
 /** What a link shows: one household's facts and nobody else's. Throws linkUsedUp once expired. */
@@ -101,6 +102,7 @@ function arrivalFacts(
   const clock = (seconds: number) => formatWall(problem, seconds);
   const at = (wall: number) => wallToSeconds(problem.date, problem.timeZone, wall);
   const state = stateOf(facts, stop);
+  const door = stop && doorRange(problem, stop);
   return {
     state,
     businessName: business.name,
@@ -112,8 +114,8 @@ function arrivalFacts(
       facts.promise &&
       wallRange(problem, at(facts.promise.startMinutes), at(facts.promise.endMinutes)),
     arrival:
-      stop && (state === 'onTheWay' || state === 'planned')
-        ? wallRange(problem, stop.arriveEarlySeconds, stop.arriveLateSeconds)
+      door && (state === 'onTheWay' || state === 'planned')
+        ? wallRange(problem, door.fromSeconds, door.toSeconds)
         : null,
     arrivedAt: stop && (state === 'arrived' || state === 'done') ? clock(stop.arriveSeconds) : null,
     doneAt: stop && state === 'done' ? clock(stop.endSeconds) : null,

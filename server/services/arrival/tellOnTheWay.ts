@@ -7,6 +7,7 @@ import type { Run } from '#server/models/Run.ts';
 import { sentVersion } from '#server/services/runs/getRun.ts';
 import { runTimes } from '#server/services/runs/runTimes.ts';
 import { hashToken, makeToken } from '#server/services/secrets/tokens.ts';
+import { doorRange } from './doorRange.ts';
 import { queueText } from '#server/services/texts/queueText.ts';
 import { findVisitFacts } from '#server/services/visits/findVisitFacts.ts';
 
@@ -28,6 +29,7 @@ export async function tellOnTheWay(input: {
   const facts = await findVisitFacts(stop.visitId);
   const times = runTimes(version, happened, now).stops.find((one) => one.stopId === visitId);
   if (!facts || !times || facts.visit.status === 'cancelled') return;
+  const door = doorRange(version.problem, times);
   const token = makeToken();
   const link = `${origin}/a/${token}`;
   const groomer = await Groomer.findByPk(run.groomerId);
@@ -39,12 +41,12 @@ export async function tellOnTheWay(input: {
     fields: {
       groomerName: groomer!.name,
       petNames: facts.pets.map(({ pet }) => pet.name),
-      arrival: wallRange(version.problem, times.arriveEarlySeconds, times.arriveLateSeconds),
+      arrival: wallRange(version.problem, door.fromSeconds, door.toSeconds),
       link,
     },
     now,
-    // Its words stop being true once the van should have been there; a text after arrival helps nobody.
-    until: new Date(secondsToInstant(version.problem.dayStartUtc, times.arriveLateSeconds)),
+    // Its words stop being true once the door should be open; a text after that helps nobody.
+    until: new Date(secondsToInstant(version.problem.dayStartUtc, door.toSeconds)),
   });
   // Told before: the link the household already has stays the one.
   if (!text.body.includes(link)) return;

@@ -8,7 +8,7 @@ import type { Actor } from '#server/services/accounts/Actor.ts';
 import { type LoadedDay, loadDay } from './loadDay.ts';
 import { lockDay } from './lockDay.ts';
 import { logChange } from './logChange.ts';
-import { makeMove } from './moveVisit.ts';
+import { type Conflict, makeMove } from './moveVisit.ts';
 import { savePlan } from './savePlan.ts';
 
 /** What undo and redo would do next. */
@@ -51,12 +51,21 @@ export async function forgetMoves(day: Day, visitId: string, now: Date): Promise
       await change.update({ undoneAt: now });
 }
 
-/** Undo is the inverse move on the day as it is now, or a reason why not. */
-export async function undoMove(actor: Actor, date: string, now: Date): Promise<LoadedDay> {
+/**
+ * Undo is the inverse move on the day as it is now, or a reason why not. With `changeId`, a conflict
+ * when another change came after the one the screen offered: nobody takes back what they have not seen.
+ */
+export async function undoMove(
+  actor: Actor,
+  date: string,
+  changeId: string | undefined,
+  now: Date,
+): Promise<LoadedDay | Conflict> {
   const day = await lockDay(date);
   const { undo } = await undoState(day);
-  if (!undo) throw new AppError('refusedMove', 'There is nothing to undo on this day.');
   const loaded = await loadDay(actor.businessId, date, now, { lock: true });
+  if (changeId && undo?.id !== changeId) return { conflict: true, day: loaded };
+  if (!undo) throw new AppError('refusedMove', 'There is nothing to undo on this day.');
   const next = makeMoveAgain(loaded, undo, inverseMove(undo.before!, undo.after!, undo.move!));
   await undo.update({ undoneAt: now });
   await logChange(day, {
@@ -69,12 +78,18 @@ export async function undoMove(actor: Actor, date: string, now: Date): Promise<L
   return savePlan(loaded, next);
 }
 
-/** Makes the move again that was taken back last. */
-export async function redoMove(actor: Actor, date: string, now: Date): Promise<LoadedDay> {
+/** Makes the move again that was taken back last; `changeId` as for undo. */
+export async function redoMove(
+  actor: Actor,
+  date: string,
+  changeId: string | undefined,
+  now: Date,
+): Promise<LoadedDay | Conflict> {
   const day = await lockDay(date);
   const { redo } = await undoState(day);
-  if (!redo) throw new AppError('refusedMove', 'There is nothing to redo on this day.');
   const loaded = await loadDay(actor.businessId, date, now, { lock: true });
+  if (changeId && redo?.id !== changeId) return { conflict: true, day: loaded };
+  if (!redo) throw new AppError('refusedMove', 'There is nothing to redo on this day.');
   const next = makeMoveAgain(loaded, redo, redo.move!);
   await redo.update({ undoneAt: null });
   await logChange(day, { actor, now, kind: 'redo', words: `Redone: ${redo.words}` });

@@ -27,7 +27,7 @@ export async function loadHappened(
 }
 
 /** A stored row as the tap the phone made. */
-export function tapOf(row: RunEvent): TapEvent {
+function tapOf(row: RunEvent): TapEvent {
   return {
     id: row.id,
     deviceId: row.deviceId,

@@ -34,4 +34,5 @@ it('makes 22-letter tokens and signs for one purpose', () => {
   expect(signatureFits('csrf', 'session-1', signature)).toBe(true);
   expect(signatureFits('callback', 'session-1', signature)).toBe(false);
   expect(signatureFits('csrf', 'session-2', signature)).toBe(false);
+  expect(signatureFits('csrf', 'session-1', 'é'.repeat(signature.length))).toBe(false);
 });

@@ -1,4 +1,4 @@
-import { createHash, createHmac, randomBytes, timingSafeEqual } from 'node:crypto';
+import { createHash, createHmac, hkdfSync, randomBytes, timingSafeEqual } from 'node:crypto';
 import { keyRing } from '#server/env.ts';
 
 /** 128 random bits as 22 url-safe letters. Only its hash is stored. */
@@ -13,22 +13,26 @@ export function hashToken(token: string): string {
 
 /** A keyed signature for values that come back to us: CSRF tokens, callback ids. */
 export function signValue(purpose: string, value: string): string {
-  return createHmac('sha256', keyRing().keys[0]!.secret)
-    .update(`${purpose}\n${value}`)
-    .digest('base64url')
-    .slice(0, 32);
+  return signWith(keyRing().keys[0]!.secret, purpose, value);
 }
 
 /** True when any key of the ring made the signature. */
 export function signatureFits(purpose: string, value: string, signature: string): boolean {
   return keyRing().keys.some(({ secret }) => {
-    const wanted = createHmac('sha256', secret)
-      .update(`${purpose}\n${value}`)
-      .digest('base64url')
-      .slice(0, 32);
-    return (
-      wanted.length === signature.length &&
-      timingSafeEqual(Buffer.from(wanted), Buffer.from(signature))
-    );
+    const wanted = Buffer.from(signWith(secret, purpose, value));
+    const given = Buffer.from(signature);
+    return wanted.length === given.length && timingSafeEqual(wanted, given);
   });
+}
+
+/** A key of the ring for one purpose (HKDF, RFC 5869), so that no two uses share one. */
+export function keyFor(secret: Buffer, purpose: string): Buffer {
+  return Buffer.from(hkdfSync('sha256', secret, '', purpose, 32));
+}
+
+function signWith(secret: Buffer, purpose: string, value: string): string {
+  return createHmac('sha256', keyFor(secret, purpose))
+    .update(value)
+    .digest('base64url')
+    .slice(0, 32);
 }

@@ -49,7 +49,7 @@ export async function removePlace(placeId: string): Promise<void> {
   await place.destroy();
 }
 
-export async function needPlace(placeId: string): Promise<Place> {
+async function needPlace(placeId: string): Promise<Place> {
   const place = await Place.findByPk(placeId);
   if (!place) throw notFound('place');
   return place;

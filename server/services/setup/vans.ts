@@ -48,7 +48,7 @@ export async function retireVan(vanId: string, today: string): Promise<void> {
   await van.update({ active: false });
 }
 
-export async function needVan(vanId: string): Promise<Van> {
+async function needVan(vanId: string): Promise<Van> {
   const van = await Van.findByPk(vanId);
   if (!van) throw notFound('van');
   return van;

@@ -3,6 +3,7 @@ import { closeMail, openMail } from '#server/mail/openMail.ts';
 import { carrierSettings } from '#server/sms/carrierSettings.ts';
 import { startFakeCarrier, type FakeCarrier } from '#server/sms/fake/startFakeCarrier.ts';
 import { closeGateway, openGateway } from '#server/sms/gateway.ts';
+import { readTextRules, setTextRules } from './textRules.ts';
 
 let fake: FakeCarrier | null = null;
 
@@ -26,6 +27,7 @@ export async function openCarriers(asked: {
   else if (fakesActive()) openMail({ smtpUrl: null, from, folder });
 
   const real = carrierSettings(source, env.publicUrl);
+  setTextRules(real && readTextRules(source));
   if (real) openGateway({ ...real, apiOrigin: null });
   else if (fakesActive()) {
     fake = await startFakeCarrier({
@@ -41,6 +43,7 @@ export async function openCarriers(asked: {
     async close() {
       closeMail();
       closeGateway();
+      setTextRules(null);
       await fake?.close();
       fake = null;
     },

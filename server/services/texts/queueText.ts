@@ -1,4 +1,4 @@
-import { UniqueConstraintError } from 'sequelize';
+import { Op, UniqueConstraintError } from 'sequelize';
 import { notFound } from '#server/errors.ts';
 import { Business } from '#server/models/Business.ts';
 import { Household } from '#server/models/Household.ts';
@@ -8,6 +8,7 @@ import { currentGateway } from '#server/sms/gateway.ts';
 import { renderText, type TextFields, type TextKind } from '#shared/texts/renderText.ts';
 import { staleAt } from '#shared/texts/staleAt.ts';
 import { senderPhoneOf } from './senderPhoneOf.ts';
+import { currentTextRules } from './textRules.ts';
 
 export interface QueueTextInput<Kind extends TextKind> {
   householdId: string;
@@ -39,7 +40,7 @@ export async function queueText<Kind extends TextKind>(
   const business = (await Business.findByPk(household.businessId))!;
   const sender = (await senderPhoneOf(business)) ?? '';
   const recipient = household.phone ?? '';
-  const reason = await whyQuiet(household, sender);
+  const reason = await whyQuiet(household, sender, now);
   const fields = { ...input.fields, businessName: business.name } as unknown as TextFields[Kind];
   const state = {
     sender,
@@ -72,11 +73,28 @@ async function findKnown(key: Key, lock: boolean): Promise<OutboxText | null> {
   return key.visitId === null ? null : OutboxText.findOne({ where: { ...key }, lock });
 }
 
-async function whyQuiet(household: Household, sender: string): Promise<string | null> {
+async function whyQuiet(household: Household, sender: string, now: Date): Promise<string | null> {
   if (household.phone === null) return 'No phone number: call or write instead.';
   if (!household.textsConsent) return 'No consent to texts: call instead.';
   if (!currentGateway()) return 'No SMS carrier is connected.';
   if (sender === '') return 'The business has no number to text from.';
   const optOut = await OptOut.findOne({ where: { sender, phone: household.phone } });
-  return optOut ? 'This phone ended texts with STOP: call instead.' : null;
+  return optOut
+    ? 'This phone ended texts with STOP: call instead.'
+    : againstRules(household.phone, now);
+}
+
+/** With a real carrier: other countries, and more texts than a day's. The count may be out by a few. */
+async function againstRules(phone: string, now: Date): Promise<string | null> {
+  const rules = currentTextRules();
+  if (!rules) return null;
+  if (!rules.prefixes.some((prefix) => phone.startsWith(prefix)))
+    return 'Texts to this country are not allowed here: call instead.';
+  const since = new Date(now.getTime() - 86_400_000);
+  const sent = await OutboxText.count({
+    where: { createdAt: { [Op.gt]: since }, status: { [Op.ne]: 'notSent' } },
+  });
+  return sent < rules.perDay
+    ? null
+    : `All ${rules.perDay} texts the business may send in a day are used: call instead.`;
 }

@@ -64,7 +64,7 @@ export function ArrivalPage({ token, given }: { token: string; given: Arrival | 
         <p className="mt-3 text-[15px] leading-snug text-slate">
           {arrival.promiseWords && `${arrival.promiseWords}. `}
           <ShapeMark shape={arrival.shape} /> {arrival.groomerName} works in van {arrival.vanName}.{' '}
-          {isAhead(arrival) && 'The van is shown only while it is on its way to you.'}
+          {vanWords(arrival)}
         </p>
       </main>
       <footer className="sticky bottom-0 bg-cream py-3 pb-[calc(12px+env(safe-area-inset-bottom))]">
@@ -110,6 +110,15 @@ function Opening({ silent }: { silent: boolean }) {
 
 function isAhead({ state }: Arrival): boolean {
   return state === 'planned' || state === 'onTheWay';
+}
+
+/** Others' doors are nobody's business: the van shows only a few minutes after the last one. */
+function vanWords({ state, van }: Arrival): string {
+  if (state === 'onTheWay' && !van)
+    return 'The van shows here on a map once it is a few minutes away from its last stop.';
+  return state === 'planned' || state === 'onTheWay'
+    ? 'The van is shown only while it is on its way to you.'
+    : '';
 }
 
 /** A planned visit may be another day's; on the way and at work are today's. */

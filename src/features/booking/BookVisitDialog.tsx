@@ -22,6 +22,7 @@ import { emptyToNull } from '#src/lib/emptyToNull.ts';
 import { useSubmit } from '#src/lib/useSubmit.ts';
 import { useZodForm } from '#src/lib/useZodForm.ts';
 import { writeDate } from '#src/lib/words.ts';
+import { breedWords } from '#src/strips/petWords.ts';
 
 type Binds = 'arrival' | 'stay';
 
@@ -93,7 +94,7 @@ export function BookVisitDialog({
           choices={pets.map((pet) => ({
             value: pet.id,
             label: pet.name,
-            hint: `${pet.breedName} · ${pet.styleName}`,
+            hint: `${breedWords(pet.breedName)} · ${pet.styleName}`,
           }))}
           listClassName="flex flex-wrap gap-x-8"
         />

@@ -17,6 +17,7 @@ import { moveWords, targetWords } from './moveWords.ts';
 import type { ProposalView } from './ProposalCard.tsx';
 import { StripsCard } from './StripsCard.tsx';
 import { summaryWords } from './summaryWords.ts';
+import { unsentWords } from './unsentWords.ts';
 import { useBoardActions } from './useBoardActions.ts';
 import { useBoardMoves } from './useBoardMoves.ts';
 import { useDayChange, type DayChange } from './useDayChange.ts';
@@ -35,12 +36,15 @@ export function DayBoard({
   nav,
   onDay,
   readAgain,
+  whenEmpty = (plain) => plain,
 }: {
   day: Day;
   past: boolean;
   nav: ReactNode;
   onDay: (day: Day) => void;
   readAgain: () => Promise<unknown>;
+  /** What stands where the strips would, on a day without vans. */
+  whenEmpty?: (plain: ReactNode) => ReactNode;
 }) {
   const { business } = useSession();
   const can = {
@@ -154,9 +158,10 @@ export function DayBoard({
       </div>
       <DaySummary
         words={summaryWords(shown.plan, shown.times, business.distanceUnit, past)}
-        dim={past ? 'this day is over' : null}
+        dim={past ? 'this day is over' : unsentWords(day, shown.times, nowSeconds)}
       />
-      {empty && <EmptyDay past={past} notPlaced={plan.notPlaced.length} canSetUp={can.setUp} />}
+      {empty &&
+        whenEmpty(<EmptyDay past={past} notPlaced={plan.notPlaced.length} canSetUp={can.setUp} />)}
       {!empty && narrow && (
         <Tabs label="Day" tabs={phoneTabs} current={tab} onChange={setTab}>
           <div className="mt-3">

@@ -7,7 +7,11 @@ export function DayLog({ day }: { day: Day }) {
   if (day.log.length === 0) return null;
   return (
     <Card title="Changes of this day">
-      <ol className="rows max-h-64 overflow-y-auto text-[15px]">
+      <ol
+        className="rows max-h-64 overflow-y-auto text-[15px]"
+        tabIndex={0}
+        aria-label="Changes, latest first"
+      >
         {day.log
           .toSorted((a, b) => b.at.localeCompare(a.at))
           .map((entry) => (

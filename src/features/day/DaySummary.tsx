@@ -18,7 +18,9 @@ export function DaySummary({ words, dim }: { words: SummaryWords; dim?: string |
             </span>
           </Fragment>
         ))}
-        {dim && <span className="ml-2 rounded-md bg-linen px-2 py-0.5 text-sm">{dim}</span>}
+        {dim && (
+          <span className="ml-2 inline-block rounded-md bg-linen px-2 py-0.5 text-sm">{dim}</span>
+        )}
       </p>
     </div>
   );

@@ -57,8 +57,9 @@ export function NotPlacedCard({
       >
         {visitIds.length === 0 && (
           <p className="text-slate">
-            Every visit of the day is on a van.
-            {canMove && ' Drop one here to take it off.'}
+            {problem.visits.length === 0
+              ? 'No visit is booked on this day.'
+              : `Every visit of the day is on a van.${canMove ? ' Drop one here to take it off.' : ''}`}
           </p>
         )}
         <ul className="rows">
@@ -158,10 +159,10 @@ function NotPlacedRow({
   );
 }
 
-/** A visit that fits as things are has no reason, only nobody who placed it. */
+/** No rule keeps it off a van, yet others' promises may: the trial shows them. */
 function whyWords(reason: NotPlacedReason, vanName: string | undefined): string {
   return reason.smallest?.rule === 'fits' && vanName
-    ? `Fits ${vanName} as the day stands.`
+    ? `Nothing forbids ${vanName}: try it to see what it changes.`
     : reason.words;
 }
 

@@ -69,7 +69,7 @@ export function ProposalCard({
           <p className="pt-2 text-sm text-slate">
             {movedCount === 0
               ? 'No visit moves.'
-              : `${movedCount} ${movedCount === 1 ? 'visit has' : 'visits have'} another van or another one before, drawn with a dashed edge.`}
+              : `${movedCount} ${movedCount === 1 ? 'visit changes its van or place' : 'visits change their van or place'}, drawn with a dashed edge.`}
           </p>
           <Segmented
             label="Strips and map show"

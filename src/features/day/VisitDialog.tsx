@@ -2,7 +2,6 @@ import { useState } from 'react';
 import { Link } from 'react-router-dom';
 import type { VisitCard } from '#shared/api/visits.ts';
 import type { DayProblem, StopTimes, VisitFact } from '#shared/schedule/types.ts';
-import { formatWall, formatWallRange } from '#shared/time/formatWall.ts';
 import { Button } from '#src/components/Button.tsx';
 import { Chip } from '#src/components/Chip.tsx';
 import { Dialog } from '#src/components/Dialog.tsx';
@@ -10,11 +9,10 @@ import { writeWeight, type WeightUnit } from '#src/lib/measures.ts';
 import { writeSpan } from '#src/lib/words.ts';
 import { PetStrip } from '#src/strips/PetStrip.tsx';
 import { breedWords } from '#src/strips/petWords.ts';
-import { percentWords } from '#src/strips/stopWords.ts';
 import { CancelVisit } from './CancelVisit.tsx';
 import { EditVisit } from './EditVisit.tsx';
-import { SAFE_PERMILLE } from './stripsOf.ts';
 import { VisitSteps } from './VisitSteps.tsx';
+import { VisitTimes } from './VisitTimes.tsx';
 
 /** One visit in full: who, when, the pets with their cautions, the minutes and why; and what to do. */
 export function VisitDialog({
@@ -65,34 +63,37 @@ export function VisitDialog({
       />
     );
   const movable = canMove && stays === null;
+  const editable = canEdit && card.status === 'booked';
   return (
     <Dialog
       title={fact.label}
       wide
       onClose={onClose}
       actions={
-        <>
-          {movable && (
-            <Button kind="go" onClick={onMove}>
-              Move …
-            </Button>
-          )}
-          {movable && vanName && (
-            <Button onClick={() => onPin(!pinned)} busy={pinning}>
-              {pinned ? `Free from ${vanName}` : `Pin to ${vanName}`}
-            </Button>
-          )}
-          {canEdit && card.status === 'booked' && (
-            <>
-              <Button onClick={() => setPart('edit')}>Change promise or note</Button>
-              {stays === null && (
-                <Button kind="danger" onClick={() => setPart('cancel')}>
-                  Cancel the visit
-                </Button>
-              )}
-            </>
-          )}
-        </>
+        (movable || editable) && (
+          <>
+            {movable && (
+              <Button kind="go" onClick={onMove}>
+                Move …
+              </Button>
+            )}
+            {movable && vanName && (
+              <Button onClick={() => onPin(!pinned)} busy={pinning}>
+                {pinned ? `Free from ${vanName}` : `Pin to ${vanName}`}
+              </Button>
+            )}
+            {editable && (
+              <>
+                <Button onClick={() => setPart('edit')}>Change promise or note</Button>
+                {stays === null && (
+                  <Button kind="danger" onClick={() => setPart('cancel')}>
+                    Cancel the visit
+                  </Button>
+                )}
+              </>
+            )}
+          </>
+        )
       }
     >
       <p className="-mt-1 text-slate">
@@ -114,7 +115,7 @@ export function VisitDialog({
           'No phone noted'
         )}
       </p>
-      <Times problem={problem} fact={fact} stop={stop} vanName={vanName} pinned={pinned} />
+      <VisitTimes problem={problem} fact={fact} stop={stop} vanName={vanName} pinned={pinned} />
       {stays && <p className="mt-1 text-slate">{stays}</p>}
       {card.note && (
         <p className="mt-2 rounded-[10px] bg-linen px-3 py-2 text-[15px] whitespace-pre-line">
@@ -145,68 +146,6 @@ export function VisitDialog({
       </div>
       <VisitSteps card={card} />
     </Dialog>
-  );
-}
-
-function Times({
-  problem,
-  fact,
-  stop,
-  vanName,
-  pinned,
-}: {
-  problem: DayProblem;
-  fact: VisitFact;
-  stop: StopTimes | null;
-  vanName: string | null;
-  pinned: boolean;
-}) {
-  const promise = fact.promise;
-  const over = stop && (stop.state === 'done' || stop.state === 'failed');
-  return (
-    <dl className="rows mt-2 text-[15px]">
-      <Row name="Promised">
-        {promise ? (
-          <>
-            <b>{formatWallRange(problem, promise.startSeconds, promise.endSeconds)}</b>{' '}
-            {stop && stop.onTimePermille !== null && !over && (
-              <Chip tone={stop.onTimePermille >= SAFE_PERMILLE ? 'ok' : 'bad'}>
-                {percentWords(stop.onTimePermille)} on time
-              </Chip>
-            )}
-          </>
-        ) : (
-          'nothing yet'
-        )}
-      </Row>
-      <Row name={over ? 'Came' : 'Arrives'}>
-        {stop ? (
-          <>
-            <b>{formatWall(problem, stop.arriveSeconds)}</b>
-            {!over &&
-              `, likely ${formatWallRange(problem, stop.arriveEarlySeconds, stop.arriveLateSeconds)}`}
-            {` · leaves ${formatWall(problem, stop.endSeconds)}`}
-          </>
-        ) : (
-          'on no van yet'
-        )}
-      </Row>
-      {vanName && (
-        <Row name="Van">
-          <b>{vanName}</b>
-          {pinned && ', pinned: a search leaves it there'}
-        </Row>
-      )}
-    </dl>
-  );
-}
-
-function Row({ name, children }: { name: string; children: React.ReactNode }) {
-  return (
-    <div className="flex flex-wrap items-baseline justify-between gap-x-4 py-[7px]">
-      <dt className="text-slate">{name}</dt>
-      <dd className="text-right">{children}</dd>
-    </div>
   );
 }
 

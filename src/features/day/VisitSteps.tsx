@@ -18,9 +18,9 @@ export function VisitSteps({ card }: { card: VisitCard }) {
                     <span className="first-letter:uppercase">{step.label}</span>
                     <span className="shrink-0">{writeSpan(step.meanSeconds)}</span>
                   </p>
-                  {step.reasons.length > 0 && (
+                  {weighty(step.reasons).length > 0 && (
                     <p className="text-sm text-slate">
-                      {step.reasons
+                      {weighty(step.reasons)
                         .map((reason) => `${reason.text} ${writeDelta(reason.deltaSeconds)} min`)
                         .join(' · ')}
                     </p>
@@ -33,4 +33,9 @@ export function VisitSteps({ card }: { card: VisitCard }) {
       })}
     </div>
   );
+}
+
+/** Reasons that round to no minute explain nothing. */
+function weighty<Reason extends { deltaSeconds: number }>(reasons: readonly Reason[]): Reason[] {
+  return reasons.filter(({ deltaSeconds }) => Math.abs(deltaSeconds) >= 30);
 }

@@ -23,7 +23,7 @@ export function sampleDay(change: { nowSeconds?: number | null; promiseless?: bo
       changedSinceSent: index === 1,
     })),
     visits: problem.visits.map(cardOf),
-    undo: { words: 'Hazel to Otter, after Pip' },
+    undo: { changeId: '01890000-0000-7000-8000-00000000c001', words: 'Hazel to Otter, after Pip' },
     redo: null,
     openProposalId: null,
     log: [

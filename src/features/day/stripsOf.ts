@@ -24,7 +24,7 @@ export function stripsOf(day: Day, plan: Plan, times: DayTimes): Strip[] {
 }
 
 /** 'nowhereToPark' → 'nowhere to park'. */
-function reasonWords(reason: string): string {
+export function reasonWords(reason: string): string {
   return reason.replace(/[A-Z]/g, (letter) => ` ${letter.toLowerCase()}`);
 }
 

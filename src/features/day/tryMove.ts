@@ -2,6 +2,7 @@ import { applyMove } from '#shared/schedule/applyMove.ts';
 import { diffDay, type KnockOn } from '#shared/schedule/diffDay.ts';
 import { evaluateDay } from '#shared/schedule/evaluateDay.ts';
 import type { DayProblem, DayTimes, Move, Plan } from '#shared/schedule/types.ts';
+import { placeOf } from './moveWords.ts';
 
 /** What a move would do to a day; `refusedBecause` says in words why it cannot be made. */
 export interface Trial {
@@ -21,6 +22,8 @@ export function tryMove(problem: DayProblem, plan: Plan, before: DayTimes, move:
     moved: false,
     refusedBecause,
   });
+  // Where it is already: settling the run anew could still shift a meal, which nobody asked for.
+  if (isWhere(plan, move)) return { ...stay(''), refusedBecause: null };
   try {
     const result = applyMove(problem, plan, move);
     if (result.refusedBecause !== undefined) return stay(result.refusedBecause);
@@ -38,4 +41,10 @@ export function tryMove(problem: DayProblem, plan: Plan, before: DayTimes, move:
       return stay('It is not on this day any more. The day is shown as it is now.');
     throw error;
   }
+}
+
+function isWhere(plan: Plan, move: Move): boolean {
+  if (move.kind !== 'placeVisit') return false;
+  const place = placeOf(plan, move.visitId);
+  return place?.vanId === move.vanId && place.index === move.index;
 }

@@ -17,9 +17,9 @@ export function useBoardActions(
 ) {
   const undo = useUndoMove();
   const redo = useRedoMove();
-  const step = (mutation: typeof undo | typeof redo, words: string) =>
+  const step = (mutation: typeof undo | typeof redo, offered: Day['undo'], words: string) =>
     mutation.mutate(
-      { params: { date: day.date } },
+      { params: { date: day.date }, body: offered ? { changeId: offered.changeId } : {} },
       {
         onSuccess: (next) => {
           letGo();
@@ -34,8 +34,8 @@ export function useBoardActions(
       },
     );
   const busy = undo.isPending || redo.isPending;
-  const onUndo = () => step(undo, `Taken back: ${day.undo?.words ?? 'the last move'}`);
-  const onRedo = () => step(redo, `Made again: ${day.redo?.words ?? 'the move'}`);
+  const onUndo = () => step(undo, day.undo, `Taken back: ${day.undo?.words ?? 'the last move'}`);
+  const onRedo = () => step(redo, day.redo, `Made again: ${day.redo?.words ?? 'the move'}`);
   useEffect(() => {
     const press = (event: KeyboardEvent) => {
       if (!(event.ctrlKey || event.metaKey) || event.key.toLowerCase() !== 'z') return;

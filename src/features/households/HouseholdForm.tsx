@@ -181,7 +181,7 @@ export function HouseholdForm({
       {makingSite && (
         <SiteDialog
           spot={lat === null ? null : { lat, lon }}
-          onMade={takeSite}
+          onSaved={takeSite}
           onClose={() => setMakingSite(false)}
         />
       )}

@@ -2,6 +2,7 @@ import type { z } from 'zod';
 import { Link } from 'react-router-dom';
 import type { listHouseholds } from '#shared/api/households.ts';
 import { writeDate } from '#src/lib/words.ts';
+import { breedWords } from '#src/strips/petWords.ts';
 
 type Row = z.output<typeof listHouseholds.response>['households'][number];
 
@@ -81,7 +82,7 @@ function PetNames({ row }: { row: Row }) {
   return row.pets.map((pet, index) => (
     <span key={pet.id}>
       {index > 0 && ', '}
-      {pet.name} <span className="text-slate">{pet.breedName.toLowerCase()}</span>
+      {pet.name} <span className="text-slate">{breedWords(pet.breedName)}</span>
     </span>
   ));
 }

@@ -11,6 +11,7 @@ import { Chip } from '#src/components/Chip.tsx';
 import { EmptyState } from '#src/components/EmptyState.tsx';
 import { writeWeight } from '#src/lib/measures.ts';
 import { PetStrip } from '#src/strips/PetStrip.tsx';
+import { breedWords } from '#src/strips/petWords.ts';
 import { petFactsOf } from './petFactsOf.ts';
 
 /** Every pet with its minutes as a strip; those that rest stand last and faint. */
@@ -57,8 +58,10 @@ export function PetCards({
 function PetLines({ pet, today, to }: { pet: Pet; today: string; to: string }) {
   const { weightUnit } = useSession().business;
   const forecast = tryForecast(pet, today);
+  // The forecast adds what age, breed and coat bring to what was ticked.
+  const cautions = forecast?.cautions ?? pet.cautions.map((key) => ({ key, stop: false }));
   const facts = [
-    pet.breedName,
+    breedWords(pet.breedName),
     pet.weightGrams === null ? null : writeWeight(pet.weightGrams, weightUnit),
     pet.active ? pet.styleName : 'rests, not booked',
   ];
@@ -71,11 +74,17 @@ function PetLines({ pet, today, to }: { pet: Pet; today: string; to: string }) {
         <span className="text-slate">{facts.filter(Boolean).join(' · ')}</span>
       </p>
       {forecast && <p className="text-slate">{explain(forecast).summary}</p>}
-      {(pet.cautions.length > 0 || pet.cautionNote) && (
+      {forecast?.planChange && (
+        <p className="mt-1.5 rounded-[10px] bg-[var(--honey-soft)] px-3 py-2">
+          <span aria-hidden="true">◆ </span>
+          {forecast.planChange.words}
+        </p>
+      )}
+      {(cautions.length > 0 || pet.cautionNote) && (
         <div className="mt-1.5 flex flex-wrap gap-1.5">
-          {pet.cautions.map((key) => (
-            <Chip key={key} tone="bad">
-              {shortWords(key)}
+          {cautions.map(({ key, stop }) => (
+            <Chip key={key} tone={stop ? 'bad' : 'heed'}>
+              {stop ? `Stop: ${shortWords(key)}` : shortWords(key)}
             </Chip>
           ))}
           {pet.cautionNote && <Chip tone="heed">{pet.cautionNote}</Chip>}

@@ -1,44 +1,52 @@
+import { useState } from 'react';
 import { createSite, type Site } from '#shared/api/households.ts';
-import { useCreateSite } from '#src/api/households.ts';
+import { useCreateSite, useUpdateSite } from '#src/api/households.ts';
+import { useSession } from '#src/api/sessionStore.ts';
 import { useWhere } from '#src/api/useWhere.ts';
 import { Button } from '#src/components/Button.tsx';
 import { Dialog } from '#src/components/Dialog.tsx';
 import { FormErrors } from '#src/components/FormErrors.tsx';
 import { TextArea } from '#src/components/TextArea.tsx';
 import { TextField } from '#src/components/TextField.tsx';
-import { PinMap } from '#src/map/PinMap.tsx';
-import { useSession } from '#src/api/sessionStore.ts';
-import { WhereEntry } from '#src/components/WhereEntry.tsx';
 import { toast } from '#src/components/toast.ts';
-import { emptyToNull } from '#src/lib/emptyToNull.ts';
+import { WhereEntry } from '#src/components/WhereEntry.tsx';
 import { useSubmit } from '#src/lib/useSubmit.ts';
 import { useZodForm } from '#src/lib/useZodForm.ts';
-import { useState } from 'react';
+import { PinMap } from '#src/map/PinMap.tsx';
+import { GateCodeField } from './GateCodeField.tsx';
 
-/** A place several households share; it begins at the spot of the household being written. */
+/** A place several households share, new (`site` null, beginning at `spot`) or to be changed. */
 export function SiteDialog({
-  spot,
-  onMade,
+  site = null,
+  spot = null,
+  onSaved,
   onClose,
 }: {
-  spot: { lat: number; lon: number } | null;
-  onMade: (site: Site) => void;
+  site?: Site | null;
+  spot?: { lat: number; lon: number } | null;
+  onSaved: (site: Site) => void;
   onClose: () => void;
 }) {
   const { business } = useSession();
   const create = useCreateSite();
+  const update = useUpdateSite();
   const [address, setAddress] = useState('');
+  // undefined leaves the code as it is, null clears it.
+  const [gateCode, setGateCode] = useState<string | null | undefined>(undefined);
+  const start = site ?? spot;
   const form = useZodForm(createSite.body, {
-    name: '',
-    lat: spot?.lat ?? (null as unknown as number),
-    lon: spot?.lon ?? (null as unknown as number),
-    parkingNotes: '',
+    name: site?.name ?? '',
+    lat: start?.lat ?? (null as unknown as number),
+    lon: start?.lon ?? (null as unknown as number),
+    parkingNotes: site?.parkingNotes ?? '',
     gateCode: null,
   });
-  const submit = useSubmit(form, async (body) => {
-    const site = await create.mutateAsync({ body });
-    toast(`${site.name} is added.`);
-    onMade(site);
+  const submit = useSubmit(form, async ({ gateCode: _unused, ...fields }) => {
+    const saved = site
+      ? await update.mutateAsync({ params: { siteId: site.id }, body: { ...fields, gateCode } })
+      : await create.mutateAsync({ body: { ...fields, gateCode: gateCode ?? null } });
+    toast(site ? `${saved.name} is saved.` : `${saved.name} is added.`);
+    onSaved(saved);
   });
   const { errors } = form.formState;
   const [lat, lon] = form.watch(['lat', 'lon']);
@@ -49,7 +57,7 @@ export function SiteDialog({
     if (next.lat !== null) form.clearErrors(['lat', 'lon']);
   });
   return (
-    <Dialog title="Add a site" onClose={onClose}>
+    <Dialog title={site ? `Change ${site.name}` : 'Add a site'} onClose={onClose}>
       <form onSubmit={submit.onSubmit} noValidate className="grid gap-4">
         <TextField
           label="Name"
@@ -59,7 +67,13 @@ export function SiteDialog({
         />
         <WhereEntry
           label="Where its gate or parking is"
-          hint={spot ? 'Begins at the household’s own spot.' : undefined}
+          hint={
+            site
+              ? 'Stays where it is unless you pick another address or move the pin.'
+              : spot
+                ? 'Begins at the household’s own spot.'
+                : undefined
+          }
           {...where}
           spot={lat === null ? null : { lat, lon }}
           error={
@@ -74,17 +88,16 @@ export function SiteDialog({
           {...form.register('parkingNotes')}
           error={errors.parkingNotes?.message}
         />
-        <TextField
-          label="Gate code"
-          required={false}
-          autoComplete="off"
-          {...form.register('gateCode', { setValueAs: emptyToNull })}
+        <GateCodeField
+          hasCode={site?.hasGateCode ?? false}
+          value={gateCode}
+          onChange={setGateCode}
           error={errors.gateCode?.message}
         />
         <FormErrors error={submit.failure} fields={submit.strayFields} />
         <div className="flex flex-wrap gap-2.5">
-          <Button type="submit" kind="go" busy={submit.busy} busyWords="Adding">
-            Add the site
+          <Button type="submit" kind="go" busy={submit.busy} busyWords="Saving">
+            {site ? 'Save the site' : 'Add the site'}
           </Button>
           <Button onClick={onClose}>Leave it</Button>
         </div>

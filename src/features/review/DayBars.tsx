@@ -17,6 +17,8 @@ type PartKey = (typeof parts)[number]['key'];
 const H = 262;
 const left = 34;
 const ground = 226;
+/** Less than this is 0.0 h, a number on the ground line that says nothing. */
+const WORTH_A_NUMBER = 0.05 * 3600;
 
 /** Hours of each day as stacked bars; each part has a pattern of its own. */
 export function DayBars({ days }: { days: readonly ReviewDay[] }) {
@@ -74,7 +76,7 @@ export function DayBars({ days }: { days: readonly ReviewDay[] }) {
                   )
                 );
               })}
-              {roomForNumbers && day.groomSeconds > 0 && (
+              {roomForNumbers && day.groomSeconds >= WORTH_A_NUMBER && (
                 <text
                   x={x + width + 5}
                   y={yOf(day.groomSeconds / 7200) + 4}
@@ -84,7 +86,7 @@ export function DayBars({ days }: { days: readonly ReviewDay[] }) {
                   {(day.groomSeconds / 3600).toFixed(1)}
                 </text>
               )}
-              {roomForNumbers && day.driveSeconds > 0 && (
+              {roomForNumbers && day.driveSeconds >= WORTH_A_NUMBER && (
                 <text
                   x={x + width + 5}
                   y={yOf((day.groomSeconds + day.driveSeconds / 2) / 3600) + 4}

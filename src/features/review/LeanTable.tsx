@@ -16,7 +16,12 @@ export function LeanTable({ leans }: { leans: Review['leans'] }) {
     (a, b) => Math.abs(b.leanPermille) - Math.abs(a.leanPermille) || b.visits - a.visits,
   );
   return (
-    <div className="-mx-2 overflow-x-auto">
+    <div
+      className="-mx-2 overflow-x-auto"
+      role="region"
+      aria-label="Where forecasts lean"
+      tabIndex={0}
+    >
       <table className="plain">
         <thead>
           <tr>

@@ -8,7 +8,7 @@ import { groomPerDrive, hoursWords, keptWords } from './reviewWords.ts';
 export function VanTable({ vans }: { vans: Review['vans'] }) {
   const unit = useSession().business.distanceUnit;
   return (
-    <div className="-mx-2 overflow-x-auto">
+    <div className="-mx-2 overflow-x-auto" role="region" aria-label="Van by van" tabIndex={0}>
       <table className="plain">
         <thead>
           <tr>

@@ -1,5 +1,6 @@
 import { useSession } from '#src/api/sessionStore.ts';
 import { writeWeight } from '#src/lib/measures.ts';
+import { breedWords } from '#src/strips/petWords.ts';
 import { Cautions } from './Cautions.tsx';
 import type { RunPet } from './nextAction.ts';
 
@@ -11,7 +12,7 @@ export function PetCard({ pet, minutesWords }: { pet: RunPet; minutesWords: stri
       <h2 className="text-[17px] leading-snug font-bold">
         {pet.name}{' '}
         <span className="font-normal text-slate">
-          {pet.breedName}, {writeWeight(pet.weightGrams, unit)}
+          {breedWords(pet.breedName)}, {writeWeight(pet.weightGrams, unit)}
           {pet.temperament && pet.temperament !== 'calm' ? `, ${pet.temperament}` : ''}
         </span>
       </h2>

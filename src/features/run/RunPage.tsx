@@ -1,9 +1,8 @@
 import { useEffect, useState } from 'react';
-import { useSearchParams } from 'react-router-dom';
+import { Link, useSearchParams } from 'react-router-dom';
 import type { RunDetail } from '#shared/api/runs.ts';
 import { formatWall } from '#shared/time/formatWall.ts';
 import { Button } from '#src/components/Button.tsx';
-import { EmptyState } from '#src/components/EmptyState.tsx';
 import { ErrorNote } from '#src/components/ErrorNote.tsx';
 import { Loading } from '#src/components/Loading.tsx';
 import { useTitle } from '#src/lib/useTitle.ts';
@@ -154,14 +153,22 @@ function ChangedRun({ run }: { run: RunDetail }) {
 
 function NotSent({ run }: { run: RunDetail }) {
   return (
-    <EmptyState title={`${run.vanName}'s run is not sent yet`}>
-      It appears here by itself once the desk sends it.
-    </EmptyState>
+    <>
+      <h1 className="text-[26px] leading-[1.12] tracking-tight">
+        {run.vanName}’s run is not sent yet
+      </h1>
+      <p className="mt-2 text-slate">It appears here by itself once the desk sends it.</p>
+      <Link to="/run" className="text-link mt-4 inline-flex min-h-12 items-center">
+        All runs of today
+      </Link>
+    </>
   );
 }
 
 function RunOver({ view, unsent }: { view: RunView; unsent: number }) {
-  const done = view.stops.filter(({ kind, state }) => kind === 'visit' && state === 'done').length;
+  const visits = view.stops.filter(({ kind }) => kind === 'visit');
+  const done = visits.filter(({ state }) => state === 'done').length;
+  const failed = visits.filter(({ state }) => state === 'failed').length;
   return (
     <>
       <p className="text-[15px] text-slate">
@@ -171,6 +178,7 @@ function RunOver({ view, unsent }: { view: RunView; unsent: number }) {
       </p>
       <h1 className="text-[26px] leading-[1.12] tracking-tight">
         All stops are over, {done} {done === 1 ? 'visit' : 'visits'} done
+        {failed > 0 && `, ${failed} not done`}
       </h1>
       {unsent > 0 && (
         <p className="mt-2">

@@ -45,7 +45,7 @@ export function RunTopBar({
             to={whole ? '?' : '?show=all'}
             className="text-link inline-flex min-h-12 items-center"
           >
-            {whole ? 'Back to the stop' : 'Whole run'}
+            {!whole ? 'Whole run' : current ? 'Back to the stop' : 'Back'}
           </Link>
         )}
       </div>

@@ -39,6 +39,13 @@ export function StopPanel({ view, stop }: { view: RunView; stop: RunStop }) {
           )}
         </p>
       )}
+      {visit && isEarly(stop.times) && (stop.state === 'ahead' || stop.state === 'driving') && (
+        <p className="mb-2 text-[15px]">
+          <span aria-hidden="true">◆ </span>
+          {writeSpan(stop.times.waitSeconds)} early: the door opens at{' '}
+          {formatWall(view.problem, stop.times.startSeconds)}. Wait, or call them.
+        </p>
+      )}
       <div className="mt-3 grid grid-cols-1 gap-3">
         <KerbCard stop={stop} />
         {visit?.pets.map((pet) => (
@@ -65,6 +72,11 @@ export function StopPanel({ view, stop }: { view: RunView; stop: RunStop }) {
   );
 }
 
+/** The van would stand and wait: the door opens when it was promised, not before. */
+function isEarly(times: RunStop['times']): boolean {
+  return times.waitSeconds >= 180;
+}
+
 /** What matters before the name, in pieces that never break inside. */
 function headWords(view: RunView, stop: RunStop): string[] {
   const day = view.problem;
@@ -78,7 +90,7 @@ function headWords(view: RunView, stop: RunStop): string[] {
   if (state === 'working')
     return [`Here since ${arrive}`, `done about ${formatWall(day, times.endSeconds)}`];
   const drive =
-    times.driveSeconds > 0
+    times.driveSeconds >= 30
       ? `${writeSpan(times.driveSeconds)} drive${times.rough ? ', rough' : ''}`
       : 'no driving';
   return [`Next, ${arrive}`, drive, ...promised];

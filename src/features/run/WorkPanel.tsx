@@ -1,6 +1,7 @@
 import { formatWall, formatWallRange } from '#shared/time/formatWall.ts';
 import { instantToSeconds } from '#shared/time/wallSeconds.ts';
 import { writeSpan } from '#src/lib/words.ts';
+import { breedWords } from '#src/strips/petWords.ts';
 import { Cautions } from './Cautions.tsx';
 import { clockWords } from './clockWords.ts';
 import { sentenceCase } from './sentenceCase.ts';
@@ -23,7 +24,8 @@ export function WorkPanel({ view, stop, work }: { view: RunView; stop: RunStop; 
   return (
     <>
       <p className="text-[15px] text-slate">
-        {pet.name}, {pet.breedName} · {Math.max(0, Math.floor(spent / 60))} of {writeSpan(total)}
+        {pet.name}, {breedWords(pet.breedName)} · {Math.max(0, Math.floor(spent / 60))} of{' '}
+        {writeSpan(total)}
       </p>
       <h1 className="text-[26px] leading-[1.12] tracking-tight">
         {step ? sentenceCase(step.label) : `${pet.name}: check over`}

@@ -43,7 +43,12 @@ export function ShiftDialog({
   const form = useZodForm(schema, {
     date,
     vanId,
-    ...shiftStart(shift, weekShifts, vanId),
+    ...shiftStart(
+      shift,
+      weekShifts,
+      vanId,
+      groomers.filter(({ active }) => active).map(({ id }) => id),
+    ),
     meal: shift?.meal ?? mealStart,
     hasMeal: shift ? shift.meal !== null : true,
   });

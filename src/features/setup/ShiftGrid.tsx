@@ -95,7 +95,7 @@ function ShiftCell({
       {shift.meal && <span className="block text-[13px]">meal {shift.meal.lengthMinutes} min</span>}
     </>
   ) : (
-    <span className="text-slate">free</span>
+    <span className="text-slate">{onOpen ? '+ hours' : 'free'}</span>
   );
   const look = `block min-h-11 w-full rounded-[10px] px-2.5 py-1.5 text-left ${
     shift ? 'bg-collar-soft' : 'border border-dashed border-fawn'

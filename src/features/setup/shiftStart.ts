@@ -8,11 +8,19 @@ export const mealStart: NonNullable<Shift['meal']> = {
   dueAfterMinutes: 6 * 60,
 };
 
-/** What a shift's form begins with: itself, else the van's other shift of the week, else a plain day. */
-export function shiftStart(shift: Shift | null, week: readonly Shift[], vanId: string) {
+/**
+ * What a shift's form begins with: itself, else the van's other shift of the week, else a plain day
+ * of the only groomer there is.
+ */
+export function shiftStart(
+  shift: Shift | null,
+  week: readonly Shift[],
+  vanId: string,
+  groomerIds: readonly string[],
+) {
   const like = shift ?? week.find((one) => one.vanId === vanId);
   return {
-    groomerId: like?.groomerId ?? '',
+    groomerId: like?.groomerId ?? (groomerIds.length === 1 ? groomerIds[0]! : ''),
     startMinutes: like?.startMinutes ?? 8 * 60,
     endMinutes: like?.endMinutes ?? 17 * 60,
     mostOvertimeMinutes: like?.mostOvertimeMinutes ?? 30,
