@@ -66,7 +66,7 @@ describe('a business of one van', () => {
     await seen(page.getByText('groomer: Odile'));
     await expect
       .poll(() => nav.getByRole('link').allInnerTexts())
-      .toEqual(['Day', 'Run', 'Households', 'Texts', 'Review', 'Setup']);
+      .toEqual(['Day', 'Run', 'Households', 'Forecast', 'Texts', 'Review', 'Setup']);
     visits = await bookDay(odile, groomer.id);
   });
 

@@ -82,15 +82,21 @@ describe('the screens', () => {
     { path: '/households/new', shows: /^Add a household$/, chunk: 'HouseholdFormScreen' },
     { path: householdPath, shows: /./, chunk: 'HouseholdScreen' },
     { path: `${householdPath}/edit`, shows: /^Change /, chunk: 'HouseholdFormScreen' },
-    { path: `${householdPath}/pets/new`, shows: /^Add a pet$/, chunk: 'PetScreen' },
+    { path: `${householdPath}/pets/new`, shows: /^Add a pet$/, chunk: 'PetFormScreen' },
     { path: petPath, shows: /./, chunk: 'PetScreen' },
+    { path: `${petPath}/edit`, shows: /./, chunk: 'PetFormScreen' },
+    { path: `${petPath}/style`, shows: /./, chunk: 'PetStyleScreen' },
+    { path: '/households/sites', shows: /^Sites$/, chunk: 'SitesScreen' },
+    { path: '/forecast', shows: /./, chunk: 'ForecastScreen' },
     { path: '/texts', shows: /^Texts$/, chunk: 'TextsScreen' },
     { path: '/review', shows: /^For every hour of driving/, chunk: 'ReviewScreen' },
-    ...['business', 'area', 'places', 'vans', 'groomers', 'shifts', 'people'].map((tab) => ({
-      path: `/setup/${tab}`,
-      shows: /^Setup$/,
-      chunk: 'SetupScreen',
-    })),
+    ...['business', 'area', 'places', 'vans', 'groomers', 'shifts', 'styles', 'people'].map(
+      (tab) => ({
+        path: `/setup/${tab}`,
+        shows: /^Setup$/,
+        chunk: 'SetupScreen',
+      }),
+    ),
     { path: '/nothing', shows: /^Nothing is here$/ },
   ];
 

@@ -60,6 +60,7 @@ describe('the whole story', () => {
     expect(await nav.getByRole('link').allInnerTexts()).toEqual([
       'Day',
       'Households',
+      'Forecast',
       'Texts',
       'Setup',
     ]);
