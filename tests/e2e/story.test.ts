@@ -362,7 +362,7 @@ describe('the whole story', () => {
     await page.goto('/households');
     await seen(page.getByText('No household yet'));
     await page.goto(`/day/${demoDate}`);
-    await seen(page.getByText('No van goes out this day yet'));
+    await seen(page.getByText('Before the first day'));
     const list = await readApi<z.output<typeof listHouseholds.response>>(
       stranger,
       '/api/households',
