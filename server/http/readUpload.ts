@@ -20,6 +20,9 @@ export function readUpload(field: string, mostBytes: number) {
         fields: { [field]: words },
       });
     // Anything else busboy or multer says is about what was sent.
-    return badField(field, `must be one file in the field "${field}" of a multipart/form-data body`);
+    return badField(
+      field,
+      `must be one file in the field "${field}" of a multipart/form-data body`,
+    );
   }
 }

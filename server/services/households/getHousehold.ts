@@ -71,5 +71,13 @@ export async function getPet(petId: string) {
     lastVisitDates([petId]),
   ]);
   const style = (await stylesOf([pet]))(pet);
-  return { pet, style, household, visits, clocks, groomers, lastVisitDate: last.get(petId) ?? null };
+  return {
+    pet,
+    style,
+    household,
+    visits,
+    clocks,
+    groomers,
+    lastVisitDate: last.get(petId) ?? null,
+  };
 }
