@@ -8,6 +8,7 @@ import {
 import { database } from '#server/db/database.ts';
 import { newId } from '#server/db/newId.ts';
 import { scopeModel } from '#server/db/scopeModel.ts';
+import type { CoatState } from '#shared/grooming/types.ts';
 
 export type Species = 'dog' | 'cat';
 
@@ -21,7 +22,10 @@ export class Pet extends Model<InferAttributes<Pet>, InferCreationAttributes<Pet
   declare weightGrams: CreationOptional<number | null>;
   declare coatType: CreationOptional<string | null>;
   declare matting: number;
+  declare mattingByRegion: CreationOptional<NonNullable<CoatState['mattingByRegion']> | null>;
+  declare undercoatLoad: CreationOptional<number>;
   declare soil: number;
+  declare tableLimitMinutes: CreationOptional<number | null>;
   declare temperament: string;
   declare birthYear: CreationOptional<number | null>;
   declare cautions: string[];
@@ -45,7 +49,10 @@ Pet.init(
     weightGrams: DataTypes.INTEGER,
     coatType: DataTypes.STRING,
     matting: DataTypes.INTEGER,
+    mattingByRegion: DataTypes.JSON,
+    undercoatLoad: { type: DataTypes.INTEGER, defaultValue: 0 },
     soil: DataTypes.INTEGER,
+    tableLimitMinutes: DataTypes.INTEGER,
     temperament: DataTypes.STRING,
     birthYear: DataTypes.INTEGER,
     cautions: DataTypes.JSON,

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { endpoint } from './endpoint.ts';
+import { mattingByRegion, undercoatLoad } from './pets.ts';
 import { styleId } from './styles.ts';
 import { latitude, longitude } from './values.ts';
 import { stepFamily } from './visits.ts';
@@ -43,6 +44,8 @@ export const quickForecast = endpoint({
         .default(null),
       coatType: tableKey.nullable().default(null),
       matting: z.int().min(0).max(4).default(0),
+      mattingByRegion: mattingByRegion.nullable().default(null),
+      undercoatLoad: undercoatLoad.default(0),
       soil: z.int().min(0).max(2).default(0),
       temperament: tableKey.default('calm'),
       ageYears: z.int().min(0).max(40).nullable().default(null),

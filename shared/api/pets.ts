@@ -1,11 +1,22 @@
 import { z } from 'zod';
 import { endpoint } from './endpoint.ts';
 import { patchOf } from './patchOf.ts';
-import { styleShape } from './styles.ts';
+import { region, styleShape } from './styles.ts';
 import { id, name, note, phone } from './values.ts';
 
 /** Keys of the tables in shared/grooming; a service refuses unknown ones by name. */
 const tableKey = z.string().trim().min(1, 'must be chosen').max(60);
+
+/** 0 none to 4 pelted. */
+const mattingLevel = z.literal([0, 1, 2, 3, 4], 'must be 0 to 4');
+/** 0 usual · 1 shedding · 2 blowing coat. */
+export const undercoatLoad = z.int().min(0, 'must be 0 to 2').max(2, 'must be 0 to 2');
+/** Where the mats are known; they beat `matting`, and regions not named are then clear. */
+export const mattingByRegion = z.partialRecord(
+  region,
+  mattingLevel,
+  `must be levels 0 to 4 by region: ${region.options.join(', ')}`,
+);
 
 const petFields = z.object({
   name,
@@ -19,8 +30,17 @@ const petFields = z.object({
   /** Only when it differs from the breed's. */
   coatType: tableKey.nullable().default(null),
   matting: z.int().min(0).max(4).default(0),
+  mattingByRegion: mattingByRegion.nullable().default(null),
+  undercoatLoad: undercoatLoad.default(0),
   soil: z.int().min(0).max(2).default(0),
   temperament: tableKey.default('calm'),
+  /** Most minutes it bears in tub and on table; null: by age and health. */
+  tableLimitMinutes: z
+    .int('must be whole minutes')
+    .min(10, 'must be 10 minutes or more')
+    .max(240, 'must be 240 minutes or less')
+    .nullable()
+    .default(null),
   birthYear: z.int().min(1990).max(2100).nullable().default(null),
   cautions: z.array(tableKey).max(20).default([]),
   cautionNote: note.default(''),

@@ -1,11 +1,14 @@
 import { app, useApp } from '../support/useApp.ts';
 import { describe, expect, it } from 'vitest';
+import { quickForecast } from '#shared/api/forecasts.ts';
 import { getHousehold } from '#shared/api/households.ts';
 import { createPet, getPet, updatePet } from '#shared/api/pets.ts';
 import { inBusiness } from '#server/db/database.ts';
 import { Pet } from '#server/models/Pet.ts';
+import { createVisit } from '#shared/api/visits.ts';
 import { ApiClient } from '../support/apiClient.ts';
 import { addHousehold } from '../support/buildBusiness.ts';
+import { tomorrow } from '../support/tomorrow.ts';
 
 useApp();
 
@@ -126,5 +129,57 @@ describe('a pet', () => {
       styleId: 'cat-comb-out',
     });
     expect(cat.body.breedName).toBe('Cat, mixed');
+  });
+
+  it('keeps mats in places, loose undercoat and its table limit, and books with them', async () => {
+    const { client, household, pet, create, update } = await petOwner();
+    expect(pet).toMatchObject({ mattingByRegion: null, undercoatLoad: 0, tableLimitMinutes: null });
+    const book = async (petId: string) =>
+      client.must(createVisit, {
+        body: { householdId: household.id, date: tomorrow(), petIds: [petId] },
+      });
+    const mats = ({ steps }: { steps: { key: string; medianSeconds: number }[] }) =>
+      steps
+        .filter(({ key }) => key === 'mats' || key === 'clipOff')
+        .reduce((sum, { medianSeconds }) => sum + medianSeconds, 0);
+    const coat = { mattingByRegion: { ears: 2, tail: 1 }, undercoatLoad: 2, tableLimitMinutes: 40 };
+    const { body: matted } = await create({ ...coat, matting: 2 });
+    const { body: whole } = await create({ name: 'Moss', matting: 2 });
+    expect(matted).toMatchObject(coat);
+    expect((await client.must(getPet, { params: { petId: matted.id } })).pet).toEqual(matted);
+    const [inPlaces, everywhere, clear] = [
+      await book(matted.id),
+      await book(whole.id),
+      await book(pet.id),
+    ];
+    // Named places beat the whole pet's level, the others are then clear.
+    expect(mats(clear)).toBe(0);
+    expect(mats(inPlaces)).toBeGreaterThan(0);
+    expect(mats(inPlaces)).toBeLessThan(mats(everywhere));
+    const told = await client.must(quickForecast, {
+      body: {
+        species: 'dog',
+        breedId: 'bichon-frise',
+        weightGrams: 7000,
+        styleId: 'teddy',
+        mattingByRegion: coat.mattingByRegion,
+        undercoatLoad: 2,
+      },
+    });
+    expect(mats(told)).toBe(mats(inPlaces));
+    const back = await client.must(updatePet, {
+      params: { petId: matted.id },
+      body: { mattingByRegion: null },
+    });
+    expect(back).toEqual({ ...matted, mattingByRegion: null });
+    for (const [wrong, field] of [
+      [{ mattingByRegion: { ears: 5 } }, 'mattingByRegion.ears'],
+      [{ mattingByRegion: { wings: 1 } }, 'mattingByRegion'],
+      [{ undercoatLoad: 3 }, 'undercoatLoad'],
+      [{ tableLimitMinutes: 9 }, 'tableLimitMinutes'],
+      [{ tableLimitMinutes: 241 }, 'tableLimitMinutes'],
+    ] as const)
+      for (const answer of [await create(wrong), await update(wrong)])
+        expect([answer.status, Object.keys(answer.error.fields!)]).toEqual([400, [field]]);
   });
 });

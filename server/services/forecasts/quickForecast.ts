@@ -14,7 +14,7 @@ import { type DatedOffer, offersAhead } from './offersAhead.ts';
 
 export interface QuickInput extends Pick<
   Pet,
-  'species' | 'breedId' | 'weightGrams' | 'coatType' | 'matting' | 'soil' | 'temperament' | 'cautions' | 'styleId'
+  'species' | 'breedId' | 'weightGrams' | 'coatType' | 'matting' | 'mattingByRegion' | 'undercoatLoad' | 'soil' | 'temperament' | 'cautions' | 'styleId'
 > {
   ageYears: number | null;
   lat: number | null;

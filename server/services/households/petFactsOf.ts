@@ -20,7 +20,10 @@ export function petFactsOf(pet: Pet, on: Date, lastVisitDate: string | null): Pe
     coatType: (pet.coatType ?? null) as CoatType | null,
     coatState: {
       matting: pet.matting as MattingLevel,
-      undercoatLoad: 0,
+      ...(pet.mattingByRegion && Object.keys(pet.mattingByRegion).length > 0
+        ? { mattingByRegion: pet.mattingByRegion }
+        : {}),
+      undercoatLoad: (pet.undercoatLoad ?? 0) as 0 | 1 | 2,
       soil: pet.soil as 0 | 1 | 2,
       lengthTenthsMm: null,
     },
@@ -28,6 +31,7 @@ export function petFactsOf(pet: Pet, on: Date, lastVisitDate: string | null): Pe
     cautions: pet.cautions as CautionKey[],
     firstVisit: lastVisitDate === null,
     weeksSinceLast: weeks,
+    tableLimitSeconds: pet.tableLimitMinutes == null ? null : pet.tableLimitMinutes * 60,
   };
 }
 

@@ -29,10 +29,12 @@ import {
   mattingChoices,
   soilChoices,
   temperamentChoices,
+  undercoatChoices,
 } from './coatWords.ts';
 import { FormLevel } from './FormLevel.tsx';
 import { ForecastLine } from './ForecastLine.tsx';
 import { ForecastPanel } from './ForecastPanel.tsx';
+import { MatPlaces } from './MatPlaces.tsx';
 import { petFactsOf } from './petFactsOf.ts';
 import { petStart } from './petStart.ts';
 import type { ToldByPhone } from './quickPet.ts';
@@ -142,6 +144,14 @@ export function PetForm({
               label="Temperament"
               choices={temperamentChoices}
             />
+            <FormNumber
+              control={form.control}
+              name="tableLimitMinutes"
+              label="Most minutes on the table"
+              unit="min"
+              required={false}
+              hint="Empty: by age and health."
+            />
           </div>
         </Card>
         <Card title={pet ? 'Coat' : 'Coat and style'}>
@@ -169,6 +179,15 @@ export function PetForm({
                 name="matting"
                 label="Matting"
                 choices={mattingChoices}
+              />
+              <MatPlaces control={form.control} />
+            </div>
+            <div className="md:col-span-2">
+              <FormLevel
+                control={form.control}
+                name="undercoatLoad"
+                label="Undercoat"
+                choices={undercoatChoices}
               />
             </div>
             <FormLevel control={form.control} name="soil" label="Dirt" choices={soilChoices} />

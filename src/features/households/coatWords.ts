@@ -27,6 +27,12 @@ export const mattingChoices = [
   { value: '4', label: 'Pelted' },
 ] as const;
 
+export const undercoatChoices = [
+  { value: '0', label: 'Usual' },
+  { value: '1', label: 'Shedding' },
+  { value: '2', label: 'Blowing coat' },
+] as const;
+
 export const soilChoices = [
   { value: '0', label: 'Usual' },
   { value: '1', label: 'Dirty' },

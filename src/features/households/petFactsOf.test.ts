@@ -10,7 +10,10 @@ const fern: PetLike = {
   weightGrams: 22_000,
   coatType: null,
   matting: 2,
+  mattingByRegion: null,
+  undercoatLoad: 0,
   soil: 1,
+  tableLimitMinutes: null,
   temperament: 'restless',
   birthYear: 2022,
   cautions: ['feetShy'],
@@ -31,6 +34,24 @@ test('a form becomes the facts the model wants', () => {
     firstVisit: true,
     weeksSinceLast: null,
   });
+});
+
+test('mats in places, loose undercoat and the table limit reach the model', () => {
+  const told = {
+    ...fern,
+    mattingByRegion: { ears: 3 as const },
+    undercoatLoad: 2,
+    tableLimitMinutes: 45,
+  };
+  expect(petFactsOf(told, null, '2026-04-14')).toMatchObject({
+    coatState: { mattingByRegion: { ears: 3 }, undercoatLoad: 2 },
+    tableLimitSeconds: 2700,
+  });
+  const halfTyped = { ...fern, mattingByRegion: {}, tableLimitMinutes: 4 };
+  const facts = petFactsOf(halfTyped, null, '2026-04-14');
+  if (typeof facts === 'string') throw new Error(facts);
+  expect(facts.tableLimitSeconds).toBeNull();
+  expect(facts.coatState).not.toHaveProperty('mattingByRegion');
 });
 
 test('what is still missing is said in words', () => {

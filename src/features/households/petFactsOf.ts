@@ -11,7 +11,10 @@ export type PetLike = Pick<
   | 'weightGrams'
   | 'coatType'
   | 'matting'
+  | 'mattingByRegion'
+  | 'undercoatLoad'
   | 'soil'
+  | 'tableLimitMinutes'
   | 'temperament'
   | 'birthYear'
   | 'cautions'
@@ -42,7 +45,10 @@ export function petFactsOf(
     coatType: (pet.coatType as PetFacts['coatType']) ?? null,
     coatState: {
       matting: pet.matting as CoatState['matting'],
-      undercoatLoad: 0,
+      ...(pet.mattingByRegion && Object.keys(pet.mattingByRegion).length > 0
+        ? { mattingByRegion: pet.mattingByRegion as NonNullable<CoatState['mattingByRegion']> }
+        : {}),
+      undercoatLoad: pet.undercoatLoad as CoatState['undercoatLoad'],
       soil: pet.soil as CoatState['soil'],
       lengthTenthsMm: null,
     },
@@ -53,5 +59,11 @@ export function petFactsOf(
       lastVisitDate === null
         ? null
         : Math.max(0, Math.floor(daysBetween(lastVisitDate, today) / 7)),
+    tableLimitSeconds: tableLimitOf(pet.tableLimitMinutes),
   };
+}
+
+/** A limit half typed counts as none, so that the minutes stay. */
+function tableLimitOf(minutes: number | null): number | null {
+  return minutes !== null && minutes >= 10 && minutes <= 240 ? minutes * 60 : null;
 }
