@@ -10,11 +10,17 @@ import { newId } from '#server/db/newId.ts';
 import { scopeModel } from '#server/db/scopeModel.ts';
 import type { LearnedPair } from '#shared/grooming/learning/learnFromRecords.ts';
 
-/** One night's learning, kept or not. */
+export type FitState = 'working' | 'done' | 'failed';
+
+/** One learning, under way or done, kept or not. Until it is done its figures are 0. */
 export class GroomFit extends Model<InferAttributes<GroomFit>, InferCreationAttributes<GroomFit>> {
   declare id: CreationOptional<string>;
   declare businessId: CreationOptional<string>;
+  declare state: FitState;
+  /** When it began. */
   declare fittedAt: Date;
+  /** While working: past it, the process that learned is gone. */
+  declare leaseUntil: CreationOptional<Date | null>;
   declare modelVersion: string;
   /** Pet visits learned from, and seen but left out. */
   declare records: number;
@@ -32,7 +38,9 @@ GroomFit.init(
   {
     id: { type: DataTypes.UUID, primaryKey: true, defaultValue: newId },
     businessId: DataTypes.UUID,
+    state: DataTypes.STRING,
     fittedAt: DataTypes.DATE(3),
+    leaseUntil: DataTypes.DATE(3),
     modelVersion: DataTypes.STRING,
     records: DataTypes.INTEGER,
     leftOut: DataTypes.INTEGER,

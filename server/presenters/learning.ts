@@ -3,9 +3,10 @@ import type { groomFit } from '#shared/api/learning.ts';
 import type { GroomFit } from '#server/models/GroomFit.ts';
 
 export function presentFit(row: GroomFit): z.input<typeof groomFit> {
-  const { id, modelVersion, records, leftOut, heldOut, beforeSeconds, afterSeconds, kept } = row;
+  const { id, modelVersion, records, leftOut, heldOut, beforeSeconds, afterSeconds } = row;
   return {
     id,
+    state: row.state === 'done' ? (row.kept ? 'kept' : 'notKept') : row.state,
     fittedAt: row.fittedAt.toISOString(),
     modelVersion,
     records,
@@ -13,6 +14,5 @@ export function presentFit(row: GroomFit): z.input<typeof groomFit> {
     heldOut,
     beforeSeconds,
     afterSeconds,
-    kept,
   };
 }

@@ -41,7 +41,7 @@ export class ApiClient {
     return {
       status: answer.status,
       body: answer.body as z.output<E['response']>,
-      error: (answer.body as { error: Answer<E>['error'] }).error,
+      error: (answer.body as { error?: Answer<E>['error'] } | null)?.error as Answer<E>['error'],
       headers: answer.headers as Record<string, string>,
       text: answer.text,
     };
