@@ -1,7 +1,6 @@
 import { distribution } from '#shared/grooming/distribution.ts';
 import { learnedWords } from '#shared/grooming/learning/learnedWords.ts';
 import type { StepFamily } from '#shared/grooming/types.ts';
-import type { PetLearned } from '#shared/api/learning.ts';
 import { Business } from '#server/models/Business.ts';
 import { localDateOf } from '#server/services/days/today.ts';
 import { lastVisitDates } from '#server/services/households/getHousehold.ts';
@@ -9,6 +8,16 @@ import { needPet } from '#server/services/households/pets.ts';
 import { stylesOf } from '#server/services/styles/stylesOf.ts';
 import { forecastOf } from '#server/services/visits/forecastOf.ts';
 import { learningOf } from '#server/services/visits/learningOf.ts';
+
+export interface PetLearned {
+  words: string[];
+  petVisits: number;
+  medianSeconds: number;
+  p10Seconds: number;
+  p90Seconds: number;
+  /** Quickest first. */
+  byGroomer: { groomerName: string; medianSeconds: number; words: string }[];
+}
 
 /** The very forecast a booking of this pet alone would store today; null: nothing is learned yet. */
 export async function petLearned(
