@@ -17,6 +17,7 @@ import { writeCount, writeDelta } from '#src/lib/words.ts';
 import { DayBars } from './DayBars.tsx';
 import { ForecastScatter } from './ForecastScatter.tsx';
 import { LeanTable } from './LeanTable.tsx';
+import { LearnedCard } from './LearnedCard.tsx';
 import { groomPerDrive, hoursWords, keptWords, reviewHeadline, weekWords } from './reviewWords.ts';
 import { VanTable } from './VanTable.tsx';
 
@@ -57,16 +58,21 @@ function Week({ review }: { review: Review }) {
         actions={<WeekLinks review={review} today={today} empty={empty} />}
       />
       {empty ? (
-        <EmptyState
-          title="No finished visit in this week"
-          action={
-            <ButtonLink to={`?date=${addDays(review.from, -7)}`}>
-              Look at the week before
-            </ButtonLink>
-          }
-        >
-          Numbers appear as phones report stops done.
-        </EmptyState>
+        <>
+          <EmptyState
+            title="No finished visit in this week"
+            action={
+              <ButtonLink to={`?date=${addDays(review.from, -7)}`}>
+                Look at the week before
+              </ButtonLink>
+            }
+          >
+            Numbers appear as phones report stops done.
+          </EmptyState>
+          <div className="mt-4.5">
+            <LearnedCard />
+          </div>
+        </>
       ) : (
         <Numbers review={review} />
       )}
@@ -122,6 +128,7 @@ function Numbers({ review }: { review: Review }) {
           <Card title="Where forecasts lean" dim="minutes a visit">
             <LeanTable leans={review.leans} />
           </Card>
+          <LearnedCard />
         </div>
       </div>
     </>

@@ -6,10 +6,10 @@ import { Button } from '#src/components/Button.tsx';
 import { ConfirmDialog } from '#src/components/ConfirmDialog.tsx';
 import { Dialog } from '#src/components/Dialog.tsx';
 import { toast } from '#src/components/toast.ts';
+import { dayWords } from '#src/lib/dayWords.ts';
 import { errorWords } from '#src/lib/errorWords.ts';
 import { writeCount } from '#src/lib/words.ts';
 import { shrinkPhoto } from './shrinkPhoto.ts';
-import { dayWords } from './sinceWords.ts';
 
 /** Photos of one version: small ones to open, add more, take one away. */
 export function PhotoRow({
