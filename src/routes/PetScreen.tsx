@@ -11,6 +11,7 @@ import { PageHeader } from '#src/components/PageHeader.tsx';
 import { leanWords } from '#src/features/households/leanWords.ts';
 import { PastVisits } from '#src/features/households/PastVisits.tsx';
 import { PetCautions } from '#src/features/households/PetCautions.tsx';
+import { PetLearned } from '#src/features/households/PetLearned.tsx';
 import { PetStyleCard } from '#src/features/styles/PetStyleCard.tsx';
 import { StyleVersions } from '#src/features/styles/StyleVersions.tsx';
 import { writeWeight, type WeightUnit } from '#src/lib/measures.ts';
@@ -58,6 +59,7 @@ export function PetScreen() {
         />
         <div className="grid grid-cols-[minmax(0,1fr)] items-start gap-4 lg:grid-cols-[minmax(0,1.25fr)_minmax(0,1fr)] lg:gap-5">
           <div className="grid grid-cols-[minmax(0,1fr)] gap-4">
+            <PetLearned petId={petId} petName={pet.name} />
             <PastVisits past={past} year={Number(today.slice(0, 4))} petName={pet.name} />
             <PetCautions pet={pet} />
           </div>
