@@ -12,6 +12,8 @@ import { type DemoSignIn, demoSignIns } from './demoSignIns.ts';
 import { dueOn, type Rhythm } from './dueOn.ts';
 import { householdCount, makeHouseholds } from './makeHouseholds.ts';
 import { makeBusiness } from './makeBusiness.ts';
+import { keptFit } from '#server/services/learning/keptFit.ts';
+import { learnMinutes } from '#server/services/learning/learnMinutes.ts';
 import { stylesOf } from '#server/services/styles/stylesOf.ts';
 import { forecastOf } from '#server/services/visits/forecastOf.ts';
 import { planDate } from './planDate.ts';
@@ -43,6 +45,7 @@ export async function seedDemo(now: Date, onStep: OnStep): Promise<DemoSignIn[] 
   if ((await inBusiness(business.id, () => Household.count())) < householdCount)
     await makeHouseholds(business.id, area, start, (done, of) => onStep('Households', done, of));
   await seedDates(business, now, onStep);
+  await learnOnce(business.id, now, onStep);
   return signIns;
 }
 
@@ -71,6 +74,14 @@ async function seedDates(business: Business, now: Date, onStep: OnStep): Promise
     });
     onStep('Days', i + 1, total);
   }
+}
+
+/** So that the demo shows learning on its first day; later nights learn by themselves. */
+async function learnOnce(businessId: string, now: Date, onStep: OnStep): Promise<void> {
+  if (await inBusiness(businessId, () => keptFit(businessId))) return;
+  onStep('Learning', 0, 1);
+  await learnMinutes(businessId, now);
+  onStep('Learning', 1, 1);
 }
 
 async function loadRhythms(businessId: string, date: string): Promise<Rhythm[]> {
