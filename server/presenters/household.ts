@@ -51,6 +51,7 @@ export function presentPet(
   row: Pet,
   style: Style,
   lastVisitDate: string | null,
+  lastCuts: Style['cuts'] | null,
 ): z.input<typeof pet> {
   return {
     id: row.id,
@@ -79,6 +80,7 @@ export function presentPet(
     intervalWeeks: row.intervalWeeks,
     active: row.active,
     lastVisitDate,
+    lastCuts,
   };
 }
 
@@ -130,16 +132,20 @@ export function presentHouseholdDetail(facts: {
   runs: Run[];
   vans: Van[];
   styleOf: (pet: Pet) => Style;
+  lastVisits: ReadonlyMap<string, string>;
+  lastCuts: ReadonlyMap<string, Style['cuts']>;
 }): z.input<(typeof getHousehold)['response']> {
-  const lastDone = (petId: string) =>
-    facts.visits.find(
-      (visit) =>
-        visit.status === 'done' &&
-        facts.visitPets.some((one) => one.visitId === visit.id && one.petId === petId),
-    )?.date ?? null;
+  const { lastVisits, lastCuts } = facts;
   return {
     household: presentHousehold(facts.household),
-    pets: facts.pets.map((one) => presentPet(one, facts.styleOf(one), lastDone(one.id))),
+    pets: facts.pets.map((one) =>
+      presentPet(
+        one,
+        facts.styleOf(one),
+        lastVisits.get(one.id) ?? null,
+        lastCuts.get(one.id) ?? null,
+      ),
+    ),
     visits: facts.visits.map((visit) => {
       const promise = facts.promises.findLast((one) => one.visitId === visit.id);
       const run = facts.runs.find(

@@ -19,6 +19,7 @@ import {
   updateHousehold,
 } from '#server/services/households/households.ts';
 import { createPet, updatePet } from '#server/services/households/pets.ts';
+import { lastCutsOf } from '#server/services/styles/lastCutsOf.ts';
 import { stylesOf } from '#server/services/styles/stylesOf.ts';
 import {
   createSite,
@@ -67,7 +68,7 @@ handle(householdRoutes, api.removeSite, 'households.edit', async ({ params }) =>
 handle(householdRoutes, petApi.getPet, 'households.read', async ({ params }) => {
   const found = await getPet(params.petId);
   return {
-    pet: presentPet(found.pet, found.style, found.lastVisitDate),
+    pet: presentPet(found.pet, found.style, found.lastVisitDate, found.lastCuts),
     householdName: found.household.name,
     past: found.visits.flatMap((visit) => {
       const clock = found.clocks.get(visit.id);
@@ -90,7 +91,7 @@ handle(
   'households.edit',
   async ({ actor, params, body, now }) => {
     const pet = await createPet(params.householdId, body, now, actor.userName);
-    return presentPet(pet, (await stylesOf([pet]))(pet), null);
+    return presentPet(pet, (await stylesOf([pet]))(pet), null, null);
   },
 );
 handle(
@@ -99,10 +100,12 @@ handle(
   'households.edit',
   async ({ actor, params, body, now }) => {
     const pet = await updatePet(params.petId, body, now, actor.userName);
+    const lastVisits = await lastVisitDates([pet.id]);
     return presentPet(
       pet,
       (await stylesOf([pet]))(pet),
-      (await lastVisitDates([pet.id])).get(pet.id) ?? null,
+      lastVisits.get(pet.id) ?? null,
+      (await lastCutsOf(actor.businessId, lastVisits)).get(pet.id) ?? null,
     );
   },
 );

@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { endpoint } from './endpoint.ts';
 import { patchOf } from './patchOf.ts';
-import { region, styleShape } from './styles.ts';
+import { region, styleCuts, styleShape } from './styles.ts';
 import { id, name, note, phone } from './values.ts';
 
 /** Keys of the tables in shared/grooming; a service refuses unknown ones by name. */
@@ -61,6 +61,8 @@ export const pet = petFields.extend({
   style: styleShape,
   /** Of the last finished visit, null for a first visit. */
   lastVisitDate: z.string().nullable(),
+  /** Cut plan of that visit, which the coat has grown from; null: taken to be the style it has now. */
+  lastCuts: styleCuts.nullable(),
 });
 export type Pet = z.infer<typeof pet>;
 

@@ -7,6 +7,7 @@ import { petFactsOf } from '#src/features/households/petFactsOf.ts';
 export function useKnownPet(petId: string) {
   const today = useToday();
   const found = useQuery(petQueries.one(petId));
-  const facts = found.data ? petFactsOf(found.data.pet, found.data.pet.lastVisitDate, today) : null;
+  const pet = found.data?.pet;
+  const facts = pet ? petFactsOf(pet, pet.lastVisitDate, today, pet.lastCuts) : null;
   return { found, facts, today };
 }

@@ -5,6 +5,7 @@ import { Run } from '#server/models/Run.ts';
 import { Van } from '#server/models/Van.ts';
 import { Visit } from '#server/models/Visit.ts';
 import { VisitPet } from '#server/models/VisitPet.ts';
+import { lastCutsOf } from '#server/services/styles/lastCutsOf.ts';
 import { stylesOf } from '#server/services/styles/stylesOf.ts';
 import { clockOfVisits } from '#server/services/runs/clockOfVisits.ts';
 import { needHousehold } from './households.ts';
@@ -33,7 +34,20 @@ export async function getHousehold(householdId: string) {
     Van.findAll(),
   ]);
   const styleOf = await stylesOf(pets);
-  return { household, pets, visits, visitPets, promises, runs, vans, styleOf };
+  const lastVisits = await lastVisitDates(pets.map((pet) => pet.id));
+  const lastCuts = await lastCutsOf(household.businessId, lastVisits);
+  return {
+    household,
+    pets,
+    visits,
+    visitPets,
+    promises,
+    runs,
+    vans,
+    styleOf,
+    lastVisits,
+    lastCuts,
+  };
 }
 
 /** The date of each pet's last finished visit. */
@@ -71,6 +85,7 @@ export async function getPet(petId: string) {
     lastVisitDates([petId]),
   ]);
   const style = (await stylesOf([pet]))(pet);
+  const lastCuts = await lastCutsOf(pet.businessId, last);
   return {
     pet,
     style,
@@ -79,5 +94,6 @@ export async function getPet(petId: string) {
     clocks,
     groomers,
     lastVisitDate: last.get(petId) ?? null,
+    lastCuts: lastCuts.get(petId) ?? null,
   };
 }

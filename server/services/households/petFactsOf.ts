@@ -3,12 +3,21 @@ import type {
   CoatType,
   MattingLevel,
   PetFacts,
+  Style,
   Temperament,
 } from '#shared/grooming/types.ts';
 import type { Pet } from '#server/models/Pet.ts';
 
-/** What the groom-minute model needs, from a pet's row. `lastVisitDate` null = first visit. */
-export function petFactsOf(pet: Pet, on: Date, lastVisitDate: string | null): PetFacts {
+/**
+ * What the groom-minute model needs, from a pet's row. `lastVisitDate` null = first visit; `lastCuts`
+ * null = the coat has grown from the style asked for.
+ */
+export function petFactsOf(
+  pet: Pet,
+  on: Date,
+  lastVisitDate: string | null,
+  lastCuts: Style['cuts'] | null = null,
+): PetFacts {
   const weeks = lastVisitDate
     ? Math.max(0, Math.floor((on.getTime() - Date.parse(lastVisitDate)) / (7 * 86_400_000)))
     : null;
@@ -31,6 +40,7 @@ export function petFactsOf(pet: Pet, on: Date, lastVisitDate: string | null): Pe
     cautions: pet.cautions as CautionKey[],
     firstVisit: lastVisitDate === null,
     weeksSinceLast: weeks,
+    lastCuts,
     tableLimitSeconds: pet.tableLimitMinutes == null ? null : pet.tableLimitMinutes * 60,
   };
 }

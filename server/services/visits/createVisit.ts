@@ -11,6 +11,7 @@ import { logChange } from '#server/services/days/logChange.ts';
 import { lockDay } from '#server/services/days/lockDay.ts';
 import { localDateOf } from '#server/services/days/today.ts';
 import { lastVisitDates } from '#server/services/households/getHousehold.ts';
+import { lastCutsOf } from '#server/services/styles/lastCutsOf.ts';
 import { stylesOf } from '#server/services/styles/stylesOf.ts';
 import { forecastOf } from './forecastOf.ts';
 import { learningOf } from './learningOf.ts';
@@ -42,13 +43,15 @@ export async function createVisit(actor: Actor, input: VisitInput, now: Date): P
   const day = await lockDay(input.date);
   await refuseTwice(pets, input.date);
   const ordered = petIds.map((id) => pets.find((pet) => pet.id === id)!);
+  const lastVisits = await lastVisitDates(petIds);
   const { forecast, modelVersion } = forecastOf(
     ordered,
     business,
     input.date,
-    await lastVisitDates(petIds),
+    lastVisits,
     await stylesOf(pets),
     await learningOf(actor.businessId),
+    { lastCuts: await lastCutsOf(actor.businessId, lastVisits) },
   );
   const visit = await Visit.create({
     householdId: household.id,

@@ -1,7 +1,7 @@
 import { forecastVisit, type VisitForecast as PlainVisit } from '#shared/grooming/forecastVisit.ts';
 import { groomWork } from '#shared/grooming/learning/groomWork.ts';
 import { type LearnedVisit, learnVisit } from '#shared/grooming/learning/learnVisit.ts';
-import type { PetForecast } from '#shared/grooming/types.ts';
+import type { PetForecast, Style } from '#shared/grooming/types.ts';
 import type { Business } from '#server/models/Business.ts';
 import type { Groomer } from '#server/models/Groomer.ts';
 import type { Pet } from '#server/models/Pet.ts';
@@ -13,6 +13,12 @@ import { coatStyleOf } from './coatStyleOf.ts';
 
 /** What the business has learned and whose pace may be asked for; null: nothing yet. */
 export type Learning = (KeptFit & { groomers: Pick<Groomer, 'id' | 'name'>[] }) | null;
+
+/** What finished visits say beside the learning. */
+export interface VisitPast {
+  /** By pet id, see `lastCutsOf`. */
+  lastCuts?: ReadonlyMap<string, Style['cuts']>;
+}
 
 /**
  * The forecast booking stores: what today's model says of these pets on that date, with what was
@@ -26,13 +32,14 @@ export function forecastOf(
   lastVisits: ReadonlyMap<string, string>,
   styleOf: StyleOf,
   learning: Learning = null,
+  past: VisitPast = {},
 ): { forecast: VisitForecast; modelVersion: string } {
   const on = new Date(`${date}T12:00:00Z`);
   const plain = forecastVisit(
     pets.map((pet) => ({
       petId: pet.id,
       name: pet.name,
-      pet: petFactsOf(pet, on, lastVisits.get(pet.id) ?? null),
+      pet: petFactsOf(pet, on, lastVisits.get(pet.id) ?? null, past.lastCuts?.get(pet.id) ?? null),
       style: styleOf(pet),
     })),
     {

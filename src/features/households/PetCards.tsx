@@ -115,7 +115,7 @@ function shortWords(key: string): string {
 
 function tryForecast(pet: Pet, today: string) {
   try {
-    const facts = petFactsOf(pet, pet.lastVisitDate, today);
+    const facts = petFactsOf(pet, pet.lastVisitDate, today, pet.lastCuts);
     return typeof facts === 'string' ? null : forecastPet(facts, pet.style);
   } catch {
     // A pet saved under an older table still shows; its own page says what is wrong.

@@ -87,6 +87,7 @@ export function PetForm({
     { ...(values as PetFields), coatType: coat },
     pet?.lastVisitDate ?? null,
     today,
+    pet?.lastCuts ?? null,
   );
   return (
     <form

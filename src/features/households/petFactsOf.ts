@@ -1,6 +1,6 @@
 import type { Pet } from '#shared/api/pets.ts';
 import { findBreed } from '#shared/grooming/breeds.ts';
-import type { CautionKey, CoatState, PetFacts } from '#shared/grooming/types.ts';
+import type { CautionKey, CoatState, PetFacts, Style } from '#shared/grooming/types.ts';
 import { daysBetween } from '#shared/time/localDate.ts';
 
 /** What of a pet's form the forecast reads. */
@@ -22,12 +22,13 @@ export type PetLike = Pick<
 
 /**
  * The pet as the groom-minute model wants it, or the words of what is still missing. `lastVisitDate`
- * null means a first visit.
+ * null means a first visit; `lastCuts` null, that the coat grew from the style it has now.
  */
 export function petFactsOf(
   pet: PetLike,
   lastVisitDate: string | null,
   today: string,
+  lastCuts: Style['cuts'] | null = null,
 ): PetFacts | string {
   const breed = pet.breedId ? findBreed(pet.breedId) : null;
   if (!breed && !(pet.weightGrams && pet.coatType))
@@ -59,6 +60,7 @@ export function petFactsOf(
       lastVisitDate === null
         ? null
         : Math.max(0, Math.floor(daysBetween(lastVisitDate, today) / 7)),
+    lastCuts,
     tableLimitSeconds: tableLimitOf(pet.tableLimitMinutes),
   };
 }
