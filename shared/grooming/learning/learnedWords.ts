@@ -37,7 +37,9 @@ export function learnedWords(
   if (group) words.push(`Learned from ${visits(group)} of ${who.coatStyle}: ${told(group)}.`);
   const groomer = who.groomerId === null ? undefined : fit.effects[`groomer ${who.groomerId}`];
   if (groomer) {
-    const parts = [told(groomer), ...familyParts(fit, who, steps)];
+    const leaning = familyParts(fit, who, steps);
+    // Usual on the whole goes without saying where single steps are not.
+    const parts = clear(groomer) || leaning.length === 0 ? [told(groomer), ...leaning] : leaning;
     words.push(
       `Learned from ${visits(groomer)} with ${names.groomer ?? 'this groomer'}: ${parts.join(', ')}.`,
     );

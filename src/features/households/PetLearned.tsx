@@ -31,7 +31,7 @@ export function PetLearned({ petId, petName }: { petId: string; petName: string 
       <p>
         Booked at <strong>{writeSpan(data.medianSeconds)}</strong>{' '}
         <span className="text-slate">
-          8 in 10 take {writeSpan(data.p10Seconds)} to {writeSpan(data.p90Seconds)}
+          · 8 in 10 between {writeSpan(data.p10Seconds)} and {writeSpan(data.p90Seconds)}
         </span>
       </p>
       <ul className="mt-1 text-slate">
