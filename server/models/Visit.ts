@@ -45,6 +45,14 @@ export interface VisitForecast {
   coatStyle: string;
   /** Work where a groomer's pace was known at booking, by groomer id. Absent before learning. */
   workByGroomer?: Record<string, Spread>;
+  /** The household's door as booked. Absent on visits booked before it was learned. */
+  door?: {
+    /** Set-up and clean-down against the usual, 1000 = usual, and from how many visits. */
+    permille: number;
+    visits: number;
+    /** Both as usual; null when disinfectant's contact time is in them, which is no door's doing. */
+    usualSeconds: number | null;
+  };
   /** What learning needs later and what it said now. Absent on visits booked before it. */
   learning?: VisitLearning;
 }

@@ -93,8 +93,9 @@ function workVisit(
     weeksSinceStart: work.weeksSinceStart,
     random,
     options: {
-      setUpSeconds: facts.visit.forecast.setUpSeconds,
-      cleanDownSeconds: facts.visit.forecast.cleanDownSeconds,
+      // As usual, not as booked: the door is drawn, and what was learned of it must not come on top.
+      setUpSeconds: work.business.setUpMinutes * 60,
+      cleanDownSeconds: work.business.cleanDownMinutes * 60,
     },
   });
   clock += drawn.setUpSeconds;

@@ -13,6 +13,7 @@ import { localDateOf } from '#server/services/days/today.ts';
 import { lastVisitDates } from '#server/services/households/getHousehold.ts';
 import { lastCutsOf } from '#server/services/styles/lastCutsOf.ts';
 import { stylesOf } from '#server/services/styles/stylesOf.ts';
+import { doorOf } from './doorOf.ts';
 import { forecastOf } from './forecastOf.ts';
 import { learningOf } from './learningOf.ts';
 
@@ -51,7 +52,10 @@ export async function createVisit(actor: Actor, input: VisitInput, now: Date): P
     lastVisits,
     await stylesOf(pets),
     await learningOf(actor.businessId),
-    { lastCuts: await lastCutsOf(actor.businessId, lastVisits) },
+    {
+      lastCuts: await lastCutsOf(actor.businessId, lastVisits),
+      door: await doorOf(household.id, business.timeZone),
+    },
   );
   const visit = await Visit.create({
     householdId: household.id,

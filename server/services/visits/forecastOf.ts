@@ -1,5 +1,6 @@
 import { forecastVisit, type VisitForecast as PlainVisit } from '#shared/grooming/forecastVisit.ts';
 import { groomWork } from '#shared/grooming/learning/groomWork.ts';
+import { type DoorLearned, doorPermille } from '#shared/grooming/learning/doorPermille.ts';
 import { type LearnedVisit, learnVisit } from '#shared/grooming/learning/learnVisit.ts';
 import type { PetForecast, Style } from '#shared/grooming/types.ts';
 import type { Business } from '#server/models/Business.ts';
@@ -18,6 +19,8 @@ export type Learning = (KeptFit & { groomers: Pick<Groomer, 'id' | 'name'>[] }) 
 export interface VisitPast {
   /** By pet id, see `lastCutsOf`. */
   lastCuts?: ReadonlyMap<string, Style['cuts']>;
+  /** Of the household, see `doorOf`. */
+  door?: DoorLearned;
 }
 
 /**
@@ -34,6 +37,11 @@ export function forecastOf(
   learning: Learning = null,
   past: VisitPast = {},
 ): { forecast: VisitForecast; modelVersion: string } {
+  const door = past.door ?? doorPermille([]);
+  const around = {
+    setUpSeconds: business.setUpMinutes * 60,
+    cleanDownSeconds: business.cleanDownMinutes * 60,
+  };
   const on = new Date(`${date}T12:00:00Z`);
   const plain = forecastVisit(
     pets.map((pet) => ({
@@ -42,10 +50,7 @@ export function forecastOf(
       pet: petFactsOf(pet, on, lastVisits.get(pet.id) ?? null, past.lastCuts?.get(pet.id) ?? null),
       style: styleOf(pet),
     })),
-    {
-      setUpSeconds: business.setUpMinutes * 60,
-      cleanDownSeconds: business.cleanDownMinutes * 60,
-    },
+    { ...around, doorPermille: door.permille },
   );
   const coatStyles = pets.map((pet) => coatStyleOf(pet, styleOf(pet)));
   const learned = learning && learnVisit(plain, learning.fit, { groomerId: null, coatStyles });
@@ -65,6 +70,11 @@ export function forecastOf(
       heaviestGrams: result.heaviestGrams,
       coatStyle: coatStyles[0]!,
       workByGroomer: workByGroomer(plain, coatStyles, learning),
+      door: {
+        ...door,
+        usualSeconds:
+          plain.contactSeconds > 0 ? null : around.setUpSeconds + around.cleanDownSeconds,
+      },
       learning: {
         fitId: learning?.fitId ?? null,
         plain: plain.pets.map(({ forecast }, index) =>
