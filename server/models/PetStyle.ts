@@ -18,6 +18,7 @@ export class PetStyle extends Model<InferAttributes<PetStyle>, InferCreationAttr
   declare version: number;
   declare styleId: string;
   declare ownCuts: CreationOptional<Style['cuts'] | null>;
+  declare ownFinish: CreationOptional<Style['finish'] | null>;
   declare ownServices: CreationOptional<Service[] | null>;
   declare ownPlanB: CreationOptional<PlanB | null>;
   declare notes: string;
@@ -33,6 +34,7 @@ PetStyle.init(
     version: DataTypes.INTEGER,
     styleId: DataTypes.STRING,
     ownCuts: DataTypes.JSON,
+    ownFinish: DataTypes.STRING,
     ownServices: DataTypes.JSON,
     ownPlanB: DataTypes.JSON,
     notes: DataTypes.STRING,

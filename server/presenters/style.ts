@@ -42,6 +42,7 @@ export function presentPetStyle(facts: {
     styleId: row.styleId,
     styleName: facts.style.name,
     ownCuts: row.ownCuts ?? null,
+    ownFinish: row.ownFinish ?? null,
     ownServices: row.ownServices ?? null,
     ownPlanB: row.ownPlanB ?? null,
     style: presentStyleShape(facts.style),

@@ -1,7 +1,14 @@
 import { z } from 'zod';
 import { endpoint } from './endpoint.ts';
 import { photo } from './photos.ts';
-import { styleCuts, styleId, stylePlanB, styleServices, styleShape } from './styles.ts';
+import {
+  styleCuts,
+  styleFinish,
+  styleId,
+  stylePlanB,
+  styleServices,
+  styleShape,
+} from './styles.ts';
 import { id, note } from './values.ts';
 
 /** How a pet was to be groomed from `madeAt` on. Versions are never changed, only added. */
@@ -14,6 +21,7 @@ export const petStyle = z.object({
   /** Regions that differ from the style; null when none does. */
   ownCuts: styleCuts.nullable(),
   /** null: as the style. */
+  ownFinish: styleFinish.nullable(),
   ownServices: styleServices.nullable(),
   ownPlanB: stylePlanB.nullable(),
   /** The style with this pet's changes: what `forecastPet` takes. */
@@ -42,6 +50,7 @@ export const addPetStyle = endpoint({
   body: z.object({
     styleId,
     ownCuts: styleCuts.nullable().default(null),
+    ownFinish: styleFinish.nullable().default(null),
     ownServices: styleServices.nullable().default(null),
     ownPlanB: stylePlanB.nullable().default(null),
     notes: note.default(''),

@@ -49,7 +49,7 @@ export const stylePlanB = z.object({
   services: z.partialRecord(styleService, planBWord, 'must be words by service'),
   regions: z.partialRecord(region, planBWord, 'must be words by region'),
 });
-const finish = z.enum(['tidy', 'pet', 'full']);
+export const styleFinish = z.enum(['tidy', 'pet', 'full']);
 
 /** A starting style has a word for an id ("teddy"), the business's own a UUID. */
 export const styleId = z.string().trim().min(1, 'must be chosen').max(60);
@@ -61,7 +61,7 @@ export const styleShape = z.object({
   species: z.enum(['dog', 'cat']),
   coats: z.array(coat),
   cuts: styleCuts,
-  finish,
+  finish: styleFinish,
   services: z.array(styleService),
   /** Complete: every service and region the style works on. */
   planB: stylePlanB,
@@ -81,7 +81,7 @@ const styleFields = z.object({
   name,
   coats: z.array(coat).min(1, 'must name at least one coat').max(10),
   cuts: styleCuts,
-  finish,
+  finish: styleFinish,
   services: styleServices,
   /** Words left out follow the usual order. */
   planB: stylePlanB.default({ services: {}, regions: {} }),

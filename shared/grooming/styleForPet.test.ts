@@ -6,12 +6,15 @@ const teddy = findStyle('teddy');
 
 it('leaves a style as it is when the pet changes nothing', () => {
   expect(styleForPet(teddy, null)).toEqual(teddy);
-  expect(styleForPet(teddy, { ownCuts: null, ownServices: null, ownPlanB: null })).toEqual(teddy);
+  expect(
+    styleForPet(teddy, { ownCuts: null, ownFinish: null, ownServices: null, ownPlanB: null }),
+  ).toEqual(teddy);
 });
 
 it('lays the pet’s regions over the style and keeps plan B complete', () => {
   const own = styleForPet(teddy, {
     ownCuts: { back: { tool: 'blade', lengthTenthsMm: 63, direction: 'with' } },
+    ownFinish: 'full',
     ownServices: ['bath', 'teeth'],
     ownPlanB: { services: { teeth: 'must' }, regions: { tail: 'must' } },
   });
@@ -19,6 +22,7 @@ it('lays the pet’s regions over the style and keeps plan B complete', () => {
     ...teddy.cuts,
     back: { tool: 'blade', lengthTenthsMm: 63, direction: 'with' },
   });
+  expect([teddy.finish, own.finish]).toEqual(['pet', 'full']);
   expect(own.services).toEqual(['bath', 'teeth']);
   // Words for services the pet no longer has are gone; the tail must now be done.
   expect(own.planB!.services).toEqual({ bath: 'ifAllowed', teeth: 'must' });
@@ -29,6 +33,7 @@ it('lays the pet’s regions over the style and keeps plan B complete', () => {
 it('takes a region out of the plan by leaving it', () => {
   const own = styleForPet(teddy, {
     ownCuts: { tail: { tool: 'leave' } },
+    ownFinish: null,
     ownServices: null,
     ownPlanB: null,
   });

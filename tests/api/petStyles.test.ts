@@ -36,6 +36,7 @@ it('a new pet has version 1 of its style, made by whoever added it', async () =>
       styleId: 'teddy',
       styleName: findStyle('teddy').name,
       ownCuts: null,
+      ownFinish: null,
       ownServices: null,
       ownPlanB: null,
       style: JSON.parse(JSON.stringify(findStyle('teddy'))),
@@ -52,9 +53,21 @@ it('a new version counts everywhere at once and the old one stays readable', asy
   const date = tomorrow();
   const made = await client.must(addPetStyle, {
     params,
-    body: { styleId: 'teddy', ownCuts: shortBack, ownServices: ['bath', 'teeth'], notes: 'Short.' },
+    body: {
+      styleId: 'teddy',
+      ownCuts: shortBack,
+      ownFinish: 'full',
+      ownServices: ['bath', 'teeth'],
+      notes: 'Short.',
+    },
   });
-  expect(made).toMatchObject({ version: 2, ownCuts: shortBack, ownServices: ['bath', 'teeth'] });
+  expect(made).toMatchObject({
+    version: 2,
+    ownCuts: shortBack,
+    ownFinish: 'full',
+    ownServices: ['bath', 'teeth'],
+  });
+  expect(made.style.finish).toBe('full');
   expect(made.style.cuts).toEqual({ ...findStyle('teddy').cuts, ...shortBack });
   expect(made.style.planB.services).toEqual({ bath: 'ifAllowed', teeth: 'leave' });
   expect((await versions()).map(({ version, notes }) => [version, notes])).toEqual([
@@ -119,6 +132,7 @@ it('refuses a style of the other species and nonsense in the changes, and keeps 
     [{ styleId: 'mohawk' }, 'styleId'],
     [{ styleId: 'teddy', ownCuts: { wing: { tool: 'leave' } } }, 'ownCuts'],
     [{ styleId: 'teddy', ownServices: ['massage'] }, 'ownServices.0'],
+    [{ styleId: 'teddy', ownFinish: 'best' }, 'ownFinish'],
     [
       { styleId: 'teddy', ownPlanB: { services: { nails: 'never' }, regions: {} } },
       'ownPlanB.services.nails',

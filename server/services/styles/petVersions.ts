@@ -3,7 +3,12 @@ import type { Pet } from '#server/models/Pet.ts';
 import { PetStyle } from '#server/models/PetStyle.ts';
 
 /** As the style says. */
-export const nothingOwn: OwnStyle = { ownCuts: null, ownServices: null, ownPlanB: null };
+export const nothingOwn: OwnStyle = {
+  ownCuts: null,
+  ownFinish: null,
+  ownServices: null,
+  ownPlanB: null,
+};
 
 /**
  * The version that counts. A pet from before versions were kept has its version 1 by its fields: a
@@ -39,6 +44,7 @@ export function addVersion(
     version,
     styleId: pet.styleId,
     ownCuts: own.ownCuts,
+    ownFinish: own.ownFinish,
     ownServices: own.ownServices && [...own.ownServices],
     ownPlanB: own.ownPlanB,
     notes: pet.styleNotes,

@@ -27,6 +27,7 @@ export async function stylesOf(pets: readonly Pick<Pet, 'id' | 'styleId'>[]): Pr
 export function ownOf(version: PetStyle) {
   return {
     ownCuts: version.ownCuts ?? null,
+    ownFinish: version.ownFinish ?? null,
     ownServices: version.ownServices ?? null,
     ownPlanB: version.ownPlanB ?? null,
   };

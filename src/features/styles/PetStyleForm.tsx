@@ -1,9 +1,10 @@
 import { useState } from 'react';
 import type { Pet } from '#shared/api/pets.ts';
 import type { Style } from '#shared/api/styles.ts';
-import type { PetFacts } from '#shared/grooming/types.ts';
+import type { FinishLevel, PetFacts } from '#shared/grooming/types.ts';
 import { useAddPetStyle } from '#src/api/petStyles.ts';
 import { Card } from '#src/components/Card.tsx';
+import { Segmented } from '#src/components/Segmented.tsx';
 import { SelectField } from '#src/components/SelectField.tsx';
 import { TextArea } from '#src/components/TextArea.tsx';
 import { toast } from '#src/components/toast.ts';
@@ -59,11 +60,19 @@ export function PetStyleForm({
               label: source === 'own' ? `${name} · yours` : name,
             }))}
             value={draft.styleId}
-            hint={`${finishChoices.find(({ value }) => value === draft.finish)?.label} finish, as the style. Choosing another replaces the cut plan below.`}
+            hint="Choosing another replaces the finish and the cut plan below."
             onChange={({ target }) => {
               const style = base(target.value);
               if (style) change({ kind: 'start', style });
             }}
+          />
+          <Segmented
+            className="mt-3"
+            label="Finish"
+            choices={finishChoices}
+            value={draft.finish}
+            hint={finishHint(draft.finish, base(draft.styleId)?.finish)}
+            onChange={(finish) => change({ kind: 'fields', fields: { finish } })}
           />
         </Card>
       )}
@@ -81,4 +90,12 @@ export function PetStyleForm({
       )}
     />
   );
+}
+
+/** What the finish means, and the style's own when the pet has another. */
+function finishHint(finish: FinishLevel, ofStyle: FinishLevel | undefined): string {
+  const choice = (level: FinishLevel) => finishChoices.find(({ value }) => value === level)!;
+  const { hint } = choice(finish);
+  if (ofStyle === undefined || ofStyle === finish) return hint;
+  return `${hint} The style has ${choice(ofStyle).label.toLowerCase()}.`;
 }

@@ -4,6 +4,7 @@ import type { Region } from '#shared/grooming/types.ts';
 import { Card } from '#src/components/Card.tsx';
 import { cutWords } from './cutWords.ts';
 import { PhotoRow } from './PhotoRow.tsx';
+import { finishChoices } from './serviceWords.ts';
 import { sinceWords } from './sinceWords.ts';
 
 /** Every version of a pet's style, newest first: what was its own, notes, photos. */
@@ -56,11 +57,17 @@ export function StyleVersions({
 }
 
 /** "own: back 4F · 19 mm, feet kept long" */
-function ownWords({ ownCuts, ownServices, ownPlanB, style }: PetStyle): string {
+function ownWords({ ownCuts, ownFinish, ownServices, ownPlanB, style }: PetStyle): string {
   const cuts = Object.keys(ownCuts ?? {}).map((key) => {
     const region = key as Region;
     return `${regionWords([region])} ${cutWords(style.cuts, region).label}`;
   });
-  const parts = [...cuts, ...(ownServices ? ['services'] : []), ...(ownPlanB ? ['plan B'] : [])];
+  const finish = finishChoices.find(({ value }) => value === ownFinish);
+  const parts = [
+    ...cuts,
+    ...(finish ? [`${finish.label.toLowerCase()} finish`] : []),
+    ...(ownServices ? ['services'] : []),
+    ...(ownPlanB ? ['plan B'] : []),
+  ];
   return parts.length > 0 ? `own: ${parts.join(', ')}` : 'as the style';
 }

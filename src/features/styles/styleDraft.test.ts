@@ -8,6 +8,7 @@ const teddy = findStyle('teddy') as StyleShape;
 test('an untouched draft has nothing of its own', () => {
   expect(ownParts(startDraft(teddy, 'ears long'), teddy)).toEqual({
     ownCuts: null,
+    ownFinish: null,
     ownServices: null,
     ownPlanB: null,
   });
@@ -21,7 +22,9 @@ test('only what differs is the pet’s own; a region taken out of the style is k
     region: 'back',
     cut: { tool: 'comb', lengthTenthsMm: 190, direction: 'with' },
   });
+  draft = changeDraft(draft, { kind: 'fields', fields: { finish: 'full' } });
   const own = ownParts(draft, teddy);
+  expect(own.ownFinish).toBe('full');
   expect(own.ownCuts).toEqual({
     tail: { tool: 'leave' },
     back: { tool: 'comb', lengthTenthsMm: 190, direction: 'with' },

@@ -65,6 +65,7 @@ export function ownParts(draft: StyleDraft, base: StyleShape) {
   const sorted = (services: readonly string[]) => services.toSorted();
   return {
     ownCuts: Object.keys(cuts).length > 0 ? cuts : null,
+    ownFinish: draft.finish === base.finish ? null : draft.finish,
     ownServices: same(sorted(draft.services), sorted(base.services)) ? null : draft.services,
     ownPlanB: same(planB, planBOf(base)) ? null : planB,
   };
