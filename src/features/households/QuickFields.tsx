@@ -16,6 +16,7 @@ import {
   mattingChoices,
   soilChoices,
   temperamentChoices,
+  undercoatChoices,
 } from './coatWords.ts';
 import type { QuickPet } from './quickPet.ts';
 
@@ -107,6 +108,13 @@ export function QuickFields({
           choices={mattingChoices}
           value={String(pet.matting) as (typeof mattingChoices)[number]['value']}
           onChange={(level) => onChange({ matting: Number(level) })}
+        />
+        <Segmented
+          label="Undercoat"
+          className="md:col-span-2"
+          choices={undercoatChoices}
+          value={String(pet.undercoatLoad) as (typeof undercoatChoices)[number]['value']}
+          onChange={(level) => onChange({ undercoatLoad: Number(level) })}
         />
         <Segmented
           label="Dirt"

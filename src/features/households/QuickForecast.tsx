@@ -30,7 +30,6 @@ export function QuickForecast() {
       birthYear: pet.ageYears === null ? null : Number(today.slice(0, 4)) - pet.ageYears,
       cautions: [],
       mattingByRegion: null,
-      undercoatLoad: 0,
       tableLimitMinutes: null,
     },
     null,

@@ -8,6 +8,7 @@ export interface QuickPet {
   weightGrams: number | null;
   coatType: CoatType | null;
   matting: number;
+  undercoatLoad: number;
   soil: number;
   temperament: Temperament;
   ageYears: number | null;
@@ -27,6 +28,7 @@ export const quickStart: QuickPet = {
   weightGrams: null,
   coatType: null,
   matting: 0,
+  undercoatLoad: 0,
   soil: 0,
   temperament: 'calm',
   ageYears: null,
