@@ -1,3 +1,4 @@
+import { useState } from 'react';
 import { useController, type Control } from 'react-hook-form';
 import type { z } from 'zod';
 import type { createPet } from '#shared/api/pets.ts';
@@ -19,8 +20,10 @@ export function MatPlaces({
   const { field, fieldState } = useController({ control, name: 'mattingByRegion' });
   const places: Places = field.value ?? {};
   const matted = regions.options.filter((region) => (places[region] ?? 0) > 0);
+  // Only at first: it must not fold away under the hand that clears the last place.
+  const [startsOpen] = useState(matted.length > 0);
   return (
-    <details className="mt-2" open={matted.length > 0 || undefined}>
+    <details className="mt-2" open={startsOpen || undefined}>
       <summary className="flex min-h-11 items-center font-medium">
         <span aria-hidden="true">▸&nbsp;</span>Mats in places
         {matted.length > 0 && (
