@@ -53,6 +53,7 @@ export async function petLearned(
     medianSeconds: distribution(forecast.work).p50Seconds,
     p10Seconds: forecast.p10Seconds,
     p90Seconds: forecast.p90Seconds,
-    byGroomer: byGroomer.sort((a, b) => a.medianSeconds - b.medianSeconds),
+    // By name, not by minutes: people are not ranked.
+    byGroomer: byGroomer.sort((a, b) => a.groomerName.localeCompare(b.groomerName)),
   };
 }
