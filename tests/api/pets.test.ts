@@ -91,6 +91,9 @@ describe('a pet', () => {
     const { create, update } = await petOwner();
     const bare = await create({ breedId: null, weightGrams: null });
     expect(bare.error.fields).toEqual({ weightGrams: 'is needed when no breed is chosen' });
+    const cross = await create({ breedId: 'cockapoo', weightGrams: null });
+    expect(cross.error.fields).toEqual({ weightGrams: 'is needed for a cross such as cockapoo' });
+    expect((await create({ breedId: 'cockapoo', weightGrams: 9000 })).status).toBe(200);
     expect((await create({ breedId: null, weightGrams: 9000 })).error.fields).toEqual({
       coatType: 'is missing: without a breed, name the coat (for example "curly")',
     });

@@ -99,6 +99,10 @@ export async function checkPet(
   if (unknown) throw badField('cautions', `has an unknown entry, ${unknown}`);
   if (pet.breedId === null && pet.weightGrams === null)
     throw badField('weightGrams', 'is needed when no breed is chosen');
+  // Crosses differ too much for a middle weight; a pet stored without one may still change its name.
+  const told = pet.isNewRecord || pet.changed('breedId') || pet.changed('weightGrams');
+  if (breed?.cross && pet.weightGrams === null && told)
+    throw badField('weightGrams', `is needed for a cross such as ${breed.name.toLowerCase()}`);
   try {
     const style = own ? styleForPet(found.style, own) : (await stylesOf([pet]))(pet);
     forecastPet(petFactsOf(pet, now, null), style);
