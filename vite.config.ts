@@ -35,6 +35,8 @@ export default defineConfig({
           name: 'unit',
           // Times belong to benches: a busy machine must not fail an answer that is right.
           testTimeout: 30_000,
+          // The default leaves a core idle; on two cores that is half the machine.
+          maxWorkers: '100%',
           include: [
             'shared/**/*.test.ts',
             'server/**/*.test.ts',
